@@ -1,0 +1,18 @@
+import { z } from 'zod';
+
+/** RFC 9457 problem document: the one body of every error. */
+export const problemSchema = z.object({
+  type: z.string(),
+  title: z.string(),
+  status: z.int(),
+  detail: z.string(),
+  errors: z.array(z.object({ path: z.string(), message: z.string() })).optional(),
+  requestId: z.string().optional(),
+});
+
+export type Problem = z.infer<typeof problemSchema>;
+
+/** A path of keys as one string: `holes.2.diameterMm`. */
+export function fieldPath(path: readonly (string | number)[]): string {
+  return path.join('.');
+}
