@@ -1,4 +1,5 @@
 import { designDocumentSchema, type DesignDocument } from './design-document.ts';
+import { plainWords } from './plain-words.ts';
 import { documentFaults, type DocumentFault } from './document-faults.ts';
 
 export type DocumentReading =
@@ -6,7 +7,7 @@ export type DocumentReading =
 
 /** Reads a design document from unknown JSON: shape first, then what the parts mean to one another. */
 export function readDocument(input: unknown): DocumentReading {
-  const parsed = designDocumentSchema.safeParse(input);
+  const parsed = designDocumentSchema.safeParse(input, { error: plainWords });
   if (!parsed.success) {
     const faults = parsed.error.issues.map((issue) => ({
       path: issue.path.map((key) => (typeof key === 'symbol' ? key.toString() : key)),

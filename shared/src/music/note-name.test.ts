@@ -1,6 +1,14 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { fifthsFromC, midiNumber, noteOfMidi, printNoteName, readNoteName, spokenNote, transposeNote } from './note-name.ts';
+import {
+  fifthsFromC,
+  midiNumber,
+  noteOfMidi,
+  printNoteName,
+  readNoteName,
+  spokenNote,
+  transposeNote,
+} from './note-name.ts';
 
 const note = (text: string) => {
   const name = readNoteName(text);
@@ -46,7 +54,9 @@ describe('a note name', () => {
   });
 
   it('has its place in the chain of fifths', () => {
-    expect(['F', 'C', 'G', 'F#', 'Bb'].map((name) => fifthsFromC(note(`${name}4`)))).toEqual([-1, 0, 1, 6, -2]);
+    expect(['F', 'C', 'G', 'F#', 'Bb'].map((name) => fifthsFromC(note(`${name}4`)))).toEqual([
+      -1, 0, 1, 6, -2,
+    ]);
   });
 
   it('is spoken without signs', () => {

@@ -3,8 +3,15 @@ import type { Pitch } from '../document/design-document.ts';
 import { centsBetween } from './cents.ts';
 import { noteFrequencyHz } from './temperament.ts';
 
-const pitch = (change: Partial<Pitch>): Pitch => ({ a4Hz: 440, temperament: 'equal', tonic: 'C', centsOffsets: null, ...change });
-const cents = (note: string, from: string, p: Pitch) => centsBetween(noteFrequencyHz(note, p), noteFrequencyHz(from, p));
+const pitch = (change: Partial<Pitch>): Pitch => ({
+  a4Hz: 440,
+  temperament: 'equal',
+  tonic: 'C',
+  centsOffsets: null,
+  ...change,
+});
+const cents = (note: string, from: string, p: Pitch) =>
+  centsBetween(noteFrequencyHz(note, p), noteFrequencyHz(from, p));
 
 describe('the scale', () => {
   it.each([
@@ -36,14 +43,21 @@ describe('the scale', () => {
     expect(cents(note, 'C4', pitch({ temperament }))).toBeCloseTo(size, 2);
   });
 
-  it.each(['equal', 'just', 'pythagorean', 'quarter-comma-meantone'] as const)('%s keeps A4 at the pitch standard', (temperament) => {
-    for (const tonic of ['C', 'D', 'Bb', 'F#']) {
-      expect(noteFrequencyHz('A4', pitch({ temperament, tonic, a4Hz: 415 }))).toBeCloseTo(415, 9);
-    }
-  });
+  it.each(['equal', 'just', 'pythagorean', 'quarter-comma-meantone'] as const)(
+    '%s keeps A4 at the pitch standard',
+    (temperament) => {
+      for (const tonic of ['C', 'D', 'Bb', 'F#']) {
+        expect(noteFrequencyHz('A4', pitch({ temperament, tonic, a4Hz: 415 }))).toBeCloseTo(415, 9);
+      }
+    },
+  );
 
   it('takes own cents as typed, from the tonic upwards', () => {
-    const own = pitch({ temperament: 'own', tonic: 'D', centsOffsets: [0, 1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11] });
+    const own = pitch({
+      temperament: 'own',
+      tonic: 'D',
+      centsOffsets: [0, 1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11],
+    });
     expect(centsBetween(noteFrequencyHz('E5', own), noteFrequencyHz('E5', pitch({})))).toBeCloseTo(2, 9);
     expect(centsBetween(noteFrequencyHz('C#5', own), noteFrequencyHz('C#5', pitch({})))).toBeCloseTo(11, 9);
   });

@@ -14,7 +14,20 @@ const QUARTER_COMMA_FIFTH = (1200 * Math.log2(5)) / 4;
  * Five-limit ratios of the twelve semitones from the tonic.
  * Helmholtz and Ellis, On the Sensations of Tone (1885), ch. XVI and appendix XX (the usual chromatic scale of just intonation).
  */
-const JUST_RATIOS = [1, 16 / 15, 9 / 8, 6 / 5, 5 / 4, 4 / 3, 45 / 32, 3 / 2, 8 / 5, 5 / 3, 9 / 5, 15 / 8] as const;
+const JUST_RATIOS = [
+  1,
+  16 / 15,
+  9 / 8,
+  6 / 5,
+  5 / 4,
+  4 / 3,
+  45 / 32,
+  3 / 2,
+  8 / 5,
+  5 / 3,
+  9 / 5,
+  15 / 8,
+] as const;
 
 const inOctave = (value: number, size: number) => ((value % size) + size) % size;
 
@@ -26,7 +39,8 @@ function chainOfFifths(fifth: number): Deviation {
   return (note, tonic) => (fifthsFromC(note) - fifthsFromC(tonic)) * (fifth - 700);
 }
 
-const semitoneFromTonic = (note: NoteName, tonic: NoteName) => inOctave(midiNumber(note) - midiNumber(tonic), 12);
+const semitoneFromTonic = (note: NoteName, tonic: NoteName) =>
+  inOctave(midiNumber(note) - midiNumber(tonic), 12);
 
 const DEVIATIONS: Record<Temperament, Deviation> = {
   equal: () => 0,
