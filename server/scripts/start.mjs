@@ -9,8 +9,9 @@ const shutdown = orderlyShutdown();
 await runLauncher(async () => {
   try {
     const { port, environment } = await prepareHome(shutdown, 'npm start');
-    await ensureClientBuilt();
-    const server = await startServer(shutdown, { port, environment });
+    const pages = { STATIC_DIR: await ensureClientBuilt() };
+    const quiet = { BOREWRIGHT_LOG_LEVEL: process.env.BOREWRIGHT_LOG_LEVEL ?? 'warn' };
+    const server = await startServer(shutdown, { port, environment: { ...environment, ...pages, ...quiet } });
     if (server.status === 'ended') return await shutdown.leave(server.code);
     process.stdout.write(`Borewright is at http://127.0.0.1:${port} (Ctrl-C stops it)\n`);
     const [code] = await server.ended;

@@ -4,7 +4,8 @@ import { ensurePackages } from './packages.mjs';
 import { inVar } from './paths.mjs';
 import { isPortFree } from './ports.mjs';
 import { Refusal } from './refusal.mjs';
-import { readSecrets } from './secrets.mjs';
+import { SECRETS_FILE, readSecrets } from './secrets.mjs';
+import { endLeftoverServer } from './server-process.mjs';
 import { takeTheOnlyPlace } from './single-run.mjs';
 
 function readPort() {
@@ -29,10 +30,17 @@ async function refuseTakenPort(port, command) {
 export async function prepareHome(shutdown, command) {
   const port = readPort();
   await shutdown.add(takeTheOnlyPlace(port));
+  await endLeftoverServer();
   await refuseTakenPort(port, command);
   await ensurePackages();
   const secrets = readSecrets();
-  return { port, environment: { SESSION_SECRET: secrets.sessionSecret, DATABASE_URL: await openDatabase() } };
+  return {
+    port,
+    environment: {
+      BOREWRIGHT_SECRETS_FILE: SECRETS_FILE,
+      DATABASE_URL: await openDatabase(),
+    },
+  };
 
   async function openDatabase() {
     if (process.env.DATABASE_URL) return process.env.DATABASE_URL;

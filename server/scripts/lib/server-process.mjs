@@ -17,6 +17,11 @@ async function isHealthy(port) {
   }
 }
 
+/** A run that was killed outright may have left its server on the port. */
+export async function endLeftoverServer() {
+  if (existsSync(PID_FILE)) await endLeftover(Number(readFileSync(PID_FILE, 'utf8')), ENTRY);
+}
+
 /**
  * Starts the API server and waits until it answers.
  *
@@ -24,7 +29,6 @@ async function isHealthy(port) {
  * @returns `{ status: 'up' }`, or `{ status: 'ended', code }` when it gave up and said why itself
  */
 export async function startServer(shutdown, { port, environment, watch = false }) {
-  if (existsSync(PID_FILE)) await endLeftover(Number(readFileSync(PID_FILE, 'utf8')), ENTRY);
   const parameters = watch
     ? [inRoot('node_modules', 'tsx', 'dist', 'cli.mjs'), 'watch', '--clear-screen=false', ENTRY]
     : ['--import', 'tsx', ENTRY];
