@@ -1,0 +1,54 @@
+import { Dialog as Radix } from 'radix-ui';
+import type { ReactNode } from 'react';
+
+interface DialogProps {
+  title: string;
+  /** One or two sentences under the title; read out with it. */
+  description?: ReactNode;
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+  /** False for what has to be answered before work goes on. */
+  dismissible?: boolean;
+  width?: 'narrow' | 'wide';
+  children: ReactNode;
+}
+
+/** Floats over the page and keeps the focus; only for what cannot be done in place. */
+export function Dialog({
+  title,
+  description,
+  open,
+  onOpenChange,
+  dismissible = true,
+  width = 'narrow',
+  children,
+}: DialogProps) {
+  const hold = (event: Event) => {
+    if (!dismissible) event.preventDefault();
+  };
+  return (
+    <Radix.Root open={open} onOpenChange={onOpenChange}>
+      <Radix.Portal>
+        <Radix.Overlay className="bg-scrim fixed inset-0 z-40" />
+        <Radix.Content
+          onEscapeKeyDown={hold}
+          onPointerDownOutside={hold}
+          onInteractOutside={hold}
+          {...(description === undefined ? { 'aria-describedby': undefined } : {})}
+          className={`rounded-control bg-sheet text-ink shadow-pop fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-32px)] w-[calc(100vw-32px)] -translate-x-1/2 -translate-y-1/2 overflow-y-auto p-6 ${width === 'wide' ? 'max-w-190' : 'max-w-115'}`}
+        >
+          <Radix.Title className="text-title font-semibold">{title}</Radix.Title>
+          {description !== undefined && (
+            <Radix.Description className="text-ink2 mt-1">{description}</Radix.Description>
+          )}
+          <div className="mt-4">{children}</div>
+        </Radix.Content>
+      </Radix.Portal>
+    </Radix.Root>
+  );
+}
+
+/** The row of verbs at a dialog's foot; the primary one comes last, at the right. */
+export function DialogActions({ children }: { children: ReactNode }) {
+  return <div className="mt-6 flex flex-wrap justify-end gap-2">{children}</div>;
+}
