@@ -1,8 +1,7 @@
 import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
+import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import type { BenchGeometry } from './bench-geometry.ts';
-
-export type LengthUnit = 'mm' | 'inch';
 
 /** One change of the document, one undo step. */
 export interface DesignEdit {
