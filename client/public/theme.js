@@ -1,4 +1,4 @@
-/* global document, matchMedia, localStorage */
+/* global document, matchMedia */
 // Runs before the first paint, so that an evening bench never flashes white; src/lib/theme.ts keeps the same key.
 {
   const kept = localStorage.getItem('borewright.theme');

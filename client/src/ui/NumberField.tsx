@@ -25,11 +25,10 @@ interface NumberFieldProps {
 
 /** A figure with its unit, − and +. Arrows step, Shift ten; Enter or leaving keeps, Escape puts back. */
 export function NumberField({ layout = 'stack', label, hint, beside, error, ...props }: NumberFieldProps) {
-  const { value, format, onChange, min = -Infinity, max = Infinity, disabled = false, onFocus } = props;
+  const { value, format, disabled = false, onFocus } = props;
   const id = useId();
-  const entry = useNumberEntry({ value, format, min, max, onChange });
+  const entry = useNumberEntry(props);
   const fault = entry.complaint ?? error;
-  const described = [hint !== undefined && `${id}-hint`, fault !== undefined && `${id}-error`];
   return (
     <div>
       <div className={layout === 'row' ? 'flex items-center justify-between gap-2' : undefined}>
@@ -42,11 +41,9 @@ export function NumberField({ layout = 'stack', label, hint, beside, error, ...p
           label={label}
           entry={entry}
           suffix={format.suffix}
-          atLeast={value <= min}
-          atMost={value >= max}
           isFaulty={fault !== undefined}
           disabled={disabled}
-          describedBy={described.filter((part) => part !== false).join(' ')}
+          describedBy={describingIds(id, hint, fault)}
           onFocus={onFocus}
         />
         {layout === 'row' && beside}
@@ -54,6 +51,12 @@ export function NumberField({ layout = 'stack', label, hint, beside, error, ...p
       {fault !== undefined && <FieldError id={`${id}-error`}>{fault}</FieldError>}
     </div>
   );
+}
+
+function describingIds(id: string, hint: ReactNode, fault: string | undefined): string | undefined {
+  const ids = [hint === undefined ? null : `${id}-hint`, fault === undefined ? null : `${id}-error`];
+  const present = ids.filter((part) => part !== null);
+  return present.length === 0 ? undefined : present.join(' ');
 }
 
 interface StepperLabelProps {
@@ -81,11 +84,9 @@ interface StepperProps {
   label: string;
   entry: NumberEntry;
   suffix: string;
-  atLeast: boolean;
-  atMost: boolean;
   isFaulty: boolean;
   disabled: boolean;
-  describedBy: string;
+  describedBy: string | undefined;
   onFocus: (() => void) | undefined;
 }
 
@@ -101,7 +102,7 @@ function Stepper({ id, label, entry, suffix, isFaulty, disabled, describedBy, ..
       <StepButton
         label={`Less: ${label}`}
         sign="−"
-        disabled={disabled || props.atLeast}
+        disabled={disabled || entry.isLeast}
         onStep={entry.step}
       />
       <span className="flex min-w-0 flex-1 items-baseline justify-center gap-1 self-center px-1">
@@ -114,7 +115,7 @@ function Stepper({ id, label, entry, suffix, isFaulty, disabled, describedBy, ..
           disabled={disabled}
           size={Math.max(5, entry.text.length)}
           aria-invalid={isFaulty ? true : undefined}
-          aria-describedby={describedBy === '' ? undefined : describedBy}
+          aria-describedby={describedBy}
           onChange={(event) => entry.onType(event.currentTarget.value)}
           onFocus={(event) => {
             event.currentTarget.select();
@@ -126,7 +127,7 @@ function Stepper({ id, label, entry, suffix, isFaulty, disabled, describedBy, ..
         />
         {suffix !== '' && <span className="text-small text-ink3">{suffix}</span>}
       </span>
-      <StepButton label={`More: ${label}`} sign="+" disabled={disabled || props.atMost} onStep={entry.step} />
+      <StepButton label={`More: ${label}`} sign="+" disabled={disabled || entry.isMost} onStep={entry.step} />
     </div>
   );
 }

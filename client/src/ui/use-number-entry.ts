@@ -4,8 +4,8 @@ import type { NumberFormat, NumberReading } from './number-format.ts';
 export interface NumberEntryOptions {
   value: number;
   format: NumberFormat;
-  min: number;
-  max: number;
+  min?: number;
+  max?: number;
   /** Called with every new figure that could be read and lies inside the limits. */
   onChange: (value: number) => void;
 }
@@ -14,6 +14,9 @@ export interface NumberEntry {
   text: string;
   /** Why what is typed was not taken; null while there is nothing to say. */
   complaint: string | null;
+  /** The stored figure stands at its limit, so that − or + leads nowhere. */
+  isLeast: boolean;
+  isMost: boolean;
   commit: () => void;
   step: (steps: number) => void;
   onKeyDown: (event: KeyboardEvent) => void;
@@ -21,7 +24,8 @@ export interface NumberEntry {
 }
 
 /** What happens between the first key and the stored figure. Nothing typed is thrown away while it cannot be read. */
-export function useNumberEntry({ value, format, min, max, onChange }: NumberEntryOptions): NumberEntry {
+export function useNumberEntry({ value, format, onChange, ...limits }: NumberEntryOptions): NumberEntry {
+  const { min = -Infinity, max = Infinity } = limits;
   /** null: the field shows the stored figure. */
   const [typed, setTyped] = useState<string | null>(null);
   const [complaint, setComplaint] = useState<string | null>(null);
@@ -67,7 +71,16 @@ export function useNumberEntry({ value, format, min, max, onChange }: NumberEntr
     setComplaint(null);
   };
 
-  return { text: typed ?? format.print(value), complaint, commit, step, onKeyDown, onType };
+  return {
+    text: typed ?? format.print(value),
+    complaint,
+    isLeast: value <= min,
+    isMost: value >= max,
+    commit,
+    step,
+    onKeyDown,
+    onType,
+  };
 }
 
 function readTyped(text: string, value: number, format: NumberFormat): NumberReading {
