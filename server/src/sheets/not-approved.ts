@@ -1,0 +1,79 @@
+import type { Pen, Point } from './pen.ts';
+import type { SheetInput } from './sheet-input.ts';
+import { printDayAndTime } from './sheet-dates.ts';
+import { decoration } from './tagging.ts';
+
+const BAND_HEIGHT_MM = 8.5;
+const BAND_WORDS = 'NOT APPROVED. DO NOT DRILL';
+const TEMPLATE_WORDS = 'NOT APPROVED';
+
+/** Width of a diagonal bar and of the white between two, measured across them, mm. */
+const BAR_MM = 3;
+const GAP_MM = 17;
+const BAR_COLOUR = '#ededed';
+
+/** Grey enough to leave the circles over it clear, black enough for any printer. */
+const TEMPLATE_WORDS_COLOUR = '#8a8a8a';
+
+/** What the approval cell says of a print that nobody has approved. */
+export function notApprovedWords({ state, draftSavedAt }: SheetInput['revision']): string {
+  const of = { draft: 'draft of', 'in-review': 'in review,', 'changes-asked': 'changes asked,' }[state];
+  return `${of} ${printDayAndTime(draftSavedAt)}`;
+}
+
+/** Diagonal bars over the whole page, to be drawn before anything else, and a black band at top and bottom. */
+export function drawNotApprovedPage(pen: Pen): void {
+  decoration(pen, () => {
+    drawBars(pen);
+    drawBand(pen, 0);
+    drawBand(pen, pen.paper.heightMm - BAND_HEIGHT_MM);
+  });
+}
+
+function drawBars(pen: Pen): void {
+  const { widthMm, heightMm } = pen.paper;
+  const along = Math.SQRT2;
+  const style = { widthMm: BAR_MM, colour: BAR_COLOUR };
+  pen.clipped([0, 0], widthMm, heightMm, () => {
+    pen.stroke(style, (path) => {
+      for (let start = 0; start < widthMm + heightMm; start += (BAR_MM + GAP_MM) * along) {
+        path.moveTo(start, 0).lineTo(start - heightMm, heightMm);
+      }
+    });
+  });
+}
+
+function drawBand(pen: Pen, topMm: number): void {
+  pen.fillRect([0, topMm], pen.paper.widthMm, BAND_HEIGHT_MM);
+  pen.text(BAND_WORDS, [pen.paper.widthMm / 2, topMm + 6.1], {
+    size: 15,
+    weight: 700,
+    colour: '#ffffff',
+    align: 'centre',
+    spacing: 0.08,
+  });
+}
+
+/** Distance of two words along a template, and of two rows across it, mm. */
+const WORDS_APART_MM = 52;
+const ROWS_APART_MM = 26;
+
+/** The words again and again inside a template, so that each strip that is cut out carries them. */
+export function drawNotApprovedInside(
+  pen: Pen,
+  { at: [x, y], widthMm, heightMm }: { at: Point; widthMm: number; heightMm: number },
+): void {
+  const style = { size: 14.7, weight: 700, colour: TEMPLATE_WORDS_COLOUR, spacing: 0.06 } as const;
+  const wordsMm = pen.textWidthMm(TEMPLATE_WORDS, style);
+  const fitted = { ...style, size: style.size * Math.min(1, (widthMm - 4) / wordsMm) };
+  const rows = Math.max(2, Math.floor(heightMm / ROWS_APART_MM));
+  pen.clipped([x, y], widthMm, heightMm, () => {
+    for (let row = 0; row < rows; row += 1) {
+      const baseMm = y + (heightMm * (row + 0.5)) / rows + 1.8;
+      const indentMm = row % 2 === 0 ? 0 : Math.min(22, Math.max(0, widthMm - wordsMm - 6));
+      for (let at = 3 + indentMm; at < widthMm - 4; at += WORDS_APART_MM) {
+        pen.text(TEMPLATE_WORDS, [x + at, baseMm], fitted);
+      }
+    }
+  });
+}
