@@ -1,5 +1,8 @@
 import { EngineInputError } from '../engine-input-error.ts';
-import { selfRadiation } from './cylinder-radiation.ts';
+import { LARGEST_BODY_WAVENUMBER, selfRadiation } from './cylinder-radiation.ts';
+
+/** Up to this wavenumber·radius the coupling round the body was fitted; beyond, its strength is carried on. */
+const ROUND_FITTED_TO = 0.6;
 
 /** Two openings in one round body, with all that does not depend on frequency worked out; made by `openingPair`. */
 export interface OpeningPair {
@@ -66,7 +69,7 @@ const self = new Float64Array(2);
  * Coupling G of two openings in a round body through the air outside: the mutual impedance is j·k·ρc/(4π)·G.
  *
  * Times the radius it is within 0.06 for openings on one side up to wavenumber·radius 0.6, and within 0.012, 0.03 and 0.08 at
- * 0.2, 0.4 and 0.6 for angles from 60° on.
+ * 0.2, 0.4 and 0.6 for angles from 60° on. Between 0.6 and 1 its resistance stays within 0.14; beyond it only gives out no power.
  *
  * @param wavenumber - 1/m, ≥ 0
  * @param pair - made by `openingPair`
@@ -77,16 +80,17 @@ const self = new Float64Array(2);
  */
 export function mutualRadiation(wavenumber: number, pair: OpeningPair, out: Float64Array, at: number): void {
   const { radius, distance, turn } = pair;
-  const q = wavenumber * radius;
-  const v = q * distance;
+  const v = wavenumber * radius * distance;
+  // Held where the self-radiation is: a coupling stronger than the opening's own resistance would give out power.
+  const q = Math.min(wavenumber * radius, LARGEST_BODY_WAVENUMBER);
   selfRadiation(q, self, 0);
   const ownRe = self[0] ?? NaN;
   const ownIm = (self[1] ?? NaN) + q;
   const half = Math.sin(v / 2);
-  let re = pair.low + ownRe * pair.reach + (distance > 0 ? (-2 * half * half) / distance : 0);
+  let re = pair.low + ownRe * pair.reach - (distance > 0 ? (2 * half * half) / distance : 0);
   let im = ownIm * sinc(0.65 * v) - q * sinc(v);
   if (turn > 0) {
-    const round = 8 * turn * q * q * q;
+    const round = 8 * turn * roundStrength(q);
     re -= round * aroundReal(q * pair.path);
     im += round * aroundImaginary(v);
   }
@@ -124,6 +128,14 @@ export function footMutualRadiation(
   const phase = wavenumber * distance;
   out[at] = Math.cos(phase) / distance;
   out[at + 1] = -Math.sin(phase) / distance;
+}
+
+// The cube of wavenumber·radius up to 0.6. The fitted cube grows past any physical coupling beyond (ten times the exact
+// resistance at 1.5): a parabola with the same value and slope follows the exact Green function from there.
+function roundStrength(q: number): number {
+  if (q <= ROUND_FITTED_TO) return q * q * q;
+  const beyond = q - ROUND_FITTED_TO;
+  return 0.216 + beyond * (1.08 - 0.32 * beyond);
 }
 
 function sinc(x: number): number {
