@@ -35,7 +35,7 @@ export const InstrumentOutline = memo(function InstrumentOutline({
       {...(label === undefined ? { 'aria-hidden': true } : { role: 'img', 'aria-label': label })}
     >
       <path d={planPath(document, body, place)} className="bench-wood-flat" />
-      <MouthPlan document={document} body={body} place={place} />
+      <MouthPlan shape={document} body={body} place={place} />
       {document.holes.map((hole) => {
         const { behind, ...ellipse } = planHole(document, hole, place);
         return <ellipse key={hole.id} {...ellipse} className={behind ? 'bench-hole-behind' : 'bench-hole'} />;

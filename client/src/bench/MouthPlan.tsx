@@ -1,18 +1,18 @@
-import type { DesignDocument, MouthEnd } from '#shared/document/design-document.ts';
+import type { MouthEnd } from '#shared/document/design-document.ts';
 import { diameterAt } from '#shared/document/profile.ts';
 import type { Place } from './body-paths.ts';
-import type { DrawnBody } from './drawn-body.ts';
+import type { BodyShape, DrawnBody } from './drawn-body.ts';
 
 interface MouthPlanProps {
-  document: DesignDocument;
+  shape: BodyShape;
   body: DrawnBody;
   place: Place;
 }
 
 /** The mouth end as seen from above, by its kind. */
-export function MouthPlan({ document, body, place }: MouthPlanProps) {
-  const { mouthEnd } = document;
-  const outsideMm = diameterAt(document.outside.stations, 0);
+export function MouthPlan({ shape, body, place }: MouthPlanProps) {
+  const { mouthEnd } = shape;
+  const outsideMm = diameterAt(shape.outside.stations, 0);
   switch (mouthEnd.kind) {
     case 'window':
       return <WindowPlan window={mouthEnd} outsideMm={outsideMm} place={place} />;
@@ -27,7 +27,7 @@ export function MouthPlan({ document, body, place }: MouthPlanProps) {
         />
       );
     case 'reed':
-      return <ReedPlan headMm={body.headMm} boreMm={diameterAt(document.bore.stations, 0)} place={place} />;
+      return <ReedPlan headMm={body.headMm} boreMm={diameterAt(shape.bore.stations, 0)} place={place} />;
     case 'rim':
       return <NotchPlan outsideMm={outsideMm} place={place} />;
     case 'ideal-open':

@@ -1,7 +1,7 @@
 import { line } from 'd3';
-import type { DesignDocument, Station, ToneHole } from '#shared/document/design-document.ts';
+import type { Station, ToneHole } from '#shared/document/design-document.ts';
 import { boreEnds, chimneyMm, diameterAt } from '#shared/document/profile.ts';
-import type { DrawnBody } from './drawn-body.ts';
+import type { BodyShape, DrawnBody } from './drawn-body.ts';
 
 /** Where a drawing of the body stands: along and across the instrument. */
 export interface Place {
@@ -42,35 +42,31 @@ function tube(stations: readonly Station[], span: [number, number], place: Place
 }
 
 /** Outside of the body where the document gives it. */
-export function outsideSpan(document: DesignDocument, body: DrawnBody): [number, number] {
-  const first = document.outside.stations[0]?.positionMm ?? body.headMm;
-  const { mouthMm } = boreEnds(document);
+export function outsideSpan(shape: BodyShape, body: DrawnBody): [number, number] {
+  const first = shape.outside.stations[0]?.positionMm ?? body.headMm;
+  const { mouthMm } = boreEnds(shape);
   return [Math.max(body.headMm, Math.min(first, mouthMm)), body.footMm];
 }
 
 /** Outline of the body as seen from above, head included. */
-export function planPath(document: DesignDocument, body: DrawnBody, place: Place): string {
-  const span = outsideSpan(document, body);
-  const points = tube(document.outside.stations, span, place);
-  if (document.mouthEnd.kind === 'reed' || span[0] <= body.headMm + 0.01) return polygon(points);
-  const head = headOutline(document, body, place);
+export function planPath(shape: BodyShape, body: DrawnBody, place: Place): string {
+  const span = outsideSpan(shape, body);
+  const points = tube(shape.outside.stations, span, place);
+  if (shape.mouthEnd.kind === 'reed' || span[0] <= body.headMm + 0.01) return polygon(points);
+  const head = headOutline(shape, body, place);
   const top = points.slice(0, points.length / 2);
   const bottom = points.slice(points.length / 2);
   return `${head.start}${(line()(top) ?? '').replace('M', 'L')}${(line()(bottom) ?? '').replace('M', 'L')}${head.end}Z`;
 }
 
 /** Head that the document says nothing of: a whistle's beak, a flute's cap. It carries no measure. */
-function headOutline(
-  document: DesignDocument,
-  body: DrawnBody,
-  place: Place,
-): { start: string; end: string } {
-  const [bodyFrom] = outsideSpan(document, body);
-  const half = (diameterAt(document.outside.stations, bodyFrom) * place.across) / 2;
+function headOutline(shape: BodyShape, body: DrawnBody, place: Place): { start: string; end: string } {
+  const [bodyFrom] = outsideSpan(shape, body);
+  const half = (diameterAt(shape.outside.stations, bodyFrom) * place.across) / 2;
   const left = place.x(body.headMm);
   const joint = place.x(bodyFrom);
   const y = place.axisY;
-  if (document.mouthEnd.kind !== 'window') {
+  if (shape.mouthEnd.kind !== 'window') {
     const round = Math.min(4, half / 3);
     return {
       start: `M${left} ${y + half - round}L${left} ${y - half + round}Q${left} ${y - half} ${left + round} ${y - half}`,
@@ -91,14 +87,14 @@ function headOutline(
 }
 
 /** The body cut along its axis: everything between outside and bore is wood. */
-export function sectionPath(document: DesignDocument, body: DrawnBody, place: Place): string {
-  const fromMm = document.mouthEnd.kind === 'reed' ? outsideSpan(document, body)[0] : body.headMm;
-  return polygon(tube(document.outside.stations, [fromMm, body.footMm], place));
+export function sectionPath(shape: BodyShape, body: DrawnBody, place: Place): string {
+  const fromMm = shape.mouthEnd.kind === 'reed' ? outsideSpan(shape, body)[0] : body.headMm;
+  return polygon(tube(shape.outside.stations, [fromMm, body.footMm], place));
 }
 
-export function borePath(document: DesignDocument, place: Place): string {
-  const { mouthMm, footMm } = boreEnds(document);
-  return polygon(tube(document.bore.stations, [mouthMm, footMm], place));
+export function borePath(shape: BodyShape, place: Place): string {
+  const { mouthMm, footMm } = boreEnds(shape);
+  return polygon(tube(shape.bore.stations, [mouthMm, footMm], place));
 }
 
 /** Holes in the half of the tube that faces away are drawn in the lower wall. */
@@ -114,12 +110,12 @@ export interface ChimneyPaths {
 }
 
 /** A hole cut through the wall, with its undercut, in the section. */
-export function chimneyPaths(document: DesignDocument, hole: ToneHole, place: Place): ChimneyPaths {
+export function chimneyPaths(shape: BodyShape, hole: ToneHole, place: Place): ChimneyPaths {
   const sign = facesUp(hole) ? -1 : 1;
   const radius = (stations: readonly Station[]) => (diameterAt(stations, hole.positionMm) * place.across) / 2;
-  const boreY = place.axisY + sign * radius(document.bore.stations);
-  const wallY = place.axisY + sign * radius(document.outside.stations);
-  const topY = boreY + sign * chimneyMm(document, hole) * place.across;
+  const boreY = place.axisY + sign * radius(shape.bore.stations);
+  const wallY = place.axisY + sign * radius(shape.outside.stations);
+  const topY = boreY + sign * chimneyMm(shape, hole) * place.across;
   const proud = (topY - wallY) * sign > 0.5;
   const outerY = proud ? topY : wallY;
   const half = hole.diameterMm / 2;
@@ -161,9 +157,9 @@ export interface PlanHole {
 }
 
 /** A hole as seen from above, turned round the tube by its angle. */
-export function planHole(document: DesignDocument, hole: ToneHole, place: Place): PlanHole {
+export function planHole(shape: BodyShape, hole: ToneHole, place: Place): PlanHole {
   const turn = (hole.angleDeg * Math.PI) / 180;
-  const outer = (diameterAt(document.outside.stations, hole.positionMm) * place.across) / 2;
+  const outer = (diameterAt(shape.outside.stations, hole.positionMm) * place.across) / 2;
   const rx = (place.x(hole.positionMm + hole.diameterMm) - place.x(hole.positionMm)) / 2;
   const ry = (hole.diameterMm * place.across) / 2;
   return {

@@ -1,6 +1,9 @@
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { boreEnds } from '#shared/document/profile.ts';
 
+/** The parts of a document that make the body; holes are drawn upon it. */
+export type BodyShape = Pick<DesignDocument, 'bore' | 'outside' | 'mouthEnd' | 'foot'>;
+
 /** How far the drawing reaches, mm from the mouth end's reference point. */
 export interface DrawnBody {
   headMm: number;
@@ -20,7 +23,7 @@ const HEAD_IN_DIAMETERS: Record<DesignDocument['mouthEnd']['kind'], number> = {
 };
 
 /** What of an instrument is drawn: outside and bore, and the head (beak, cap, reed) that the bore leaves out. */
-export function drawnBody(document: DesignDocument): DrawnBody {
+export function drawnBody(document: Omit<BodyShape, 'foot'>): DrawnBody {
   const { mouthMm, footMm } = boreEnds(document);
   const outside = document.outside.stations;
   const outsideFrom = outside[0]?.positionMm ?? mouthMm;

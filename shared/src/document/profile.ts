@@ -21,13 +21,13 @@ export function diameterAt(stations: readonly Station[], positionMm: number): nu
   return last.diameterMm;
 }
 
-export function boreEnds(document: DesignDocument): { mouthMm: number; footMm: number } {
+export function boreEnds(document: Pick<DesignDocument, 'bore'>): { mouthMm: number; footMm: number } {
   const { stations } = document.bore;
   return { mouthMm: stations[0]?.positionMm ?? 0, footMm: stations.at(-1)?.positionMm ?? 0 };
 }
 
 /** Height of the chimney, mm: as typed, else half of outside less bore at the hole. */
-export function chimneyMm(document: DesignDocument, hole: ToneHole): number {
+export function chimneyMm(document: Pick<DesignDocument, 'bore' | 'outside'>, hole: ToneHole): number {
   if (hole.chimneyMm !== null) return hole.chimneyMm;
   return (
     (diameterAt(document.outside.stations, hole.positionMm) -
@@ -37,6 +37,6 @@ export function chimneyMm(document: DesignDocument, hole: ToneHole): number {
 }
 
 /** Bench practice measures from the foot; the document stores from the mouth end. */
-export function fromFootMm(document: DesignDocument, positionMm: number): number {
+export function fromFootMm(document: Pick<DesignDocument, 'bore'>, positionMm: number): number {
   return boreEnds(document).footMm - positionMm;
 }
