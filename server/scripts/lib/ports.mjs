@@ -1,4 +1,5 @@
 import { createServer } from 'node:net';
+import { Refusal } from './refusal.mjs';
 
 function listenOnce(port, host) {
   return new Promise((resolve, reject) => {
@@ -17,6 +18,7 @@ export async function isPortFree(port, host = '127.0.0.1') {
     return true;
   } catch (error) {
     if (error.code === 'EADDRINUSE') return false;
+    if (error.code === 'EACCES') throw new Refusal(`Port ${port} may be opened by root only: choose one above 1023.`);
     throw error;
   }
 }

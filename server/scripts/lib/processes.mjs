@@ -71,11 +71,14 @@ export function commandLineOf(pid) {
   }
 }
 
-/** Tells a process from a later one that got the same number: the moment it began, or null when there is none. */
-export function beginningOf(pid) {
+/** Name, parent and moment of beginning of a process, or null when there is none (any more). */
+export function statOf(pid) {
   try {
-    // The program's name stands in parentheses and may hold spaces; the 22nd field is the 20th after it.
-    return readFileSync(`/proc/${pid}/stat`, 'utf8').split(') ').pop().split(' ')[19];
+    const written = readFileSync(`/proc/${pid}/stat`, 'utf8');
+    // The name stands in parentheses and may itself hold spaces and parentheses.
+    const name = written.slice(written.indexOf('(') + 1, written.lastIndexOf(')'));
+    const fields = written.slice(written.lastIndexOf(')') + 2).split(' ');
+    return { name, parent: Number(fields[1]), beginning: fields[19] };
   } catch {
     return null;
   }

@@ -1,4 +1,4 @@
-import { endRunningCommands } from './processes.mjs';
+import { endRunningCommands, statOf } from './processes.mjs';
 
 /**
  * What has to be stopped, last started first stopped; once, whoever asks.
@@ -30,12 +30,20 @@ export function orderlyShutdown({ signalCode = 0 } = {}) {
   };
 }
 
-/** An npm that is killed outright passes nothing on; we notice by our parent changing. */
+/** The npm that runs us: our parent, or with a shell in between our parent's parent. */
+function npmAbove() {
+  if (!process.env.npm_lifecycle_event) return null;
+  const isNpm = (pid) => statOf(pid)?.name.startsWith('npm');
+  return [process.ppid, statOf(process.ppid)?.parent].find(isNpm) ?? null;
+}
+
+/** An npm that is killed outright passes nothing on; we have to notice by ourselves. */
 function watchNpm(onGone) {
-  if (!process.env.npm_lifecycle_event) return;
-  const parent = process.ppid;
+  const npm = npmAbove();
+  if (npm === null) return;
+  const { beginning } = statOf(npm);
   const timer = setInterval(() => {
-    if (process.ppid === parent) return;
+    if (statOf(npm)?.beginning === beginning) return;
     clearInterval(timer);
     onGone();
   }, 1000);

@@ -1,6 +1,6 @@
 import { closeSync, existsSync, mkdirSync, openSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { VAR, inVar } from './paths.mjs';
-import { beginningOf } from './processes.mjs';
+import { statOf } from './processes.mjs';
 import { Refusal } from './refusal.mjs';
 
 const LOCK = inVar('running.json');
@@ -14,8 +14,8 @@ function readRunning() {
   }
 }
 
-/** A crashed run leaves its note behind; its number may by now belong to another program. */
-const isRunning = ({ pid, beginning }) => beginning !== null && beginningOf(pid) === beginning;
+/** A crashed run leaves its note behind; by now its number may belong to another program, begun at another moment. */
+const isRunning = ({ pid, beginning }) => statOf(pid)?.beginning === beginning;
 
 /**
  * Lets one launcher at a time run in this clone, since two would share one database folder.
@@ -32,7 +32,7 @@ export function takeTheOnlyPlace(port) {
   }
   if (existsSync(LOCK)) rmSync(LOCK);
   const file = openSync(LOCK, 'wx');
-  writeFileSync(file, JSON.stringify({ pid: process.pid, beginning: beginningOf(process.pid), port }));
+  writeFileSync(file, JSON.stringify({ pid: process.pid, beginning: statOf(process.pid)?.beginning, port }));
   closeSync(file);
   return () => rmSync(LOCK, { force: true });
 }
