@@ -18,7 +18,8 @@ export async function isPortFree(port, host = '127.0.0.1') {
     return true;
   } catch (error) {
     if (error.code === 'EADDRINUSE') return false;
-    if (error.code === 'EACCES') throw new Refusal(`Port ${port} may be opened by root only: choose one above 1023.`);
+    if (error.code === 'EACCES')
+      throw new Refusal(`Port ${port} may be opened by root only: choose one above 1023.`);
     throw error;
   }
 }
