@@ -1,5 +1,6 @@
 import { spawn } from 'node:child_process';
 import { once } from 'node:events';
+import { demoSignIns } from './lib/demo-sign-ins.mjs';
 import { guardChildren } from './lib/guard.mjs';
 import { prepareHome } from './lib/home.mjs';
 import { inRoot } from './lib/paths.mjs';
@@ -37,6 +38,7 @@ await runLauncher(async () => {
     const server = await startServer(shutdown, { port: apiPort, environment, watch: true });
     if (server.status === 'ended') return await shutdown.leave(server.code);
     const pages = await startPages(port, apiPort);
+    process.stdout.write(`The pages are at http://127.0.0.1:${port}\n${demoSignIns(process.env)}`);
     const [code] = await Promise.race([server.ended, pages.ended]);
     if (!shutdown.isStopping()) await shutdown.leave(code ?? 1);
   } finally {

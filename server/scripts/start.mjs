@@ -1,4 +1,5 @@
 import { ensureClientBuilt } from './lib/client-build.mjs';
+import { demoSignIns } from './lib/demo-sign-ins.mjs';
 import { prepareHome } from './lib/home.mjs';
 import { runLauncher } from './lib/refusal.mjs';
 import { startServer } from './lib/server-process.mjs';
@@ -10,10 +11,9 @@ await runLauncher(async () => {
   try {
     const { port, environment } = await prepareHome(shutdown, 'npm start');
     const pages = { STATIC_DIR: await ensureClientBuilt() };
-    const quiet = { BOREWRIGHT_LOG_LEVEL: process.env.BOREWRIGHT_LOG_LEVEL ?? 'warn' };
-    const server = await startServer(shutdown, { port, environment: { ...environment, ...pages, ...quiet } });
+    const server = await startServer(shutdown, { port, environment: { ...environment, ...pages } });
     if (server.status === 'ended') return await shutdown.leave(server.code);
-    process.stdout.write(`Borewright is at http://127.0.0.1:${port} (Ctrl-C stops it)\n`);
+    process.stdout.write(`${demoSignIns(process.env)}Ctrl-C stops Borewright; what you made is kept.\n`);
     const [code] = await server.ended;
     if (!shutdown.isStopping()) await shutdown.leave(code ?? 1);
   } finally {

@@ -4,7 +4,7 @@ import { ensurePackages } from './packages.mjs';
 import { inVar } from './paths.mjs';
 import { isPortFree } from './ports.mjs';
 import { Refusal } from './refusal.mjs';
-import { SECRETS_FILE, readSecrets } from './secrets.mjs';
+import { readSecrets } from './secrets.mjs';
 import { endLeftoverServer } from './server-process.mjs';
 import { takeTheOnlyPlace } from './single-run.mjs';
 
@@ -37,7 +37,7 @@ export async function prepareHome(shutdown, command) {
   return {
     port,
     environment: {
-      BOREWRIGHT_SECRETS_FILE: SECRETS_FILE,
+      SESSION_SECRET: process.env.SESSION_SECRET ?? secrets.sessionSecret,
       DATABASE_URL: await openDatabase(),
     },
   };
