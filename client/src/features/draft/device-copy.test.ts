@@ -14,9 +14,10 @@ function editedCopy(names: readonly string[], changes: Partial<DeviceCopy> = {})
   );
   return {
     history,
+    base: whistleDocument(),
     baseVersion: 7,
     savedAt: '2025-03-18T11:32:00Z',
-    unsaved: true,
+    unanswered: [],
     waitingSince: null,
     ...changes,
   };
@@ -60,7 +61,8 @@ describe('copies on the device', () => {
 
   it('that the server has already are not taken over', () => {
     const copies = new DeviceCopies(new MemoryStorage());
-    copies.write({ ...place, windowId: 'closed' }, editedCopy(['saved'], { unsaved: false }));
+    const copy = editedCopy(['saved']);
+    copies.write({ ...place, windowId: 'closed' }, { ...copy, base: copy.history.present });
     expect(copies.read(place)).toBeNull();
   });
 
@@ -75,6 +77,20 @@ describe('copies on the device', () => {
     expect(read?.history.past.length).toBeLessThan(100);
   });
 
+  it('come back saved as saved: base and present are one document', () => {
+    const copies = new DeviceCopies(new MemoryStorage());
+    const copy = editedCopy(['saved']);
+    copies.write(place, { ...copy, base: copy.history.present });
+    const read = copies.read(place);
+    expect(read?.base).toBe(read?.history.present);
+  });
+
+  it('are not kept where the browser refuses', () => {
+    const copies = new DeviceCopies(null);
+    expect(copies.write(place, editedCopy(['A']))).toBe(false);
+    expect(copies.read(place)).toBeNull();
+  });
+
   it('say so when not even the document fits', () => {
     expect(new DeviceCopies(new MemoryStorage(100)).write(place, editedCopy(['A']))).toBe(false);
   });
@@ -84,7 +100,7 @@ describe('copies on the device', () => {
     ['another format', '{"format":"something-else/1"}'],
     [
       'another shape',
-      '{"format":"borewright-device-copy/1","document":{"holes":3},"baseVersion":1,"savedAt":"","unsaved":true,"waitingSince":null,"writtenAt":1,"past":[],"future":[]}',
+      '{"format":"borewright-device-copy/1","document":{"holes":3},"baseVersion":1,"savedAt":"","baseChanges":[],"waitingSince":null,"unanswered":[],"writtenAt":1,"past":[],"future":[]}',
     ],
   ])('that are %s are left alone', (_what, text) => {
     const storage = new MemoryStorage();

@@ -10,8 +10,10 @@ export interface DeviceCopy {
   baseVersion: number;
   /** When that version was saved, as the server said. */
   savedAt: string;
-  /** False once the server has everything. */
-  unsaved: boolean;
+  /** The document of that version: what the edits started from, and what tells mine from theirs in a conflict. */
+  base: DesignDocument;
+  /** Documents sent whose answer never came. */
+  unanswered: readonly DesignDocument[];
   /** Since when edits wait for the line; null while they do not. */
   waitingSince: string | null;
 }
@@ -27,7 +29,9 @@ const writtenSchema = z.object({
   document: z.unknown(),
   baseVersion: z.int(),
   savedAt: z.string(),
-  unsaved: z.boolean(),
+  /** From the present back to the stored document; empty once the server has everything. */
+  baseChanges: z.array(changeSchema),
+  unanswered: z.array(z.array(changeSchema)),
   waitingSince: z.string().nullable(),
   writtenAt: z.number(),
   past: z.array(stepSchema),
@@ -47,7 +51,8 @@ const shelfOf = (place: CopyPlace) => `borewright.draft.${place.personId}.${plac
 const keyOf = (place: CopyPlace) => shelfOf(place) + place.windowId;
 
 export class DeviceCopies {
-  constructor(private readonly storage: Storage) {}
+  /** @param storage - null where the browser refuses to keep anything */
+  constructor(private readonly storage: Storage | null) {}
 
   /**
    * Writes the copy at once; when the device is full, with as much of the undo steps as fits.
@@ -55,6 +60,7 @@ export class DeviceCopies {
    * @returns false when not even the document fits, and the person has to be told
    */
   write(place: CopyPlace, copy: DeviceCopy): boolean {
+    if (this.storage === null) return false;
     for (let steps = UNDO_STEPS; ; steps = Math.floor(steps / 2)) {
       try {
         this.storage.setItem(keyOf(place), JSON.stringify(toWritten(copy, steps)));
@@ -75,23 +81,27 @@ export class DeviceCopies {
     if (own !== null) return fromWritten(own);
     const left = this.keysOf(place)
       .map((key) => ({ key, written: this.readKey(key) }))
-      .filter((entry): entry is { key: string; written: Written } => entry.written?.unsaved === true)
+      .filter(
+        (entry): entry is { key: string; written: Written } => (entry.written?.baseChanges.length ?? 0) > 0,
+      )
       .sort((a, b) => b.written.writtenAt - a.written.writtenAt)[0];
     if (left === undefined) return null;
-    this.storage.removeItem(left.key);
+    this.storage?.removeItem(left.key);
     const copy = fromWritten(left.written);
     if (copy !== null) this.write(place, copy);
     return copy;
   }
 
   private keysOf(place: CopyPlace): string[] {
-    const keys = Array.from({ length: this.storage.length }, (_, index) => this.storage.key(index));
+    const { storage } = this;
+    if (storage === null) return [];
+    const keys = Array.from({ length: storage.length }, (_, index) => storage.key(index));
     return keys.filter((key): key is string => key?.startsWith(shelfOf(place)) === true);
   }
 
   private readKey(key: string): Written | null {
-    const text = this.storage.getItem(key);
-    if (text === null) return null;
+    const text = this.storage?.getItem(key);
+    if (text === null || text === undefined) return null;
     const read = writtenSchema.safeParse(readJson(text));
     return read.success ? read.data : null;
   }
@@ -115,7 +125,8 @@ function toWritten(copy: DeviceCopy, steps: number): Written {
     document: history.present,
     baseVersion: copy.baseVersion,
     savedAt: copy.savedAt,
-    unsaved: copy.unsaved,
+    baseChanges: changesBetween(history.present, copy.base),
+    unanswered: copy.unanswered.map((sent) => changesBetween(history.present, sent)),
     waitingSince: copy.waitingSince,
     writtenAt: Date.now(),
     past: steps === 0 ? [] : chained(history.present, history.past.slice(-steps)),
@@ -142,6 +153,11 @@ function unchained(present: DesignDocument, written: Written['past']): HistorySt
     .reverse();
 }
 
+/** The same object where nothing differs, so that a saved draft is known by identity. */
+function documentBefore(present: DesignDocument, changes: Written['baseChanges']): DesignDocument {
+  return applyChanges(present, changes as PathChange[]);
+}
+
 function fromWritten(written: Written): DeviceCopy | null {
   const { document } = written;
   if (!hasShapeOfDocument(document)) return null;
@@ -154,7 +170,8 @@ function fromWritten(written: Written): DeviceCopy | null {
     },
     baseVersion: written.baseVersion,
     savedAt: written.savedAt,
-    unsaved: written.unsaved,
+    base: documentBefore(document, written.baseChanges),
+    unanswered: written.unanswered.map((changes) => documentBefore(document, changes)),
     waitingSince: written.waitingSince,
   };
 }
