@@ -8,6 +8,8 @@ export interface ApiRequest<Answer> {
   body?: unknown;
   headers?: Record<string, string>;
   signal?: AbortSignal | undefined;
+  /** The request outlives the page; browsers let this carry 64 kB at most. */
+  keepalive?: boolean;
   /** Reads the answer; the same schema that the server answers by. */
   schema: z.ZodType<Answer>;
   /**
@@ -52,10 +54,12 @@ async function send({
   body,
   headers,
   signal,
+  keepalive = false,
 }: ApiRequest<unknown>): Promise<Response> {
   try {
     return await fetch(path + searchOf(query), {
       method,
+      keepalive,
       headers: {
         Accept: 'application/json',
         ...(body === undefined ? {} : { 'Content-Type': 'application/json' }),
