@@ -26,7 +26,12 @@ export default defineConfig({
         test: {
           name: 'unit',
           root: here('.'),
-          include: ['shared/src/**/*.test.ts', 'server/src/**/*.test.ts', 'client/src/**/*.test.{ts,tsx}'],
+          include: [
+            'shared/src/**/*.test.ts',
+            'server/src/**/*.test.ts',
+            'server/scripts/**/*.test.mjs',
+            'client/src/**/*.test.{ts,tsx}',
+          ],
           sequence: { groupOrder: 0 },
         },
       },
