@@ -19,14 +19,14 @@ const SMOOTH_PART = [
   [-0.39348, -0.37229, -0.39114, -0.41784, -0.4379, -0.44977, -0.45369],
 ] as const;
 
-/** Order round the bore, strength and decay of the six slowest evanescent modes; coupling_angle.json, `fit`. */
+/** Order round the bore, strength and decay of the six slowest evanescent modes; zeros of J'n, see inner_coupling_30_60.json. */
 const MODES = [
-  [1, 0.77, 1.841],
-  [2, 0.573, 3.054],
-  [0, 0.131, 3.832],
-  [3, 0.486, 4.201],
-  [4, 0.433, 5.318],
-  [1, 0.194, 5.331],
+  [1, 0.7703, 1.8412],
+  [2, 0.573, 3.0542],
+  [0, 0.1305, 3.8317],
+  [3, 0.4857, 4.2012],
+  [4, 0.4326, 5.3176],
+  [1, 0.1942, 5.3314],
 ] as const;
 
 /** Mean hole over bore up to which holes couple as points do, and what is lost per ratio beyond; coupling_angle.json. */
@@ -50,7 +50,7 @@ const WIDEST_RATIO = 0.75;
 export function innerCoupling(distance: number, angle: number, holeRatio = POINT_LIKE_RATIO): number {
   const ze = Math.abs(distance);
   const between = Math.acos(Math.cos(angle));
-  const opposite = -(0.77 * Math.exp(-1.841 * ze)) / (1 + 0.892 * Math.exp(-1.31 * ze));
+  const opposite = -(0.7703 * Math.exp(-1.8412 * ze)) / (1 + 0.892 * Math.exp(-1.31 * ze));
   const nearOpposite = Math.max(0, between / ANGLE_STEP - 5);
   const mended = nearOpposite * (opposite - pointCoupling(ze, Math.PI));
   const wide = Math.min(Math.max(holeRatio, POINT_LIKE_RATIO), WIDEST_RATIO) - POINT_LIKE_RATIO;
