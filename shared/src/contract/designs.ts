@@ -12,6 +12,8 @@ const outlineSchema = z.object({
   ),
 });
 
+export const DESIGN_STATES = ['draft', 'in-review', 'approved', 'superseded', 'withdrawn'] as const;
+
 const furthestSchema = z.object({ note: z.string(), cents: z.number() }).nullable();
 
 export const designSummarySchema = z.object({
@@ -23,7 +25,7 @@ export const designSummarySchema = z.object({
   a4Hz: z.number(),
   draftVersion: z.int(),
   revisionNumber: z.int(),
-  state: z.enum(['draft', 'in-review', 'approved', 'superseded', 'withdrawn']),
+  state: z.enum(DESIGN_STATES),
   archived: z.boolean(),
   outline: outlineSchema,
   /** Predicted cents of the register-1 notes by the hole they vent at (null: foot), for the small plumb lines. */
@@ -34,6 +36,9 @@ export const designSummarySchema = z.object({
   changedBy: z.object({ id: z.int(), name: z.string() }),
   changedAt: z.string(),
 });
+
+/** `:id` of every route under /api/designs. */
+export const designIdParams = z.object({ id: z.coerce.number().int().min(1).max(2_147_483_647) });
 
 export const DESIGN_SORTS = ['name', 'changed', 'kind', 'lowest-note'] as const;
 
@@ -95,6 +100,7 @@ export const sheetQuery = z.strictObject({
   unit: z.enum(['mm', 'inch']).optional(),
 });
 
+export type DesignState = (typeof DESIGN_STATES)[number];
 export type DesignSummary = z.infer<typeof designSummarySchema>;
 export type DesignList = z.infer<typeof designListSchema>;
 export type Draft = z.infer<typeof draftSchema>;

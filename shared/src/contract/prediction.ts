@@ -50,7 +50,8 @@ export const storedPredictionSchema = z.object({
   documentHash: z.string(),
   computedAt: z.string(),
   prediction: designPredictionSchema,
-  sensitivities: designSensitivitiesSchema,
+  /** null until a prediction was asked for: a save stores the prediction alone. */
+  sensitivities: designSensitivitiesSchema.nullable(),
 });
 
 export type StoredPrediction = z.infer<typeof storedPredictionSchema>;

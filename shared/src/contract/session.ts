@@ -51,13 +51,18 @@ export const sessionSchema = z.object({
   expiresAt: z.string(),
 });
 
+const band = z
+  .number()
+  .min(0.5, 'Give a band of 0.5 cents or more.')
+  .max(50, 'Give a band of 50 cents or less.');
+
 /** PATCH /api/workshop, owners only. */
 export const updateWorkshopRequest = z.strictObject({
   name: z.string().trim().min(1).max(100).optional(),
   unit: z.enum(['mm', 'inch']).optional(),
   a4Hz: z.number().min(300).max(600).optional(),
   temperatureC: z.number().min(0).max(40).optional(),
-  bandCents: z.array(z.number().min(0.5).max(50)).length(3).optional(),
+  bandCents: z.array(band).length(3).optional(),
   referenceEnd: z.enum(['foot', 'mouth']).optional(),
 });
 
