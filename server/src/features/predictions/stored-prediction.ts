@@ -1,0 +1,50 @@
+import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/prediction.ts';
+import type { StoredPrediction } from '#shared/contract/prediction.ts';
+import type { WorkshopScope } from '../../db/workshop-scope.ts';
+import { notFound } from '../../http/http-error.ts';
+import type { PredictionRow } from '../../models/prediction.ts';
+import { documentHash } from '../../predicting/document-hash.ts';
+import { predictDocument, sensitivitiesOf } from '../../predicting/predict-document.ts';
+import { storedDocument } from '../../predicting/stored-document.ts';
+
+export async function readPrediction(scope: WorkshopScope, designId: number): Promise<StoredPrediction> {
+  const row = await scope.predictions.findOne({
+    where: { designId },
+    include: [{ association: 'design', attributes: [], required: true, where: scope.visibleDesigns() }],
+  });
+  if (row === null) throw notFound();
+  return presentPrediction(row);
+}
+
+/** Predicts what is stored, never what a client sends: the answer belongs to a version of the draft. */
+export async function predictStoredDraft(scope: WorkshopScope, designId: number): Promise<StoredPrediction> {
+  await scope.visibleDesign(designId);
+  await scope.inTransaction(async (within) => {
+    // Locked, so that a save in the same moment cannot be given the older draft's prediction.
+    const draft = await within.drafts.findOne({ where: { designId }, lock: true });
+    if (draft === null) throw notFound();
+    const document = storedDocument(draft.document);
+    const prediction = predictDocument(document);
+    await within.predictions.put({
+      designId,
+      draftVersion: draft.version,
+      engine: prediction.engine,
+      documentHash: documentHash(document),
+      prediction: JSON.stringify(prediction),
+      sensitivities: JSON.stringify(sensitivitiesOf(document)),
+      computedAt: new Date(),
+    });
+  });
+  return readPrediction(scope, designId);
+}
+
+function presentPrediction(row: PredictionRow): StoredPrediction {
+  return {
+    draftVersion: row.draftVersion,
+    documentHash: row.documentHash,
+    computedAt: row.computedAt.toISOString(),
+    // Both were written by this server from the engine's own results.
+    prediction: JSON.parse(row.prediction) as DesignPrediction,
+    sensitivities: row.sensitivities === null ? null : (JSON.parse(row.sensitivities) as DesignSensitivities),
+  };
+}

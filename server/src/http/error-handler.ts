@@ -1,0 +1,48 @@
+import { DatabaseError, ConnectionError } from 'sequelize';
+import type { ErrorRequestHandler } from 'express';
+import type { Logger } from 'pino';
+import { HttpError, badRequest } from './http-error.ts';
+import { cutOffUnread } from './json-body.ts';
+import { sendProblem } from './problem.ts';
+import { requestIdOf } from './request-id.ts';
+
+/** The one exit of everything that is thrown. */
+export function errorHandler(log: Logger): ErrorRequestHandler {
+  return (error: unknown, req, res, next) => {
+    const requestId = requestIdOf(res);
+    const answer = meaning(error);
+    if (answer.status >= 500)
+      log.error({ err: error, requestId, method: req.method, url: req.path }, 'failed');
+    if (res.headersSent) {
+      // A stream broke midway: an ended connection is the only way left to say so.
+      next(error);
+      return;
+    }
+    sendProblem(res, answer, requestId);
+    cutOffUnread(req);
+  };
+}
+
+function meaning(error: unknown): HttpError {
+  if (error instanceof HttpError) return error;
+  // A path such as /api/designs/%E0%A4%A that Express cannot decode.
+  if (error instanceof URIError) return badRequest('This address cannot be read.');
+  if (error instanceof ConnectionError || isLockTimeout(error)) return noDatabase();
+  return new HttpError(500, 'internal', 'Something broke here', {
+    detail:
+      'The workshop could not do this. Nothing was changed. Try again; if it stays, report the request id.',
+  });
+}
+
+function isLockTimeout(error: unknown): boolean {
+  if (!(error instanceof DatabaseError)) return false;
+  const { parent } = error;
+  return 'code' in parent && (parent.code === 'ER_LOCK_DEADLOCK' || parent.code === 'ER_LOCK_WAIT_TIMEOUT');
+}
+
+function noDatabase(): HttpError {
+  return new HttpError(503, 'no-database', 'The database does not answer', {
+    detail: 'The workshop cannot reach its records just now. Nothing was changed. Try again in a minute.',
+    headers: { 'Retry-After': '10' },
+  });
+}
