@@ -1,0 +1,33 @@
+import { chromium } from 'playwright-core';
+import { CHROMIUM_FLAGS } from '../support/chromium-flags.ts';
+import { startApp } from '../support/start-app.ts';
+import { measureFirstLoad } from './first-load-bench.ts';
+import { measureReads } from './http-bench.ts';
+import { measureSheet } from './sheet-bench.ts';
+import type { Figure } from './figure.ts';
+
+/** What `npm run bench` hands over. */
+function setting(name: string): string {
+  const value = process.env[name];
+  if (value === undefined) throw new Error(`${name} is not set: run npm run bench.`);
+  return value;
+}
+
+async function measureInBrowser(databaseUrl: string): Promise<Record<string, Figure>> {
+  const app = await startApp({ databaseUrl, clientFolder: setting('BENCH_CLIENT') });
+  const browser = await chromium.launch({ executablePath: setting('BENCH_CHROMIUM'), args: CHROMIUM_FLAGS });
+  try {
+    return { firstLoad: await measureFirstLoad(browser, app.address) };
+  } finally {
+    await browser.close();
+    await app.stop();
+  }
+}
+
+const databaseUrl = setting('TEST_DATABASE_URL');
+const figures = {
+  sheet: await measureSheet(),
+  ...(await measureReads(databaseUrl)),
+  ...(await measureInBrowser(databaseUrl)),
+};
+process.stdout.write(`${JSON.stringify(figures, null, 2)}\n`);
