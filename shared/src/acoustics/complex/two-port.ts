@@ -1,0 +1,132 @@
+import { cell, type Cells } from './cells.ts';
+/**
+ * Cells that one two-port takes: the real and imaginary parts of A, B, C and D in
+ * [p₁; U₁] = [[A, B], [C, D]] [p₂; U₂], side 1 nearer the mouth, U positive towards the foot.
+ */
+export const TWO_PORT_CELLS = 8;
+
+/**
+ * Writes the two-port that changes nothing.
+ *
+ * @param cells - where the two-ports lie
+ * @param at - address to write to
+ * @returns nothing; the result is in the cells
+ */
+export function writeIdentity(cells: Cells, at: number): void {
+  cells.fill(0, at, at + TWO_PORT_CELLS);
+  cells[at] = 1;
+  cells[at + 6] = 1;
+}
+
+/**
+ * Copies a two-port.
+ *
+ * @param cells - where the two-ports lie
+ * @param from - address to read from
+ * @param to - address to write to
+ * @returns nothing; the result is in the cells
+ */
+export function copyTwoPort(cells: Cells, from: number, to: number): void {
+  for (let i = 0; i < TWO_PORT_CELLS; i += 1) cells[to + i] = cell(cells, from + i);
+}
+
+/**
+ * Puts a two-port behind another one (on its foot side): left ← left · right.
+ *
+ * @param cells - where the two-ports lie
+ * @param left - address of the first two-port, replaced by the product
+ * @param right - address of the second two-port
+ * @returns nothing; the result is in the cells
+ */
+export function appendTwoPort(cells: Cells, left: number, right: number): void {
+  const er = cell(cells, right);
+  const ei = cell(cells, right + 1);
+  const fr = cell(cells, right + 2);
+  const fi = cell(cells, right + 3);
+  const gr = cell(cells, right + 4);
+  const gi = cell(cells, right + 5);
+  const hr = cell(cells, right + 6);
+  const hi = cell(cells, right + 7);
+  for (let row = left; row < left + TWO_PORT_CELLS; row += 4) {
+    const ar = cell(cells, row);
+    const ai = cell(cells, row + 1);
+    const br = cell(cells, row + 2);
+    const bi = cell(cells, row + 3);
+    cells[row] = ar * er - ai * ei + br * gr - bi * gi;
+    cells[row + 1] = ar * ei + ai * er + br * gi + bi * gr;
+    cells[row + 2] = ar * fr - ai * fi + br * hr - bi * hi;
+    cells[row + 3] = ar * fi + ai * fr + br * hi + bi * hr;
+  }
+}
+
+/**
+ * Puts a series impedance behind a two-port: all flow passes through it.
+ *
+ * @param cells - where the two-ports lie
+ * @param at - address of the two-port, replaced
+ * @param re - real part of the impedance, Pa·s/m³
+ * @param im - imaginary part
+ * @returns nothing; the result is in the cells
+ */
+export function appendSeries(cells: Cells, at: number, re: number, im: number): void {
+  for (let row = at; row < at + TWO_PORT_CELLS; row += 4) {
+    const ar = cell(cells, row);
+    const ai = cell(cells, row + 1);
+    cells[row + 2] = cell(cells, row + 2) + ar * re - ai * im;
+    cells[row + 3] = cell(cells, row + 3) + ar * im + ai * re;
+  }
+}
+
+/**
+ * Puts a shunt admittance behind a two-port: flow that leaves through the wall.
+ *
+ * @param cells - where the two-ports lie
+ * @param at - address of the two-port, replaced
+ * @param re - real part of the admittance, m³/(Pa·s)
+ * @param im - imaginary part
+ * @returns nothing; the result is in the cells
+ */
+export function appendShunt(cells: Cells, at: number, re: number, im: number): void {
+  for (let row = at; row < at + TWO_PORT_CELLS; row += 4) {
+    const br = cell(cells, row + 2);
+    const bi = cell(cells, row + 3);
+    cells[row] = cell(cells, row) + br * re - bi * im;
+    cells[row + 1] = cell(cells, row + 1) + br * im + bi * re;
+  }
+}
+
+/**
+ * Turns a two-port round, so that its foot side faces the mouth: A and D change places.
+ *
+ * @param cells - where the two-ports lie
+ * @param at - address of the two-port, replaced
+ * @returns nothing; the result is in the cells
+ */
+export function reverseTwoPort(cells: Cells, at: number): void {
+  const re = cell(cells, at);
+  const im = cell(cells, at + 1);
+  cells[at] = cell(cells, at + 6);
+  cells[at + 1] = cell(cells, at + 7);
+  cells[at + 6] = re;
+  cells[at + 7] = im;
+}
+
+/**
+ * Impedance seen through a two-port that an impedance ends: (A·Z + B)/(C·Z + D).
+ *
+ * @param cells - where the two-port and the load lie
+ * @param at - address of the two-port
+ * @param load - address of the load's real and imaginary part, Pa·s/m³; replaced by what is seen
+ * @returns nothing; the result is in the cells
+ */
+export function seeThrough(cells: Cells, at: number, load: number): void {
+  const zr = cell(cells, load);
+  const zi = cell(cells, load + 1);
+  const nr = cell(cells, at) * zr - cell(cells, at + 1) * zi + cell(cells, at + 2);
+  const ni = cell(cells, at) * zi + cell(cells, at + 1) * zr + cell(cells, at + 3);
+  const dr = cell(cells, at + 4) * zr - cell(cells, at + 5) * zi + cell(cells, at + 6);
+  const di = cell(cells, at + 4) * zi + cell(cells, at + 5) * zr + cell(cells, at + 7);
+  const scale = 1 / (dr * dr + di * di);
+  cells[load] = (nr * dr + ni * di) * scale;
+  cells[load + 1] = (ni * dr - nr * di) * scale;
+}

@@ -1,0 +1,153 @@
+import { cell, type Cells } from '../complex/cells.ts';
+import { innerCoupling } from '../radiation/inner-coupling.ts';
+import {
+  footDistance,
+  footMutualRadiation,
+  mutualRadiation,
+  openingPair,
+  type OpeningPair,
+} from '../radiation/mutual-radiation.ts';
+import type { BorePlan } from './bore-plan.ts';
+import type { Column } from './column.ts';
+import type { MouthOpening } from './mouth-branch.ts';
+
+/** Openings further apart than this, in bore radii, share no field inside the bore (1e-5 of what they do when close). */
+const INNER_REACH = 6;
+
+/** One opening in the body: a hole, the foot or the mouth's. */
+interface Opening {
+  position: number;
+  angle: number;
+  boreRadius: number;
+  outerRadius: number;
+  kind: 'side' | 'end';
+  /** Radius of a tone hole at the bore, m; null for foot and mouth. */
+  holeRadius: number | null;
+}
+
+/** Two openings that hear each other. */
+export interface CoupledPair {
+  first: number;
+  second: number;
+  /** For two openings in the body's side. */
+  sides: OpeningPair | null;
+  /** Where one is an end: the distance through free air, m. */
+  distance: number;
+  /** Inside the bore: mass over ρ, 1/m; 0 where too far apart. */
+  inner: number;
+}
+
+/** All pairs, and where their impedances lie: a square of complex numbers, row and column by opening. */
+export interface Coupling {
+  /** Holes first, mouth side to foot, then the foot, then the mouth. */
+  openings: number;
+  pairs: CoupledPair[];
+  /** Address of the square of mutual impedances through the air outside. */
+  outer: number;
+  /** Address of the square of mutual reactances inside the bore, one number each. */
+  inner: number;
+}
+
+/**
+ * Lays out how the openings of a column couple, outside and inside.
+ *
+ * @param plan - the column's cells
+ * @param column - the column
+ * @param mouth - the mouth end's opening
+ * @returns the pairs
+ */
+export function planCoupling(plan: BorePlan, column: Column, mouth: MouthOpening | null): Coupling {
+  const openings = openingsOf(column, mouth);
+  const count = openings.length;
+  const pairs: CoupledPair[] = [];
+  openings.forEach((first, i) => {
+    openings.slice(i + 1).forEach((second, offset) => {
+      if (first !== null && second !== null)
+        pairs.push({ first: i, second: i + 1 + offset, ...couple(first, second) });
+    });
+  });
+  return { openings: count, pairs, outer: plan.take(2 * count * count), inner: plan.take(count * count) };
+}
+
+function openingsOf(column: Column, mouth: MouthOpening | null): (Opening | null)[] {
+  const foot = column.bore.at(-1);
+  const holes: (Opening | null)[] = column.holes.map((hole) => ({
+    ...hole,
+    kind: 'side',
+    holeRadius: hole.flare?.innerRadius ?? hole.radius,
+  }));
+  const end: Opening | null =
+    column.foot.kind === 'stopped' || foot === undefined
+      ? null
+      : {
+          position: foot.position,
+          angle: 0,
+          boreRadius: foot.radius,
+          outerRadius: column.foot.outerRadius,
+          kind: 'end',
+          holeRadius: null,
+        };
+  return [...holes, end, mouth === null ? null : { ...mouth, angle: 0, holeRadius: null }];
+}
+
+function couple(first: Opening, second: Opening): Omit<CoupledPair, 'first' | 'second'> {
+  const along = Math.abs(first.position - second.position);
+  const outerRadius = (first.outerRadius + second.outerRadius) / 2;
+  const boreRadius = (first.boreRadius + second.boreRadius) / 2;
+  const angle = first.angle - second.angle;
+  const turn = Math.abs(angle - 2 * Math.PI * Math.round(angle / (2 * Math.PI)));
+  const inner = innerMass(first, second, along / boreRadius) / (Math.PI * boreRadius);
+  if (first.kind === 'side' && second.kind === 'side') {
+    return { sides: openingPair(along, turn, outerRadius), distance: 0, inner };
+  }
+  return { sides: null, distance: footDistance(along, outerRadius), inner };
+}
+
+function innerMass(first: Opening, second: Opening, distance: number): number {
+  if (first.holeRadius === null || second.holeRadius === null || distance > INNER_REACH) return 0;
+  const ratio = (first.holeRadius + second.holeRadius) / (first.boreRadius + second.boreRadius);
+  return innerCoupling(distance, first.angle - second.angle, ratio);
+}
+
+/**
+ * Works the coupling out for the frequency that the airs are set to.
+ *
+ * @param cells - the column's
+ * @param coupling - the pairs
+ * @param outside - address of the air outside
+ * @param wanted - whether an opening takes part, by its place; others are left as they are
+ * @returns nothing; the result is in the cells
+ */
+export function tuneCoupling(cells: Cells, coupling: Coupling, outside: number, wanted: Uint8Array): void {
+  for (const pair of coupling.pairs) {
+    if (wanted[pair.first] === 1 && wanted[pair.second] === 1) tunePair(cells, coupling, outside, pair);
+  }
+}
+
+/**
+ * Works one pair out.
+ *
+ * @param cells - the column's
+ * @param coupling - the pairs
+ * @param outside - address of the air outside
+ * @param pair - the pair
+ * @returns nothing; the result is in the cells
+ */
+export function tunePair(cells: Cells, coupling: Coupling, outside: number, pair: CoupledPair): void {
+  const k = cell(cells, outside);
+  const reactance = k * cell(cells, outside + 1);
+  const { openings, outer, inner } = coupling;
+  const at = outer + 2 * (pair.first * openings + pair.second);
+  const mirror = outer + 2 * (pair.second * openings + pair.first);
+  if (pair.sides === null) footMutualRadiation(k, pair.distance, cells, at);
+  else mutualRadiation(k, pair.sides, cells, at);
+  const scale = reactance / (4 * Math.PI);
+  const re = -scale * cell(cells, at + 1);
+  cells[at + 1] = scale * cell(cells, at);
+  cells[at] = re;
+  cells[mirror] = re;
+  cells[mirror + 1] = cell(cells, at + 1);
+  const within = reactance * pair.inner;
+  cells[inner + pair.first * openings + pair.second] = within;
+  cells[inner + pair.second * openings + pair.first] = within;
+}

@@ -1,0 +1,237 @@
+import { cell, type Cells } from '../complex/cells.ts';
+import {
+  TWO_PORT_CELLS,
+  appendSeries,
+  appendShunt,
+  appendTwoPort,
+  copyTwoPort,
+  writeIdentity,
+} from '../complex/two-port.ts';
+import { solveComplex } from '../numerics/linear-solve.ts';
+import type { HoleBranch } from './hole-branch.ts';
+import { outflowAt } from './opening-system.ts';
+import type { FingeringBranches, PreparedColumn } from './prepared-column.ts';
+
+const quotient = new Float64Array(2);
+
+/**
+ * Input impedance at the mouth end's outlet, all openings coupled through the air outside and inside the bore.
+ *
+ * The column must be set to a frequency with coupling. Holds while holes are small against the wavelength.
+ *
+ * @param prepared - the column, set to a frequency
+ * @param fingering - its branches
+ * @returns address of the impedance in the column's cells, Pa·s/m³
+ * @source A. Lefebvre, G. P. Scavone and J. Kergomard, Acta Acustica united with Acustica 99 (2013) 975
+ */
+export function coupledImpedance(prepared: PreparedColumn, fingering: FingeringBranches): number {
+  const { cells, system } = prepared;
+  gatherNodes(prepared, fingering);
+  if (system.nodes === 0) {
+    divide(cells, system.between, system.between + 4);
+    cells[system.impedance] = cell(quotient, 0);
+    cells[system.impedance + 1] = cell(quotient, 1);
+    return system.impedance;
+  }
+  writeLadder(prepared);
+  writeOpenings(prepared);
+  writeInnerCoupling(prepared);
+  writeEquations(prepared);
+  solveComplex(cells, system.matrix, system.nodes);
+  finishImpedance(prepared);
+  return system.impedance;
+}
+
+// quotient ← one complex cell over another.
+function divide(cells: Cells, numerator: number, denominator: number): void {
+  const nr = cell(cells, numerator);
+  const ni = cell(cells, numerator + 1);
+  const dr = cell(cells, denominator);
+  const di = cell(cells, denominator + 1);
+  const scale = 1 / (dr * dr + di * di);
+  quotient[0] = (nr * dr + ni * di) * scale;
+  quotient[1] = (ni * dr - nr * di) * scale;
+}
+
+// Two-ports from the mouth's outlet to the first open hole, on to the next, … to the foot.
+function gatherNodes(prepared: PreparedColumn, fingering: FingeringBranches): void {
+  const { cells, segments, branches, system } = prepared;
+  let at = system.between;
+  let nodes = 0;
+  copyTwoPort(cells, prepared.mouth.twoPort, at);
+  for (let h = 0; h < fingering.length; h += 1) {
+    appendTwoPort(cells, at, segments[h]?.twoPort ?? 0);
+    const place = fingering[h] ?? 0;
+    const branch = branches[place];
+    if (branch === undefined) continue;
+    appendHalfSeries(cells, at, branch, branch.before);
+    if (branch.closed) {
+      appendShunt(cells, at, cell(cells, branch.shunt), cell(cells, branch.shunt + 1));
+    } else {
+      system.branch[nodes] = place;
+      system.opening[nodes] = h;
+      nodes += 1;
+      at = system.between + nodes * TWO_PORT_CELLS;
+      writeIdentity(cells, at);
+    }
+    appendHalfSeries(cells, at, branch, branch.after);
+  }
+  appendTwoPort(cells, at, segments[fingering.length]?.twoPort ?? 0);
+  if (prepared.foot.kind !== 'stopped') {
+    system.branch[nodes] = -1;
+    system.opening[nodes] = fingering.length;
+    nodes += 1;
+  }
+  system.nodes = nodes;
+}
+
+function appendHalfSeries(cells: Cells, at: number, branch: HoleBranch, shifted: number): void {
+  if (branch.shift === 0) appendSeries(cells, at, 0, cell(cells, branch.series));
+  else appendTwoPort(cells, at, shifted);
+}
+
+// Admittances of the bore at the nodes, the mouth driven by unit flow.
+function writeLadder({ cells, system, foot }: PreparedColumn): void {
+  const { nodes, between, diagonal, beside } = system;
+  divide(cells, between + 4, between + 6);
+  cells[diagonal] = cell(quotient, 0);
+  cells[diagonal + 1] = cell(quotient, 1);
+  for (let i = 1; i < nodes; i += 1) {
+    const at = between + i * TWO_PORT_CELLS;
+    divide(cells, at + 6, at + 2);
+    addQuotient(cells, diagonal + 2 * i - 2);
+    divide(cells, at, at + 2);
+    cells[diagonal + 2 * i] = cell(quotient, 0);
+    cells[diagonal + 2 * i + 1] = cell(quotient, 1);
+    reciprocal(cells, at + 2);
+    cells[beside + 2 * i] = -cell(quotient, 0);
+    cells[beside + 2 * i + 1] = -cell(quotient, 1);
+  }
+  if (foot.kind !== 'stopped') return;
+  const last = between + nodes * TWO_PORT_CELLS;
+  divide(cells, last + 4, last);
+  addQuotient(cells, diagonal + 2 * nodes - 2);
+}
+
+function addQuotient(cells: Cells, at: number): void {
+  cells[at] = cell(cells, at) + cell(quotient, 0);
+  cells[at + 1] = cell(cells, at + 1) + cell(quotient, 1);
+}
+
+function reciprocal(cells: Cells, at: number): void {
+  const re = cell(cells, at);
+  const im = cell(cells, at + 1);
+  const norm = re * re + im * im;
+  quotient[0] = re / norm;
+  quotient[1] = -im / norm;
+}
+
+// Pressure and flow at the bore's side of every opening for unit flow out of every other, and into the mouth.
+function writeOpenings(prepared: PreparedColumn): void {
+  const { cells, branches, coupling, system } = prepared;
+  const { nodes, opening, pressure, flow } = system;
+  for (let i = 0; i < nodes; i += 1) {
+    const branch = branches[system.branch[i] ?? -1];
+    const inside = branch?.inside ?? prepared.footTwoPort;
+    const heard = coupling.outer + 2 * (opening[i] ?? 0) * coupling.openings;
+    const row = 2 * i * (nodes + 1);
+    for (let j = 0; j <= nodes; j += 1) {
+      const from = j === nodes ? coupling.openings - 1 : (opening[j] ?? 0);
+      passThrough(cells, inside, heard + 2 * from, pressure + row + 2 * j);
+      passThrough(cells, inside + 4, heard + 2 * from, flow + row + 2 * j);
+    }
+    const radiation = branch?.radiation ?? prepared.footRadiation;
+    addOwnRadiation(cells, inside, radiation, pressure + row + 2 * i);
+    addOwnRadiation(cells, inside + 4, radiation, flow + row + 2 * i);
+  }
+}
+
+// out ← Z · first + second: what an opening's own flow and radiation make of a row of its two-port.
+function addOwnRadiation(cells: Cells, row: number, radiation: number, out: number): void {
+  passThrough(cells, row, radiation, out);
+  cells[out] = cell(cells, out) + cell(cells, row + 2);
+  cells[out + 1] = cell(cells, out + 1) + cell(cells, row + 3);
+}
+
+// out ← one complex cell times another.
+function passThrough(cells: Cells, a: number, b: number, out: number): void {
+  const ar = cell(cells, a);
+  const ai = cell(cells, a + 1);
+  const br = cell(cells, b);
+  const bi = cell(cells, b + 1);
+  cells[out] = ar * br - ai * bi;
+  cells[out + 1] = ar * bi + ai * br;
+}
+
+// The evanescent field of one hole presses on the inner end of another.
+function writeInnerCoupling({ cells, coupling, system }: PreparedColumn): void {
+  const { nodes, opening, pressure, flow } = system;
+  const stride = 2 * (nodes + 1);
+  for (let i = 0; i < nodes; i += 1) {
+    const heard = coupling.inner + (opening[i] ?? 0) * coupling.openings;
+    for (let k = 0; k < nodes; k += 1) {
+      const reactance = cell(cells, heard + (opening[k] ?? 0));
+      if (reactance === 0) continue;
+      const to = pressure + i * stride;
+      const from = flow + k * stride;
+      for (let j = 0; j < stride; j += 2) {
+        cells[to + j] = cell(cells, to + j) - reactance * cell(cells, from + j + 1);
+        cells[to + j + 1] = cell(cells, to + j + 1) + reactance * cell(cells, from + j);
+      }
+    }
+  }
+}
+
+// Equations: flow out of the bore at every node, by the bore's admittances and by the opening, is nothing.
+function writeEquations(prepared: PreparedColumn): void {
+  const { cells, system } = prepared;
+  const { nodes, flow, matrix, pressure, diagonal, beside } = system;
+  const stride = 2 * (nodes + 1);
+  for (let i = 0; i < nodes; i += 1) {
+    const row = i * stride;
+    for (let j = 0; j < stride; j += 1) cells[matrix + row + j] = cell(cells, flow + row + j);
+    addScaledRow(prepared, diagonal + 2 * i, pressure + row, matrix + row);
+    if (i > 0) addScaledRow(prepared, beside + 2 * i, pressure + row - stride, matrix + row);
+    if (i < nodes - 1) addScaledRow(prepared, beside + 2 * i + 2, pressure + row + stride, matrix + row);
+  }
+  reciprocal(cells, system.between + 6);
+  addQuotient(cells, matrix + 2 * nodes);
+}
+
+// to ← to + factor · from, over a whole row.
+function addScaledRow({ cells, system }: PreparedColumn, factor: number, from: number, to: number): void {
+  const fr = cell(cells, factor);
+  const fi = cell(cells, factor + 1);
+  const stride = 2 * (system.nodes + 1);
+  for (let j = 0; j < stride; j += 2) {
+    const xr = cell(cells, from + j);
+    const xi = cell(cells, from + j + 1);
+    cells[to + j] = cell(cells, to + j) + fr * xr - fi * xi;
+    cells[to + j + 1] = cell(cells, to + j + 1) + fr * xi + fi * xr;
+  }
+}
+
+// Z = (B + p)/D of the first two-port, less what the openings do to the mouth.
+function finishImpedance({ cells, system, coupling }: PreparedColumn): void {
+  const { nodes, pressure, between, opening, impedance } = system;
+  let re = cell(cells, between + 2) - cell(cells, pressure + 2 * nodes);
+  let im = cell(cells, between + 3) - cell(cells, pressure + 2 * nodes + 1);
+  for (let j = 0; j < nodes; j += 1) {
+    passThrough(cells, pressure + 2 * j, outflowAt(system, j), impedance);
+    re += cell(cells, impedance);
+    im += cell(cells, impedance + 1);
+  }
+  cells[impedance] = re;
+  cells[impedance + 1] = im;
+  divide(cells, impedance, between + 6);
+  re = cell(quotient, 0);
+  im = cell(quotient, 1);
+  const mouth = coupling.outer + 2 * (coupling.openings - 1) * coupling.openings;
+  for (let j = 0; j < nodes; j += 1) {
+    passThrough(cells, mouth + 2 * (opening[j] ?? 0), outflowAt(system, j), impedance);
+    re -= cell(cells, impedance);
+    im -= cell(cells, impedance + 1);
+  }
+  cells[impedance] = re;
+  cells[impedance + 1] = im;
+}
