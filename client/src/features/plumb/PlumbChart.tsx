@@ -1,0 +1,171 @@
+import { useMemo } from 'react';
+import { FingeringDots } from '../../bench/FingeringDots.tsx';
+import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
+import { hungNotes, type HungNote } from '../../bench/hung-notes.ts';
+import { NoteName } from '../../bench/NoteName.tsx';
+import type { PanelProps } from '../../bench/panel-props.ts';
+import { spokenHungNote } from '../../bench/spoken-pitch.ts';
+import { FingeringRow } from './FingeringRow.tsx';
+import { HangingNote } from './HangingNote.tsx';
+import { NoticeMark } from './NoticeMark.tsx';
+import { crossRowY, plumbRows, type PlumbRows } from './plumb-rows.ts';
+import { bandOf, bobPlace } from './plumb-scale.ts';
+import { PlumbBackdrop, RowLabels, ScaleKey } from './PlumbBackdrop.tsx';
+import { PlumbTable } from './PlumbTable.tsx';
+
+interface PlumbChartProps extends PanelProps {
+  isDragging: boolean;
+  /** True while the figures belong to an earlier drawing because the present one cannot be worked out. */
+  isOld: boolean;
+  /** The chosen note's fingering over the beam; panels with a chart of their own leave it out. */
+  showsFingering?: boolean;
+}
+
+/** A note and where it hangs in the chart, px from the column's pivot. */
+interface PlacedNote extends HungNote {
+  x: number;
+  y: number;
+}
+
+/** Every note hung as a bob under its hole: straight down is in tune, left is flat, right is sharp. */
+export function PlumbChart(props: PlumbChartProps) {
+  const { document, prediction, geometry, selection, bandCents, isDragging, isOld } = props;
+  const { measures } = geometry;
+  const holes = useMemo(() => labelledHoles(document), [document]);
+  const notes = useMemo(() => hungNotes(document, prediction), [document, prediction]);
+  const rows = useMemo(
+    () => plumbRows(notes, selection.register, measures),
+    [notes, selection.register, measures],
+  );
+  const placed = placeNotes(notes, rows, geometry);
+  const chosen = document.fingerings.find((fingering) => fingering.id === selection.fingering) ?? null;
+  const shown = props.showsFingering === false ? null : chosen;
+  const height = measures.beamY + rows.end;
+  return (
+    <section aria-label="Plumb lines" className={isDragging ? 'is-dragging relative' : 'relative'}>
+      <svg width={geometry.widthPx} height={height} className="block">
+        <FingeringRow geometry={geometry} holes={holes} fingering={shown} chosenKey={selection.hole} />
+        <g transform={`translate(0 ${measures.beamY})`}>
+          <PlumbBackdrop geometry={geometry} rows={rows} bandCents={bandCents} />
+          <ScaleKey geometry={geometry} bandCents={bandCents} />
+          {placed.map((note) => (
+            <PlacedBob key={note.fingering.id} note={note} chart={props} isOld={isOld} />
+          ))}
+          {geometry.columns.map(({ key, x }) => (
+            <circle key={key} cx={x} r={2.6} className="bench-pivot" />
+          ))}
+          <CrossPictures placed={placed} holes={holes} spacing={geometry.columnSpacing} />
+        </g>
+      </svg>
+      {measures.labelGap > 0 && <RowLabels geometry={geometry} rows={rows} top={measures.beamY} />}
+      {shown !== null && measures.labelGap > 0 && (
+        <p
+          className="text-label text-ink2 absolute -translate-y-1/2 whitespace-nowrap"
+          style={{ top: measures.fingeringY, right: geometry.widthPx - geometry.labelRight }}
+        >
+          <b className="text-ink font-semibold">
+            <NoteName note={shown.note} />
+          </b>{' '}
+          fingering
+        </p>
+      )}
+      {placed.map((note) => (
+        <NoteNotices key={note.fingering.id} note={note} top={measures.beamY} measures={measures} />
+      ))}
+      <PlumbTable notes={notes} holes={holes} />
+    </section>
+  );
+}
+
+function placeNotes(
+  notes: readonly HungNote[],
+  rows: PlumbRows,
+  geometry: PanelProps['geometry'],
+): PlacedNote[] {
+  const crosses = new Map<string, number>();
+  return notes.flatMap((note) => {
+    const column = geometry.columns.find(({ key }) => key === note.column);
+    const row = rows.registers.find(({ register }) => register === note.fingering.register);
+    if (column === undefined || row === undefined) return [];
+    if (note.row === 'register') return [{ ...note, x: column.x, y: row.y }];
+    if (rows.crossY === null) return [];
+    const index = crosses.get(note.column) ?? 0;
+    crosses.set(note.column, index + 1);
+    return [{ ...note, x: column.x, y: crossRowY(rows.crossY, index) }];
+  });
+}
+
+interface PlacedBobProps {
+  note: PlacedNote;
+  chart: PlumbChartProps;
+  isOld: boolean;
+}
+
+/** Labels stand in one line where columns leave room for a note and a figure side by side, px. */
+const ONE_LINE_PX = 64;
+
+function PlacedBob({ note, chart, isOld }: PlacedBobProps) {
+  const { geometry, selection, bandCents, onSelect } = chart;
+  const { fingering, predicted, column } = note;
+  const cents = predicted?.centsFromScale ?? null;
+  const { pxPerCent, heldAtCents, labelBelow } = geometry.measures;
+  return (
+    <g transform={`translate(${note.x} 0)`}>
+      <HangingNote
+        note={fingering.note}
+        register={fingering.register}
+        cents={cents}
+        name={spokenHungNote(note)}
+        isCross={note.row === 'cross'}
+        isOutside={cents !== null && Math.abs(cents) > bandOf(bandCents, fingering.register)}
+        isChosen={fingering.id === selection.fingering}
+        isOnTint={column === selection.hole}
+        isOld={isOld}
+        y={note.y}
+        pxPerCent={pxPerCent}
+        heldAtCents={heldAtCents}
+        labelBelow={labelBelow}
+        twoLines={geometry.layout === 'phone' || geometry.columnSpacing < ONE_LINE_PX}
+        onChoose={() => onSelect({ hole: column, fingering: fingering.id })}
+      />
+    </g>
+  );
+}
+
+interface CrossPicturesProps {
+  placed: readonly PlacedNote[];
+  holes: readonly LabelledHole[];
+  spacing: number;
+}
+
+function CrossPictures({ placed, holes, spacing }: CrossPicturesProps) {
+  return placed
+    .filter((note) => note.row === 'cross')
+    .map(({ fingering, x, y }) => (
+      <g key={fingering.id} transform={`translate(${x} ${y + 16})`} aria-hidden="true" pointerEvents="none">
+        <FingeringDots fingering={fingering} holes={holes} width={Math.min(72, spacing - 8)} />
+      </g>
+    ));
+}
+
+interface NoteNoticesProps {
+  note: PlacedNote;
+  top: number;
+  measures: PanelProps['geometry']['measures'];
+}
+
+function NoteNotices({ note, top, measures }: NoteNoticesProps) {
+  const { predicted } = note;
+  if (predicted === null || predicted.notices.length === 0) return null;
+  // On the side that the bob does not hang to.
+  const side = bobPlace(predicted.centsFromScale ?? 0, measures).dx > 0 ? -1 : 1;
+  return (
+    <NoticeMark
+      about={spokenHungNote(note)}
+      notices={predicted.notices}
+      accuracyCents={predicted.accuracyCents}
+      x={note.x + side * 20}
+      y={top + note.y}
+    />
+  );
+}

@@ -1,0 +1,126 @@
+import { useMemo, useRef } from 'react';
+import { boreEnds, fromFootMm } from '#shared/document/profile.ts';
+import { printLength } from '#shared/lengths/print-length.ts';
+import { columnOf } from '../../bench/bench-geometry.ts';
+import type { BenchView } from '../../bench/bench-view.ts';
+import { snapToDrill } from '../../bench/drill-choice.ts';
+import { addHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
+import { labelledHoles } from '../../bench/hole-labels.ts';
+import type { PanelProps } from '../../bench/panel-props.ts';
+import { BodyDrawing } from './BodyDrawing.tsx';
+import { HoleButtons } from './HoleButtons.tsx';
+import { HoleDrawing } from './HoleDrawing.tsx';
+import { PlaceSpot } from './PlaceSpot.tsx';
+import { StripLabels } from './StripLabels.tsx';
+import { useViewGestures } from './use-view-gestures.ts';
+
+interface InstrumentStripProps extends PanelProps {
+  view: BenchView;
+  onView: (view: BenchView) => void;
+  /** Where a new hole is offered, mm from the mouth end; null for nowhere. */
+  spotMm: number | null;
+  onSpot: (positionMm: number | null) => void;
+  /** The next touch of the bare instrument places a hole. */
+  isPlacing: boolean;
+  onDragging: (isDragging: boolean) => void;
+}
+
+/** The instrument across the top of the bench, to scale: plan, section and rule, its holes in hand. */
+export function InstrumentStrip(props: InstrumentStripProps) {
+  const { document, geometry, unit, selection, readOnly, onEdit } = props;
+  const { frame } = geometry;
+  const strip = useRef<HTMLDivElement>(null);
+  const { bore, outside, mouthEnd, foot } = document;
+  const shape = useMemo(() => ({ bore, outside, mouthEnd, foot }), [bore, outside, mouthEnd, foot]);
+  const holes = useMemo(() => labelledHoles(document), [document]);
+  const canEdit = readOnly === null;
+  const placeHole = (positionMm: number) => {
+    onEdit({ label: 'Add a hole', change: (before) => addHole(before, positionMm, usualDiameter(props)) });
+    props.onSpot(null);
+  };
+  const touchAt = (x: number) => {
+    const positionMm = snapPosition(document, frame.mm(x));
+    const isOnBore = frame.mm(x) > 0 && frame.mm(x) < boreEnds(document).footMm;
+    if (!canEdit || !isOnBore) props.onSpot(null);
+    else if (props.isPlacing) placeHole(positionMm);
+    else props.onSpot(positionMm);
+  };
+  const gestures = useViewGestures({ strip, frame, view: props.view, onView: props.onView, onTap: touchAt });
+  const chosen = columnOf(geometry, selection.hole);
+  return (
+    <div
+      ref={strip}
+      role="group"
+      aria-label="Instrument"
+      className="bg-bench border-hair relative touch-pan-y border-b"
+      style={{ height: frame.measures.stripHeight }}
+    >
+      <svg
+        width={frame.widthPx}
+        height={frame.measures.stripHeight + 3}
+        className="block overflow-visible"
+        aria-hidden="true"
+        {...gestures}
+        onDoubleClick={(event) => {
+          const left = strip.current?.getBoundingClientRect().left ?? 0;
+          if (canEdit) placeHole(snapPosition(document, frame.mm(event.clientX - left)));
+        }}
+      >
+        <clipPath id="bench-view">
+          <rect x={frame.viewLeft} width={frame.viewRight - frame.viewLeft + 2} height="400" />
+        </clipPath>
+        {chosen !== undefined && (
+          <rect
+            x={chosen.holeX - frame.measures.columnReach + 3}
+            width={frame.measures.columnReach * 2 - 6}
+            height={frame.measures.stripHeight}
+            className="bench-column"
+          />
+        )}
+        <BodyDrawing frame={frame} shape={shape} unit={unit} />
+        <g clipPath="url(#bench-view)">
+          {holes.map(({ hole, label }) => (
+            <HoleDrawing
+              key={hole.id}
+              frame={frame}
+              shape={shape}
+              hole={hole}
+              label={label}
+              isChosen={hole.id === selection.hole}
+            />
+          ))}
+        </g>
+        <StripLabels geometry={geometry} document={document} chosen={chosen} unit={unit} />
+        {props.spotMm !== null && (
+          <circle
+            cx={frame.x(props.spotMm)}
+            cy={frame.measures.planY}
+            r={(usualDiameter(props) * frame.pxPerMm) / 2}
+            className="bench-ghost-ring"
+          />
+        )}
+      </svg>
+      <HoleButtons {...props} shape={shape} holes={holes} />
+      {props.spotMm !== null && (
+        <PlaceSpot
+          frame={frame}
+          positionMm={props.spotMm}
+          figure={printLength(fromFootMm(document, props.spotMm), unit)}
+          takesFocus={props.isPlacing}
+          onPlace={() => props.spotMm !== null && placeHole(props.spotMm)}
+          onMove={(byMm) =>
+            props.spotMm !== null && props.onSpot(snapPosition(document, props.spotMm + byMm))
+          }
+          onLeave={() => props.onSpot(null)}
+        />
+      )}
+    </div>
+  );
+}
+
+/** A new hole is drilled like the others: their middle size, or half the bore. */
+function usualDiameter({ document, unit }: Pick<PanelProps, 'document' | 'unit'>): number {
+  const sizes = document.holes.map((hole) => hole.diameterMm).sort((a, b) => a - b);
+  const widest = widestHoleMm(document, boreEnds(document).footMm / 2);
+  return snapToDrill(sizes[Math.floor(sizes.length / 2)] ?? widest / 2, unit, widest);
+}
