@@ -70,11 +70,11 @@ export function undercutShape(undercut: Undercut): ShapedUndercut | RefusedUnder
   const { boreRadius: a, holeRadius: b, flare, depth } = undercut;
   const slope = flare / depth;
   const innerRadius = b + flare;
+  if (innerRadius > WIDEST_SHARE * a) return { status: 'refused', reason: 'inner-end-too-wide' };
   // Radius of the cone carried on to the bore's axis; the cone meets the bore wall only while this stays small.
   const atAxis = b + slope * (a + depth);
   if (atAxis > WIDEST_SHARE * a * Math.hypot(1, slope))
     return { status: 'refused', reason: 'cone-breaks-out' };
-  if (innerRadius > WIDEST_SHARE * a) return { status: 'refused', reason: 'inner-end-too-wide' };
   const atSides = radiusAtBoreSides(a, slope, atAxis);
   return {
     status: 'shaped',
