@@ -31,6 +31,8 @@ export function connectDatabase(databaseUrl: string): Database {
       // JSON is text to the models, which parse it where it is needed and nowhere else.
       autoJsonMap: false,
       connectTimeout: 5_000,
+      // No gap locks: every write here names its rows, and two sign-ins at once must not wait for each other.
+      initSql: 'SET SESSION TRANSACTION ISOLATION LEVEL READ COMMITTED',
       ...(socketPath === null ? {} : { socketPath }),
     },
   });
