@@ -1,13 +1,21 @@
 import PDFDocument from 'pdfkit';
-import { flowOverPages } from './flow.ts';
+import { boreTableSection } from './bore-table.ts';
+import { cautionsSection } from './cautions.ts';
+import { chartNotesSections } from './chart-notes.ts';
+import { drillingOrderSection } from './drilling-order.ts';
+import { fingeringChartSection } from './fingering-chart.ts';
+import { flowOverPages, type FlowPage } from './flow.ts';
 import { holeTableSection } from './hole-table.ts';
 import { drawNotApprovedPage } from './not-approved.ts';
+import { outlineSection } from './outline-drawing.ts';
 import { drawPageFoot } from './page-foot.ts';
 import { PAPERS } from './paper.ts';
 import { Pen } from './pen.ts';
+import { recordSection } from './record.ts';
 import { CONTENT_TOP_MM, contentBottomMm, type SheetContext } from './sheet-context.ts';
 import type { SheetInput } from './sheet-input.ts';
 import { writingOf } from './sheet-lengths.ts';
+import { drawTemplatePage, templatePages, templateSubtitle } from './template-page.ts';
 import { drawTitleBlock } from './title-block.ts';
 
 interface PlannedPage {
@@ -66,11 +74,43 @@ function forbidScaling(pdf: PDFKit.PDFDocument): void {
   catalogue._root.data.ViewerPreferences.data.PrintScaling = 'None';
 }
 
+/** The pages in their order; steps that send the reader to another page learn its number once all are counted. */
 function planPages(context: SheetContext): PlannedPage[] {
   const area = { topMm: CONTENT_TOP_MM, bottomMm: contentBottomMm(context.pen.paper) };
-  const first = flowOverPages([holeTableSection(context)], area);
-  return first.map((blocks) => ({
-    subtitle: 'Holes, bore and drilling order',
-    draw: () => blocks.forEach((block) => block.draw()),
-  }));
+  const named = { cautions: 0, templates: [] as number[] };
+  const first = flowOverPages(
+    [
+      outlineSection(context),
+      ...(context.input.document.holes.length === 0 ? [] : [holeTableSection(context)]),
+      boreTableSection(context),
+      drillingOrderSection(context, () => named),
+    ],
+    area,
+  );
+  const templates = templatePages(context);
+  const last = flowOverPages(
+    [
+      fingeringChartSection(context),
+      ...chartNotesSections(context),
+      recordSection(context),
+      cautionsSection(context),
+    ],
+    area,
+  );
+  named.templates = templates.map((_, index) => first.length + 1 + index);
+  named.cautions = first.length + templates.length + last.length;
+  const pageOfPart = (part: number) =>
+    first.length + 1 + templates.findIndex((template) => template.frame.part === part);
+  return [
+    ...first.map((blocks) => flowPage('Holes, bore and drilling order', blocks)),
+    ...templates.map((template) => ({
+      subtitle: templateSubtitle(template),
+      draw: () => drawTemplatePage(context, template, pageOfPart),
+    })),
+    ...last.map((blocks) => flowPage('Fingering chart, record and cautions', blocks)),
+  ];
+}
+
+function flowPage(subtitle: string, blocks: FlowPage): PlannedPage {
+  return { subtitle, draw: () => blocks.forEach((block) => block.draw()) };
 }

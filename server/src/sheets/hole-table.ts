@@ -11,7 +11,7 @@ import { filledWidths, tableSection, type HeadCell, type TableCell } from './tab
 const NOTHING = '–';
 const ROW_MM = 11;
 
-const SHARES = [11, 15, 13, 8.4, 9.2, 9.2, 15.4, 8.4, 11, 10, 12, 9, 9.8, 12.6, 9, 11, 11];
+const SHARES = [11, 14.4, 12.6, 8.4, 9.2, 9.2, 15.4, 8.4, 14.4, 9.4, 12, 9, 9.6, 12.6, 9, 10.6, 10.2];
 
 /** Every hole in drilling order, from the foot upward, with two boxes to write in. */
 export function holeTableSection(context: SheetContext): FlowSection {
@@ -50,7 +50,7 @@ function holeHead(referenceEnd: 'foot' | 'mouth'): HeadCell[][] {
       { text: 'then', column: 5 },
       { text: 'final', column: 6 },
       { text: '±', column: 7 },
-      { text: 'not over', column: 8 },
+      { text: 'never over', column: 8 },
       { text: 'wider', column: 12 },
       { text: 'footward', column: 13 },
       { text: 'drilled', column: 15 },

@@ -13,7 +13,7 @@ const GAP_MM = 17;
 const BAR_COLOUR = '#ededed';
 
 /** Grey enough to leave the circles over it clear, black enough for any printer. */
-const TEMPLATE_WORDS_COLOUR = '#8a8a8a';
+const TEMPLATE_WORDS_COLOUR = '#9a9a9a';
 
 /** What the approval cell says of a print that nobody has approved. */
 export function notApprovedWords({ state, draftSavedAt }: SheetInput['revision']): string {
@@ -54,9 +54,14 @@ function drawBand(pen: Pen, topMm: number): void {
   });
 }
 
-/** Distance of two words along a template, and of two rows across it, mm. */
-const WORDS_APART_MM = 52;
-const ROWS_APART_MM = 26;
+/** White between two words along a template, and the least distance of two rows across it, mm. */
+const WORDS_APART_MM = 13;
+const ROWS_APART_MM = 30;
+
+/** Base lines of the first and last row from the upper and lower edge: clear of the scale and of the figures. */
+const FIRST_ROW_MM = 11;
+const LAST_ROW_MM = 6.5;
+const NARROW_ROW_MM = { first: 7.4, last: 4 };
 
 /** The words again and again inside a template, so that each strip that is cut out carries them. */
 export function drawNotApprovedInside(
@@ -64,16 +69,26 @@ export function drawNotApprovedInside(
   { at: [x, y], widthMm, heightMm }: { at: Point; widthMm: number; heightMm: number },
 ): void {
   const style = { size: 14.7, weight: 700, colour: TEMPLATE_WORDS_COLOUR, spacing: 0.06 } as const;
-  const wordsMm = pen.textWidthMm(TEMPLATE_WORDS, style);
-  const fitted = { ...style, size: style.size * Math.min(1, (widthMm - 4) / wordsMm) };
-  const rows = Math.max(2, Math.floor(heightMm / ROWS_APART_MM));
-  pen.clipped([x, y], widthMm, heightMm, () => {
-    for (let row = 0; row < rows; row += 1) {
-      const baseMm = y + (heightMm * (row + 0.5)) / rows + 1.8;
-      const indentMm = row % 2 === 0 ? 0 : Math.min(22, Math.max(0, widthMm - wordsMm - 6));
-      for (let at = 3 + indentMm; at < widthMm - 4; at += WORDS_APART_MM) {
-        pen.text(TEMPLATE_WORDS, [x + at, baseMm], fitted);
-      }
+  const share = Math.min(1, (widthMm - 4) / pen.textWidthMm(TEMPLATE_WORDS, style));
+  const fitted = { ...style, size: style.size * share };
+  const wordsMm = pen.textWidthMm(TEMPLATE_WORDS, fitted);
+  const count = Math.max(1, Math.floor((widthMm - 4) / (wordsMm + WORDS_APART_MM)));
+  const pitchMm = widthMm / count;
+  wordRows(heightMm).forEach((rowMm, row) => {
+    for (let index = 0; index < count; index += 1) {
+      // Every other row is shifted, so that a narrow piece cut out across still has one.
+      const free = pitchMm - wordsMm;
+      const indent = row % 2 === 0 ? free * 0.25 : free * 0.75;
+      pen.text(TEMPLATE_WORDS, [x + index * pitchMm + indent, y + rowMm], fitted);
     }
   });
+}
+
+/** Base lines of the rows, mm below the upper edge of a template. */
+function wordRows(heightMm: number): number[] {
+  const isNarrow = heightMm < ROWS_APART_MM;
+  const first = isNarrow ? NARROW_ROW_MM.first : FIRST_ROW_MM;
+  const last = heightMm - (isNarrow ? NARROW_ROW_MM.last : LAST_ROW_MM);
+  const gaps = Math.max(1, Math.floor((last - first) / ROWS_APART_MM));
+  return Array.from({ length: gaps + 1 }, (_, row) => first + ((last - first) * row) / gaps);
 }

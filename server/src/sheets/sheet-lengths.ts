@@ -42,6 +42,14 @@ export function writeDiameter(mm: number, writing: LengthWriting): WrittenLength
   return { ...written, main: printLength(mm, 'mm', 2) };
 }
 
+/** A span or a join within a sentence: without a decimal where there is none to write. */
+export function spanInWords(mm: number, writing: LengthWriting): string {
+  const isWhole = Math.abs(mm - Math.round(mm)) < 0.005;
+  if (writing.unit === 'inch' || !isWhole) return lengthInWords(mm, writing);
+  const main = printLength(mm, 'mm', 0);
+  return writing.besides === 'other-unit' ? `${main} (${printLength(mm, 'inch')})` : main;
+}
+
 /** A length within a sentence: the figure and what stands besides it. */
 export function lengthInWords(mm: number, writing: LengthWriting): string {
   const { main, besides } = writeLength(mm, writing);

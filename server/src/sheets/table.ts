@@ -183,7 +183,8 @@ function drawCellGround({ pen }: SheetContext, { look }: TableCell, box: CellBox
   if (look === 'write') pen.fillRect(box.at, box.widthMm, box.heightMm, '#ffffff');
   pen.strokeRect(box.at, box.widthMm, box.heightMm, GRID);
   if (look === 'write') {
-    pen.line([x, y + box.heightMm], [x + box.widthMm, y + box.heightMm], WRITE_LINE);
+    const lineY = y + box.heightMm - WRITE_LINE.widthMm / 2;
+    pen.line([x, lineY], [x + box.widthMm, lineY], WRITE_LINE);
   }
 }
 

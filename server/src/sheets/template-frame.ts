@@ -1,0 +1,103 @@
+import type { DesignDocument } from '#shared/document/design-document.ts';
+import { benchPositionMm, bodyEnds, type ReferenceEnd } from './bench-position.ts';
+import { MARGIN_MM } from './paper.ts';
+import { scaleTicks, type ScaleTick } from './scale-ticks.ts';
+import type { SheetContext } from './sheet-context.ts';
+import { halfRoundMm, holeAppearances } from './template-geometry.ts';
+import { ALONG_PAGE, planTiles, type Join, type Tile, type TileRoom } from './tiling.ts';
+
+/** White to the left of the longest tile, for a ruler or for words, mm. */
+const LEFT_OF_TILE_MM = 20;
+
+/** One tile along the body, placed across a page: which length it shows, and where. */
+export interface TemplateFrame {
+  /** The length shown, mm from the mouth end's reference point. */
+  alongFromMm: number;
+  alongToMm: number;
+  part: number;
+  parts: number;
+  /** Joins with the parts before and after, as places along the body. */
+  joins: { alongMm: number; part: number; clearMm: number }[];
+  /** Distance across the page of a place along the body. */
+  pageX: (alongMm: number) => number;
+}
+
+/** Tiles start at the end that everything is measured from, whose page is the one that is stuck down first. */
+export function templateFrames(document: DesignDocument, referenceEnd: ReferenceEnd): TemplateFrame[] {
+  const { fromMm, toMm } = bodyEnds(document);
+  const tiled = (alongMm: number) => (referenceEnd === 'foot' ? toMm - alongMm : alongMm - fromMm);
+  const along = (tiledMm: number) => (referenceEnd === 'foot' ? toMm - tiledMm : fromMm + tiledMm);
+  const marks = document.holes.map((hole) => ({
+    centreMm: tiled(hole.positionMm),
+    radiusMm: hole.diameterMm / 2,
+  }));
+  const tiles = planTiles(toMm - fromMm, marks, ALONG_PAGE);
+  return tiles.map((tile, index) => {
+    const ends = [along(tile.fromMm), along(tile.toMm)].sort((a, b) => a - b);
+    const [alongFromMm = 0, alongToMm = 0] = ends;
+    const join = (at: Join | null, part: number) =>
+      at === null ? [] : [{ alongMm: along(at.atMm), part, clearMm: at.clearMm }];
+    const leftMm = MARGIN_MM + LEFT_OF_TILE_MM;
+    // The foot end of the first page stays where the next pages' right edges are, so that pages look alike.
+    const offset = referenceEnd === 'foot' ? leftMm + ALONG_PAGE.drawnMm - alongToMm : leftMm - alongFromMm;
+    return {
+      alongFromMm,
+      alongToMm,
+      part: index + 1,
+      parts: tiles.length,
+      joins: [...join(tile.joinBefore, index), ...join(tile.joinAfter, index + 2)],
+      pageX: (alongMm) => offset + alongMm,
+    };
+  });
+}
+
+/** A share of the once-round height; a body too thick for one page is cut into several. */
+export interface RoundBand {
+  /** mm from the centre line, upward on the page. */
+  lowMm: number;
+  highMm: number;
+  joinsMm: number[];
+}
+
+export function roundBands(document: DesignDocument, mostMm: number): RoundBand[] {
+  const halfMm = Math.max(
+    ...document.outside.stations.map((station) => (Math.PI * station.diameterMm) / 2),
+    halfRoundMm(document, bodyEnds(document).toMm),
+  );
+  const marks = document.holes.flatMap((hole) =>
+    holeAppearances(document, hole).map(({ centre, curve }) => ({
+      centreMm: centre.roundMm + halfMm,
+      radiusMm: curve.at(0.25).roundMm - centre.roundMm,
+    })),
+  );
+  const room: TileRoom = { drawnMm: mostMm, overlapMm: 10, clearMm: 8 };
+  const tiles: Tile[] = planTiles(2 * halfMm, marks, room);
+  return tiles.map((tile) => ({
+    lowMm: tile.fromMm - halfMm,
+    highMm: tile.toMm - halfMm,
+    joinsMm: [tile.joinBefore, tile.joinAfter].flatMap((join) => (join === null ? [] : [join.atMm - halfMm])),
+  }));
+}
+
+/** What the bench reads off its rule at a place along the body, mm. */
+export function benchReading({ input }: SheetContext) {
+  return (alongMm: number) => benchPositionMm(input.document, alongMm, input.workshop.referenceEnd);
+}
+
+export interface FrameTick extends ScaleTick {
+  alongMm: number;
+  x: number;
+}
+
+/** Ticks of the bench rule along a tile, in the unit of the sheet. */
+export function frameTicks(context: SheetContext, frame: TemplateFrame): FrameTick[] {
+  const reading = benchReading(context);
+  const [from = 0, to = 0] = [frame.alongFromMm, frame.alongToMm].map(reading).sort((a, b) => a - b);
+  // Readings and places along the body mirror each other, so that reading twice leads back.
+  const along = reading;
+  return scaleTicks(from, to, context.writing.unit).map((tick) => ({
+    ...tick,
+    alongMm: along(tick.atMm),
+    x: frame.pageX(along(tick.atMm)),
+  }));
+}
