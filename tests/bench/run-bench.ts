@@ -1,10 +1,14 @@
 import { chromium } from 'playwright-core';
 import { CHROMIUM_FLAGS } from '../support/chromium-flags.ts';
 import { startApp } from '../support/start-app.ts';
+import { measureDrag } from './drag-bench.ts';
 import { measureFirstLoad } from './first-load-bench.ts';
 import { measureReads } from './http-bench.ts';
 import { measureSheet } from './sheet-bench.ts';
 import type { Figure } from './figure.ts';
+
+/** A frame is painted as soon as there is one, so that waiting for the screen is not counted as work. */
+const NO_FRAME_LIMIT = ['--disable-frame-rate-limit', '--disable-gpu-vsync'];
 
 /** What `npm run bench` hands over. */
 function setting(name: string): string {
@@ -15,9 +19,15 @@ function setting(name: string): string {
 
 async function measureInBrowser(databaseUrl: string): Promise<Record<string, Figure>> {
   const app = await startApp({ databaseUrl, clientFolder: setting('BENCH_CLIENT') });
-  const browser = await chromium.launch({ executablePath: setting('BENCH_CHROMIUM'), args: CHROMIUM_FLAGS });
+  const browser = await chromium.launch({
+    executablePath: setting('BENCH_CHROMIUM'),
+    args: [...CHROMIUM_FLAGS, ...NO_FRAME_LIMIT],
+  });
   try {
-    return { firstLoad: await measureFirstLoad(browser, app.address) };
+    return {
+      drag: await measureDrag(browser, app.address),
+      firstLoad: await measureFirstLoad(browser, app.address),
+    };
   } finally {
     await browser.close();
     await app.stop();
