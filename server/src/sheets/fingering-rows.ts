@@ -23,7 +23,7 @@ export interface FingeringRow {
   words: string;
 }
 
-/** Plain notes with their upper registers first, then half-covered, cross and upper ones that stand alone. */
+/** From low to high: plain notes with their upper registers first, then half-covered, cross and upper ones that stand alone. */
 export function fingeringRows(input: SheetInput): FingeringRow[] {
   const { document } = input;
   const left = [...document.fingerings];
@@ -57,7 +57,8 @@ export function fingeringRows(input: SheetInput): FingeringRow[] {
     third: null,
     words: aloneWords(input, fingering),
   }));
-  return [...rows, ...alone];
+  const fromLow = (a: FingeringRow, b: FingeringRow) => a.first.targetHz - b.first.targetHz;
+  return [...rows.sort(fromLow), ...alone.sort(fromLow)];
 }
 
 function chartNote(input: SheetInput, fingering: Fingering): ChartNote {

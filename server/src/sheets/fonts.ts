@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import unicodeRanges from '@fontsource/source-sans-3/unicode.json' with { type: 'json' };
+import { unpackedFont } from './unpacked-font.ts';
 
 export type FontWeight = 400 | 600 | 700;
 
@@ -60,9 +61,8 @@ export function chooseFont(pdf: PDFKit.PDFDocument, face: Face, weight: FontWeig
   const name = `${face}-${weight}`;
   let bytes = fontFiles.get(name);
   if (bytes === undefined) {
-    bytes = readFileSync(
-      fromHere.resolve(`@fontsource/source-sans-3/files/source-sans-3-${name}-normal.woff`),
-    );
+    const path = fromHere.resolve(`@fontsource/source-sans-3/files/source-sans-3-${name}-normal.woff`);
+    bytes = unpackedFont(readFileSync(path));
     fontFiles.set(name, bytes);
   }
   pdf.registerFont(name, bytes).font(name);

@@ -33,6 +33,7 @@ const INK = '#000000';
 export class Pen {
   readonly pdf: PDFKit.PDFDocument;
   readonly paper: Paper;
+  private readonly widths = new Map<string, number>();
 
   constructor(pdf: PDFKit.PDFDocument, paper: Paper) {
     this.pdf = pdf;
@@ -123,16 +124,25 @@ export class Pen {
         characterSpacing: spacing * sizeMm,
       } as const;
       this.pdf.text(run.text, at, y, options);
-      at += this.pdf.widthOfString(run.text) + spacing * sizeMm * run.text.length;
+      at += this.textWidthMm(run.text, style);
     }
   }
 
   textWidthMm(text: string, { size, weight = 400, spacing = 0 }: TextStyle): number {
-    const sizeMm = size * MM_PER_POINT;
-    return fontRuns(printableText(text)).reduce((width, run) => {
+    const line = printableText(text);
+    return (this.widthPerSize(line, weight) + spacing * line.length) * size * MM_PER_POINT;
+  }
+
+  /** Width of a line as a share of its size; fitting asks for the same words at one size after another. */
+  private widthPerSize(line: string, weight: FontWeight): number {
+    const key = `${weight} ${line}`;
+    const known = this.widths.get(key);
+    if (known !== undefined) return known;
+    const width = fontRuns(line).reduce((sum, run) => {
       chooseFont(this.pdf, run.face, weight);
-      this.pdf.fontSize(sizeMm);
-      return width + this.pdf.widthOfString(run.text) + spacing * sizeMm * run.text.length;
+      return sum + this.pdf.fontSize(1).widthOfString(run.text);
     }, 0);
+    this.widths.set(key, width);
+    return width;
   }
 }
