@@ -122,7 +122,7 @@ function taylorOfWallFunction(middle: number): Float64Array {
   const f = new Float64Array(2 * TERMS);
   for (let n = 0; n < 2 * TERMS; n += 1) {
     const turned = n % 2 === 0 ? -2 * cell(g, n + 1) : 2 * cell(g, n - 1);
-    f[n] = (turned - 2 * middle * cell(f, n - 2) - cell(f, n - 4)) / (middle * middle);
+    f[n] = (turned - 2 * middle * (f[n - 2] ?? 0) - (f[n - 4] ?? 0)) / (middle * middle);
   }
   return f;
 }

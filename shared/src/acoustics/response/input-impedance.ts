@@ -135,11 +135,14 @@ function writeOpenings(prepared: PreparedColumn): void {
     const inside = branch?.inside ?? prepared.footTwoPort;
     const heard = coupling.outer + 2 * (opening[i] ?? 0) * coupling.openings;
     const row = 2 * i * (nodes + 1);
-    for (let j = 0; j <= nodes; j += 1) {
-      const from = j === nodes ? coupling.openings - 1 : (opening[j] ?? 0);
-      passThrough(cells, inside, heard + 2 * from, pressure + row + 2 * j);
-      passThrough(cells, inside + 4, heard + 2 * from, flow + row + 2 * j);
+    for (let j = 0; j < nodes; j += 1) {
+      const from = heard + 2 * (opening[j] ?? 0);
+      passThrough(cells, inside, from, pressure + row + 2 * j);
+      passThrough(cells, inside + 4, from, flow + row + 2 * j);
     }
+    const mouth = heard + 2 * (coupling.openings - 1);
+    passThrough(cells, inside, mouth, pressure + row + 2 * nodes);
+    passThrough(cells, inside + 4, mouth, flow + row + 2 * nodes);
     const radiation = branch?.radiation ?? prepared.footRadiation;
     addOwnRadiation(cells, inside, radiation, pressure + row + 2 * i);
     addOwnRadiation(cells, inside + 4, radiation, flow + row + 2 * i);

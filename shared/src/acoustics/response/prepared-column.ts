@@ -38,6 +38,8 @@ export interface PreparedColumn {
   inputRadius: number;
   /** Of the bore from the input to the foot, m. */
   length: number;
+  /** Of the bore, m. */
+  widestRadius: number;
   /** Outside, m/s. */
   speedOfSound: number;
   /** Resonances that play are maxima of the impedance (reeds), or minima. */
@@ -84,6 +86,7 @@ export function prepareColumn(
     inputImpedance: (column.outside.density * column.outside.speedOfSound) / (Math.PI * inputRadius ** 2),
     inputRadius,
     length: (column.bore.at(-1)?.position ?? NaN) - column.input,
+    widestRadius: Math.max(...column.bore.map((point) => point.radius)),
     speedOfSound: column.outside.speedOfSound,
     playsMaxima: column.mouth.kind === 'reed' || column.mouth.kind === 'ideal-closed',
     frequency: 0,

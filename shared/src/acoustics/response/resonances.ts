@@ -32,8 +32,11 @@ const SAMPLES_PER_TURN = 4;
 /** A step between samples beyond these is looked into, rad. */
 const LARGEST_FALL = 2.4;
 const LARGEST_RISE = 0.4;
-/** Hz; a search ends here though it found less. */
-const HIGHEST = 40_000;
+/** A search ends, though it found less, where the bore's first cross mode begins to travel: k·radius there. */
+const CROSS_MODE = 1.84;
+/** A fall from sample to sample below the first lets the next one be left out, below the second three, rad. */
+const SLOW_FALL = 0.7;
+const VERY_SLOW_FALL = 0.3;
 /** Hz; nothing in an instrument is narrower. */
 const NARROWEST = 1e-3;
 
@@ -55,15 +58,9 @@ export function findResonances(
   fingerings: readonly FingeringBranches[],
   search: ResonanceSearch,
 ): Resonance[][] {
-  const tracks = fingerings.map(() => new PhaseTrack());
-  scan(prepared, fingerings, search, tracks);
-  return fingerings.map((fingering, i) => {
-    const track = tracks[i] ?? new PhaseTrack();
-    const probe: Probe = { prepared, fingering, search, track };
-    refine(probe);
-    recount(probe);
-    return crossings(probe);
-  });
+  const probes = fingerings.map((fingering) => ({ prepared, fingering, search, track: new PhaseTrack(), next: 0 }));
+  scan(prepared, probes, search);
+  return probes.map(crossings);
 }
 
 interface Probe {
@@ -71,6 +68,8 @@ interface Probe {
   fingering: FingeringBranches;
   search: ResonanceSearch;
   track: PhaseTrack;
+  /** Grid sample that it takes next. */
+  next: number;
 }
 
 // Phase of the reflection at the mouth end for the frequency the column is set to.
@@ -92,29 +91,46 @@ function levelOf(order: number, track: PhaseTrack, maxima: boolean): number {
   return cell(track.phases, 0) > 0 ? 2 * Math.PI * (1 - order) : -2 * Math.PI * order;
 }
 
-function scan(
-  prepared: PreparedColumn,
-  fingerings: readonly FingeringBranches[],
-  search: ResonanceSearch,
-  tracks: readonly PhaseTrack[],
-): void {
+function scan(prepared: PreparedColumn, probes: readonly Probe[], search: ResonanceSearch): void {
   const step = prepared.speedOfSound / (2 * SAMPLES_PER_TURN * prepared.length);
-  const open = fingerings.map(() => true);
-  let left = fingerings.length;
-  for (let j = 0; left > 0 && j * step < HIGHEST; j += 1) {
+  const highest = (CROSS_MODE * prepared.speedOfSound) / (2 * Math.PI * prepared.widestRadius);
+  let open = probes;
+  for (let j = 0; open.length > 0 && j * step < highest; j += 1) {
+    const due = open.filter((probe) => probe.next <= j);
+    if (due.length === 0) continue;
     const frequency = j === 0 ? step / 16 : j * step;
     tuneColumn(prepared, frequency, search.coupling);
-    for (let i = 0; i < fingerings.length; i += 1) {
-      const fingering = fingerings[i];
-      const track = tracks[i];
-      if (open[i] !== true || fingering === undefined || track === undefined) continue;
-      const phase = track.push(frequency, reflectionPhase(prepared, fingering, search.coupling));
-      if (phase > levelOf(search.count, track, search.maxima)) continue;
-      open[i] = false;
-      left -= 1;
-      track.counted = countedPhase(prepared, fingering);
+    for (const { track, fingering } of due) {
+      track.push(frequency, reflectionPhase(prepared, fingering, search.coupling));
+      track.counted = isThrough(track, search) ? countedPhase(prepared, fingering) : NaN;
     }
+    const complete = due.filter((probe) => isComplete(probe));
+    if (complete.length > 0) open = open.filter((probe) => !complete.includes(probe));
+    for (const probe of due) probe.next = j + stride(probe.track, step);
   }
+}
+
+// How many grid steps on the next sample lies: more where the phase falls slowly.
+function stride({ frequencies, phases, count }: PhaseTrack, step: number): number {
+  if (count < 3) return 1;
+  const gap = (cell(frequencies, count - 1) - cell(frequencies, count - 2)) / step;
+  const fall = (cell(phases, count - 2) - cell(phases, count - 1)) / gap;
+  if (fall > SLOW_FALL) return 1;
+  return fall > VERY_SLOW_FALL ? 2 : 4;
+}
+
+// Whether the phase has fallen below the last level wanted.
+function isThrough(track: PhaseTrack, search: ResonanceSearch): boolean {
+  return cell(track.phases, track.count - 1) <= levelOf(search.count, track, search.maxima);
+}
+
+// Looks into the last step, and into all of them once the phase has come through.
+function isComplete(probe: Probe): boolean {
+  const { track, search } = probe;
+  refine(probe, track.count - 1);
+  if (Number.isNaN(track.counted)) return false;
+  if (isThrough(track, search)) recount(probe);
+  return isThrough(track, search);
 }
 
 function sampleAt({ prepared, fingering, search }: Probe, frequency: number): number {
@@ -122,10 +138,10 @@ function sampleAt({ prepared, fingering, search }: Probe, frequency: number): nu
   return reflectionPhase(prepared, fingering, search.coupling);
 }
 
-// Halves every interval whose phase step is too large to be sure of.
-function refine(probe: Probe): void {
+// Halves every interval from a place on whose phase step is too large to be sure of.
+function refine(probe: Probe, from: number): void {
   const { track } = probe;
-  for (let i = 1; i < track.count;) {
+  for (let i = Math.max(from, 1); i < track.count;) {
     const below = cell(track.frequencies, i - 1);
     const above = cell(track.frequencies, i);
     const fall = cell(track.phases, i - 1) - cell(track.phases, i);
@@ -161,7 +177,7 @@ function recount(probe: Probe): void {
     if (agrees(counted, cell(track.phases, high))) high += 1;
     if (agrees(track.counted, cell(track.phases, track.count - 1))) break;
   }
-  refine(probe);
+  refine(probe, 1);
 }
 
 function agrees(counted: number, tracked: number): boolean {

@@ -1,0 +1,89 @@
+import { prepareColumn } from '../acoustics/response/prepared-column.ts';
+import { findResonances, type Resonance } from '../acoustics/response/resonances.ts';
+import type { DesignDocument, Fingering } from '../document/design-document.ts';
+import { beatsBetween, centsBetween, frequencyAbove } from '../music/cents.ts';
+import { noteFrequencyHz } from '../music/temperament.ts';
+import { ENGINE } from './engine-version.ts';
+import { ladderMultiples, playingResonance, ventCount } from './playing-mode.ts';
+import { ladderOf } from './ladder.ts';
+import { openHoleCutoffHz } from './open-hole-cutoff.ts';
+import type { DesignPrediction, FingeringPrediction } from './prediction.ts';
+import { toColumn, type DesignColumn } from './to-column.ts';
+
+/** Modes of a ladder when nothing else is asked for. */
+const LADDER_MODES = 6;
+
+export interface PredictionOptions {
+  /** Rungs of each ladder, 1–24. */
+  modes?: number;
+  /** False: openings do not hear each other; for comparison only. */
+  coupling?: boolean;
+}
+
+/**
+ * Everything the engine says about a design: for every fingering its pitch, ladder, cutoff and accuracy.
+ *
+ * The document must have passed `readDocument`. Throws `EngineInputError`, with the document's field, on what no formula
+ * answers.
+ */
+export function predictDesign(document: DesignDocument, options: PredictionOptions = {}): DesignPrediction {
+  const { modes = LADDER_MODES, coupling = true } = options;
+  const design = toColumn(document);
+  const { prepared, fingerings } = prepareColumn(design.column, design.states);
+  const maxima = prepared.playsMaxima;
+  const highest = Math.max(...document.fingerings.map((fingering) => fingering.register), 1);
+  const count = Math.max(modes, highest + 1);
+  const resonances = findResonances(prepared, fingerings, { count, coupling, maxima });
+  return {
+    engine: ENGINE,
+    notices: [],
+    fingerings: document.fingerings.map((fingering, i) =>
+      predictFingering({ document, design, fingering, index: i, maxima, modes }, resonances[i] ?? []),
+    ),
+  };
+}
+
+interface FingeringQuestion {
+  document: DesignDocument;
+  design: DesignColumn;
+  fingering: Fingering;
+  index: number;
+  maxima: boolean;
+  modes: number;
+}
+
+function predictFingering(question: FingeringQuestion, resonances: readonly Resonance[]): FingeringPrediction {
+  const { document, design, fingering, index, maxima, modes } = question;
+  const states = design.states[index] ?? [];
+  const targetHz = targetFrequencyHz(document, fingering);
+  const multiples = ladderMultiples(design.column, states, maxima);
+  const playing = playingResonance({
+    resonances,
+    maxima,
+    register: fingering.register,
+    vents: ventCount(states),
+    targetHz,
+  });
+  const vent = design.holes[states.findIndex((state) => state.kind !== 'closed')];
+  const frequencyHz = playing?.frequency ?? null;
+  return {
+    id: fingering.id,
+    note: fingering.note,
+    register: fingering.register,
+    targetHz,
+    frequencyHz,
+    centsFromScale: frequencyHz === null ? null : centsBetween(frequencyHz, targetHz),
+    beatsHz: frequencyHz === null ? null : beatsBetween(frequencyHz, targetHz),
+    mode: playing?.order ?? null,
+    ladder: ladderOf(resonances.slice(0, modes), maxima, multiples),
+    ventHole: vent?.id ?? null,
+    cutoffHz: openHoleCutoffHz(design.column, states),
+    accuracyCents: 1,
+    notices: [],
+  };
+}
+
+/** What the scale asks of a fingering, Hz. */
+export function targetFrequencyHz(document: DesignDocument, fingering: Fingering): number {
+  return frequencyAbove(noteFrequencyHz(fingering.note, document.pitch), fingering.centsOffset);
+}
