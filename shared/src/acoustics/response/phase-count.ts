@@ -2,6 +2,7 @@ import { cell, type Cells } from '../complex/cells.ts';
 import type { Segment } from './bore-plan.ts';
 import { CHAIN_CELLS, passReactance, passShunt, passTwoPort, startAtFoot } from './chain.ts';
 import type { HoleBranch } from './hole-branch.ts';
+import { nearestTurn } from './phase-track.ts';
 import type { FingeringBranches, PreparedColumn } from './prepared-column.ts';
 
 /**
@@ -50,11 +51,6 @@ function reflectionPhase(wave: Float64Array, unit: number): number {
   return Math.atan2(ni * dr - nr * di, nr * dr + ni * di);
 }
 
-// The whole turns nearest to what is expected.
-function nearest(phase: number, expected: number): number {
-  return phase + 2 * Math.PI * Math.round((expected - phase) / (2 * Math.PI));
-}
-
 function passSegment(prepared: PreparedColumn, segment: Segment): void {
   const { cells } = prepared;
   for (let i = segment.links.length - 1; i >= 0; i -= 1) {
@@ -63,7 +59,7 @@ function passSegment(prepared: PreparedColumn, segment: Segment): void {
     scaleTo(prepared, link.footRadius);
     passTwoPort(cells, link.twoPort, state);
     const unit = unitImpedance(prepared, link.mouthRadius);
-    state[PHASE] = nearest(reflectionPhase(state, unit), cell(state, PHASE) + cell(cells, link.turn));
+    state[PHASE] = nearestTurn(reflectionPhase(state, unit), cell(state, PHASE) + cell(cells, link.turn));
     state[RADIUS] = link.mouthRadius;
   }
 }
@@ -71,7 +67,7 @@ function passSegment(prepared: PreparedColumn, segment: Segment): void {
 // A step of the bore stretches the impedance: the phase keeps to its half circle.
 function scaleTo(prepared: PreparedColumn, radius: number): void {
   if (radius === state[RADIUS]) return;
-  state[PHASE] = nearest(reflectionPhase(state, unitImpedance(prepared, radius)), cell(state, PHASE));
+  state[PHASE] = nearestTurn(reflectionPhase(state, unitImpedance(prepared, radius)), cell(state, PHASE));
   state[RADIUS] = radius;
 }
 
@@ -88,7 +84,7 @@ function passShift(prepared: PreparedColumn, length: number, at: number): void {
   const { cells, plan } = prepared;
   passTwoPort(cells, at, state);
   const expected = cell(state, PHASE) - 2 * cell(cells, plan.outside) * length;
-  state[PHASE] = nearest(reflectionPhase(state, unitImpedance(prepared, cell(state, RADIUS))), expected);
+  state[PHASE] = nearestTurn(reflectionPhase(state, unitImpedance(prepared, cell(state, RADIUS))), expected);
 }
 
 // Along z + t·jx, t from 0 to 1, the phases of z − 1 and of z + 1 turn by less than half a circle each.
@@ -128,5 +124,5 @@ function passMouth(prepared: PreparedColumn): number {
     turnBy(unit);
     return cell(state, PHASE);
   }
-  return nearest(reflectionPhase(state, unit), cell(state, PHASE));
+  return nearestTurn(reflectionPhase(state, unit), cell(state, PHASE));
 }

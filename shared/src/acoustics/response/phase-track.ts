@@ -1,55 +1,50 @@
 import { cell } from '../complex/cells.ts';
-/** Rise of the phase from one sample to the next that is taken as such, rad; more is a fall by the rest of a turn. */
-const RISE = 1;
+
+/** Phase of a reflection at one frequency, rad. */
+export interface PhaseSample {
+  /** Hz */
+  frequency: number;
+  /** Turns of no account. */
+  phase: number;
+  /** With its turns as counted along the bore. */
+  counted: number;
+}
 
 /**
- * Phase of a reflection over frequency, its whole turns counted; grows as samples come in.
+ * Phase of a reflection over frequency, its whole turns counted from sample to sample; grows as samples come in.
  */
 export class PhaseTrack {
   frequencies = new Float64Array(64);
   phases = new Float64Array(64);
+  /** Phase with its turns as counted along the bore at each sample, rad. */
+  counts = new Float64Array(64);
   count = 0;
-  /** Phase at the last sample as counted from foot to mouth, rad. */
-  counted = 0;
 
   /**
-   * Adds a sample above all others.
-   *
-   * @param frequency - Hz
-   * @param principal - phase without its whole turns, rad
-   * @returns the phase with its turns, rad
-   */
-  push(frequency: number, principal: number): number {
-    return this.insert(this.count, frequency, principal);
-  }
-
-  /**
-   * Puts a sample before another one and counts the turns of all that follow anew.
+   * Puts a sample before another one, or behind all, and counts the turns of those that follow anew.
    *
    * @param place - where it will stand
-   * @param frequency - Hz
-   * @param principal - phase without its whole turns, rad
-   * @returns the phase with its turns, rad
+   * @param sample - the sample
+   * @returns nothing; the sample is in the track
    */
-  insert(place: number, frequency: number, principal: number): number {
+  insert(place: number, sample: PhaseSample): void {
     if (this.count === this.frequencies.length) this.grow();
-    this.frequencies.copyWithin(place + 1, place, this.count);
-    this.phases.copyWithin(place + 1, place, this.count);
-    this.frequencies[place] = frequency;
-    const phase = place === 0 ? principal : unwrapped(principal, cell(this.phases, place - 1));
+    for (const values of [this.frequencies, this.phases, this.counts]) {
+      values.copyWithin(place + 1, place, this.count);
+    }
+    this.frequencies[place] = sample.frequency;
+    this.counts[place] = sample.counted;
+    const phase = place === 0 ? sample.phase : nearestTurn(sample.phase, cell(this.phases, place - 1));
     this.phases[place] = phase;
     this.count += 1;
-    if (place + 1 < this.count) {
-      const next = cell(this.phases, place + 1);
-      const shift = unwrapped(next, phase) - next;
-      if (shift !== 0)
-        for (let i = place + 1; i < this.count; i += 1) this.phases[i] = cell(this.phases, i) + shift;
-    }
-    return phase;
+    if (place + 1 === this.count) return;
+    const next = cell(this.phases, place + 1);
+    const shift = nearestTurn(next, phase) - next;
+    for (let i = place + 1; i < this.count; i += 1) this.phases[i] = cell(this.phases, i) + shift;
   }
 
   private grow(): void {
-    for (const key of ['frequencies', 'phases'] as const) {
+    for (const key of ['frequencies', 'phases', 'counts'] as const) {
       const wider = new Float64Array(2 * this[key].length);
       wider.set(this[key]);
       this[key] = wider;
@@ -58,16 +53,12 @@ export class PhaseTrack {
 }
 
 /**
- * Phase with the whole turns that make it fall from the one before: by less than a turn, or rise by less than `RISE`.
- *
- * The phase of a reflection falls with frequency, strictly without losses; with them it may rise a little where the
- * reflection is weak.
+ * Phase with the whole turns that bring it nearest to another.
  *
  * @param phase - rad, turns of no account
- * @param before - at the frequency below, rad
- * @returns rad
+ * @param expected - rad
+ * @returns rad, within half a turn of what is expected
  */
-export function unwrapped(phase: number, before: number): number {
-  const turn = 2 * Math.PI;
-  return phase - turn * Math.ceil((phase - before - RISE) / turn);
+export function nearestTurn(phase: number, expected: number): number {
+  return phase + 2 * Math.PI * Math.round((expected - phase) / (2 * Math.PI));
 }

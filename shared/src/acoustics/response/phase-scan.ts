@@ -1,0 +1,171 @@
+import { cell } from '../complex/cells.ts';
+import { chainImpedance } from './chain.ts';
+import { coupledImpedance } from './input-impedance.ts';
+import { countedPhase } from './phase-count.ts';
+import { PhaseTrack } from './phase-track.ts';
+import { tuneColumn, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
+
+export interface ResonanceSearch {
+  /** How many to find, from the lowest. */
+  count: number;
+  /** False: openings do not hear each other. */
+  coupling: boolean;
+  /** True: maxima of the impedance; false: minima. */
+  maxima: boolean;
+}
+
+/** One fingering on its way through the frequencies. */
+export interface Probe {
+  prepared: PreparedColumn;
+  fingering: FingeringBranches;
+  search: ResonanceSearch;
+  track: PhaseTrack;
+  /** Of the common grid, Hz. */
+  step: number;
+  /** Grid sample that it takes next. */
+  next: number;
+}
+
+/** Samples in which the phase of a plain tube makes one full turn. */
+const SAMPLES_PER_TURN = 4;
+/** A step from sample to sample beyond these is looked into, rad. */
+const LARGEST_FALL = 2.4;
+const LARGEST_RISE = 0.4;
+/** An interval looked into is settled once it is this share of the grid's and its step this small, rad. */
+const SETTLED_SHARE = 1 / 16;
+const SETTLED_STEP = 0.8;
+/** Hz; nothing in an instrument is narrower. */
+const NARROWEST = 1e-3;
+/** A fall below the first lets the next grid sample be left out, below the second the next three, rad. */
+const SLOW_FALL = 0.7;
+const VERY_SLOW_FALL = 0.3;
+/** A scan ends, though it passed fewer, where so many more resonances would lie if none had leaked away. */
+const LEAKED = 2;
+/** And where the bore's first cross mode begins to travel: wavenumber times radius there. */
+const CROSS_MODE = 1.84;
+
+/**
+ * Phase φ of the reflection (Z − Z₀)/(Z + Z₀) at the mouth end over frequency, for every fingering.
+ *
+ * It falls with frequency; minima of |Z| lie where it passes odd multiples of π, maxima where it passes even ones. Samples are
+ * shared by all fingerings. `countedPhase` tells at each sample how many turns lie below: wherever that and the step of the
+ * phase disagree, the interval is halved until it is settled. Without that count a narrow resonance between two samples
+ * would go unseen. Above the cutoff, where the open holes leak, a minimum and a maximum may both vanish; then the count
+ * keeps the turn and the phase, whose steps are small by then, is right to have lost it.
+ *
+ * @param prepared - the column
+ * @param fingerings - branches of each fingering
+ * @param search - how far to go
+ * @returns for each fingering its track, through the last resonance wanted where there are so many
+ * @source R. M. Foster, Bell System Technical Journal 3 (1924) 259 (reactance theorem)
+ */
+export function scanPhases(
+  prepared: PreparedColumn,
+  fingerings: readonly FingeringBranches[],
+  search: ResonanceSearch,
+): Probe[] {
+  const step = prepared.speedOfSound / (2 * SAMPLES_PER_TURN * prepared.length);
+  const highest = (CROSS_MODE * prepared.speedOfSound) / (2 * Math.PI * prepared.widestRadius);
+  const probes = fingerings.map((fingering): Probe => ({
+    prepared,
+    fingering,
+    search,
+    step,
+    track: new PhaseTrack(),
+    next: 0,
+  }));
+  let open = probes;
+  for (let j = 0; open.length > 0 && j * step < highest; j += 1) {
+    const due = open.filter((probe) => probe.next <= j);
+    if (due.length === 0) continue;
+    const frequency = j === 0 ? step / 16 : j * step;
+    tuneColumn(prepared, frequency, search.coupling);
+    for (const probe of due) sample(probe, probe.track.count, frequency);
+    for (const probe of due) {
+      settle(probe);
+      probe.next = j + stride(probe);
+    }
+    if (due.some(isThrough)) open = open.filter((probe) => !isThrough(probe));
+  }
+  return probes;
+}
+
+/**
+ * Phase of the reflection at the mouth end for the frequency the column is set to.
+ *
+ * @param prepared - the column
+ * @param fingering - its branches
+ * @param coupling - whether openings hear each other
+ * @returns rad, in (−π, π]
+ */
+export function reflectionPhase(
+  prepared: PreparedColumn,
+  fingering: FingeringBranches,
+  coupling: boolean,
+): number {
+  const at = coupling ? coupledImpedance(prepared, fingering) : chainImpedance(prepared, fingering);
+  const unit = prepared.inputImpedance;
+  const re = cell(prepared.cells, at);
+  const im = cell(prepared.cells, at + 1);
+  return Math.atan2(2 * im * unit, re * re + im * im - unit * unit);
+}
+
+/**
+ * Phase at which a resonance lies.
+ *
+ * @param order - counts the resonances of its kind, 1 the lowest
+ * @param track - the fingering's
+ * @param maxima - which kind
+ * @returns rad
+ */
+export function levelOf(order: number, track: PhaseTrack, maxima: boolean): number {
+  if (!maxima) return Math.PI - 2 * Math.PI * order;
+  // A column that is shut all along begins at a maximum, that of no frequency at all, which does not count.
+  return cell(track.phases, 0) > 0 ? 2 * Math.PI * (1 - order) : -2 * Math.PI * order;
+}
+
+// Puts a sample at the frequency that the column is set to into the track.
+function sample({ prepared, fingering, search, track }: Probe, place: number, frequency: number): void {
+  const phase = reflectionPhase(prepared, fingering, search.coupling);
+  track.insert(place, { frequency, phase, counted: countedPhase(prepared, fingering) });
+}
+
+// Whether all resonances wanted lie below the last sample, or would if none had leaked away.
+function isThrough({ track, search }: Probe): boolean {
+  const last = track.count - 1;
+  return (
+    cell(track.phases, last) <= levelOf(search.count, track, search.maxima) ||
+    cell(track.counts, last) <= levelOf(search.count + LEAKED, track, search.maxima)
+  );
+}
+
+// Halves the last interval, and its halves, until every step is sure.
+function settle(probe: Probe): void {
+  const { track, prepared, search } = probe;
+  for (let i = track.count - 1; i > 0 && i < track.count;) {
+    if (isSettled(probe, i)) {
+      i += 1;
+      continue;
+    }
+    const middle = (cell(track.frequencies, i - 1) + cell(track.frequencies, i)) / 2;
+    tuneColumn(prepared, middle, search.coupling);
+    sample(probe, i, middle);
+  }
+}
+
+function isSettled({ track, step }: Probe, i: number): boolean {
+  const width = cell(track.frequencies, i) - cell(track.frequencies, i - 1);
+  const turn = cell(track.phases, i) - cell(track.phases, i - 1);
+  const counted = cell(track.counts, i) - cell(track.counts, i - 1);
+  if (Math.abs(counted - turn) < Math.PI && turn > -LARGEST_FALL && turn < LARGEST_RISE) return true;
+  return (width <= SETTLED_SHARE * step && Math.abs(turn) <= SETTLED_STEP) || width < NARROWEST;
+}
+
+// How many grid steps on the next sample lies: more where the phase falls slowly.
+function stride({ track: { frequencies, phases, count }, step }: Probe): number {
+  if (count < 3) return 1;
+  const gap = (cell(frequencies, count - 1) - cell(frequencies, count - 2)) / step;
+  const fall = (cell(phases, count - 2) - cell(phases, count - 1)) / gap;
+  if (fall > SLOW_FALL) return 1;
+  return fall > VERY_SLOW_FALL ? 2 : 4;
+}
