@@ -61,7 +61,7 @@ async function runLayer(layer, { rest, environment, shutdown, reports }) {
       stdio: ['ignore', 'inherit', 'inherit'],
     },
   );
-  const disarm = guardChildren([child.pid]);
+  const disarm = guardChildren([child.pid], [reports]);
   await shutdown.add(() => stopChild(child));
   const [code] = await once(child, 'exit');
   disarm();
