@@ -15,6 +15,8 @@ interface NumberFieldProps {
   layout?: 'row' | 'stack' | 'cell';
   /** A word under or after the label: "from wall". */
   hint?: ReactNode;
+  /** Strong where it stands among the labels of a form. */
+  labelLook?: 'plain' | 'strong';
   /** Stands to the right: what 0.1 mm does to the pitch. */
   beside?: ReactNode;
   /** What somebody else found wrong with the stored figure. What was typed and could not be read comes first. */
@@ -25,7 +27,7 @@ interface NumberFieldProps {
 
 /** A figure with its unit, − and +. Arrows step, Shift ten; Enter or leaving keeps, Escape puts back. */
 export function NumberField({ layout = 'stack', label, hint, beside, error, ...props }: NumberFieldProps) {
-  const { value, format, disabled = false, onFocus } = props;
+  const { format, disabled = false, onFocus } = props;
   const id = useId();
   const entry = useNumberEntry(props);
   const fault = entry.complaint ?? error;
@@ -33,7 +35,13 @@ export function NumberField({ layout = 'stack', label, hint, beside, error, ...p
     <div>
       <div className={layout === 'row' ? 'flex items-center justify-between gap-2' : undefined}>
         <div className={layout === 'cell' ? 'sr-only' : 'flex items-baseline justify-between gap-2'}>
-          <StepperLabel id={id} label={label} hint={hint} hintBelow={layout === 'row'} />
+          <StepperLabel
+            id={id}
+            label={label}
+            look={props.labelLook}
+            hint={hint}
+            hintBelow={layout === 'row'}
+          />
           {layout === 'stack' && beside}
         </div>
         <Stepper
@@ -63,13 +71,16 @@ interface StepperLabelProps {
   id: string;
   label: string;
   hint: ReactNode;
+  look: 'plain' | 'strong' | undefined;
   hintBelow: boolean;
 }
 
-function StepperLabel({ id, label, hint, hintBelow }: StepperLabelProps) {
+function StepperLabel({ id, label, look, hint, hintBelow }: StepperLabelProps) {
   return (
     <span className="leading-tight">
-      <label htmlFor={id}>{label}</label>
+      <label htmlFor={id} className={look === 'strong' ? 'font-semibold' : undefined}>
+        {label}
+      </label>
       {hint !== undefined && (
         <span id={`${id}-hint`} className={classNames('text-label text-ink3', hintBelow ? 'block' : 'ml-2')}>
           {hint}
@@ -105,7 +116,7 @@ function Stepper({ id, label, entry, suffix, isFaulty, disabled, describedBy, ..
         disabled={disabled || entry.isLeast}
         onStep={entry.step}
       />
-      <span className="flex min-w-0 flex-1 items-baseline justify-center gap-1 self-center px-1">
+      <span className="flex min-w-0 flex-1 items-center">
         <input
           id={id}
           type="text"
@@ -113,7 +124,7 @@ function Stepper({ id, label, entry, suffix, isFaulty, disabled, describedBy, ..
           spellCheck={false}
           value={entry.text}
           disabled={disabled}
-          size={Math.max(5, entry.text.length)}
+          size={6}
           aria-invalid={isFaulty ? true : undefined}
           aria-describedby={describedBy}
           onChange={(event) => entry.onType(event.currentTarget.value)}
@@ -123,9 +134,9 @@ function Stepper({ id, label, entry, suffix, isFaulty, disabled, describedBy, ..
           }}
           onBlur={entry.commit}
           onKeyDown={entry.onKeyDown}
-          className="text-value text-ink disabled:text-ink2 min-w-0 bg-transparent text-right font-semibold outline-none max-[1100px]:text-[25px] pointer-coarse:text-[25px]"
+          className="text-value text-ink disabled:text-ink2 h-full min-w-0 flex-1 bg-transparent pl-2.5 font-semibold outline-none max-[1100px]:pl-0 max-[1100px]:text-center max-[1100px]:text-[25px] pointer-coarse:pl-0 pointer-coarse:text-center pointer-coarse:text-[25px]"
         />
-        {suffix !== '' && <span className="text-small text-ink3">{suffix}</span>}
+        {suffix !== '' && <span className="text-small text-ink3 max-[1100px]:text-data pr-2">{suffix}</span>}
       </span>
       <StepButton label={`More: ${label}`} sign="+" disabled={disabled || entry.isMost} onStep={entry.step} />
     </div>

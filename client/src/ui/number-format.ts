@@ -56,3 +56,7 @@ function printPlain(value: number, digits: number): string {
 function escapeForRegExp(text: string): string {
   return text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');
 }
+
+export const a4Format = plainFormat({ suffix: 'Hz', step: 1, digits: 0, example: '440 or 415' });
+export const temperatureFormat = plainFormat({ suffix: '°C', step: 0.5, digits: 0, example: '24 or 21.5' });
+export const centsFormat = plainFormat({ suffix: 'cents', step: 0.5, digits: 0, example: '5 or 7.5' });
