@@ -1,0 +1,70 @@
+import { useEffect, useState } from 'react';
+import { useForm } from 'react-hook-form';
+import { onSessionExpired } from '../../lib/api-client.ts';
+import { useSession } from '../../lib/session.ts';
+import { Button } from '../../ui/Button.tsx';
+import { Dialog, DialogActions } from '../../ui/Dialog.tsx';
+import { Field } from '../../ui/Field.tsx';
+import { Problem } from '../../ui/Problem.tsx';
+import { useSignInAgain } from './session.queries.ts';
+
+type Answer = (answer: 'signed-in' | 'given-up') => void;
+
+interface SessionExpiredDialogProps {
+  /** The person would rather stop here: leads to the sign-in. */
+  onGiveUp: () => void;
+}
+
+/** Asks for the password over the page when the sign-in has run out; whatever was being sent is then sent again. */
+export function SessionExpiredDialog({ onGiveUp }: SessionExpiredDialogProps) {
+  const { person, workshop } = useSession();
+  const [answer, setAnswer] = useState<{ give: Answer } | null>(null);
+  useEffect(() => onSessionExpired(() => new Promise((give) => setAnswer({ give }))), []);
+
+  const handleAnswer: Answer = (given) => {
+    answer?.give(given);
+    setAnswer(null);
+    if (given === 'given-up') onGiveUp();
+  };
+
+  return (
+    <Dialog
+      title="Your sign-in has run out"
+      description={`Everything on this page is kept. Type the password of ${person.email} at ${workshop.name}, and it goes on where it was.`}
+      open={answer !== null}
+      onOpenChange={() => undefined}
+      dismissible={false}
+    >
+      <PasswordForm email={person.email} onAnswer={handleAnswer} />
+    </Dialog>
+  );
+}
+
+function PasswordForm({ email, onAnswer }: { email: string; onAnswer: Answer }) {
+  const { register, handleSubmit, formState } = useForm({ defaultValues: { password: '' } });
+  const signIn = useSignInAgain();
+  const handleSignIn = handleSubmit(({ password }) =>
+    signIn.mutate({ email, password }, { onSuccess: () => onAnswer('signed-in') }),
+  );
+  return (
+    <form noValidate onSubmit={(event) => void handleSignIn(event)} className="grid gap-4">
+      <input type="hidden" autoComplete="username" value={email} readOnly />
+      <Field
+        label="Password"
+        type="password"
+        autoComplete="current-password"
+        {...register('password', { required: 'Type the password.' })}
+        error={formState.errors.password?.message}
+      />
+      <Problem error={signIn.error} />
+      <DialogActions>
+        <Button look="quiet" onClick={() => onAnswer('given-up')}>
+          Leave this page
+        </Button>
+        <Button type="submit" look="go" disabled={signIn.isPending}>
+          {signIn.isPending ? 'Signing in…' : 'Sign in and go on'}
+        </Button>
+      </DialogActions>
+    </form>
+  );
+}
