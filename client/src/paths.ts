@@ -23,6 +23,6 @@ export const patterns = {
   workbench: '/designs/:id/r/:rev/:panel',
 } as const;
 
-export function isWorkbenchPanel(text: string | undefined): text is WorkbenchPanel {
+export function isWorkbenchPanel(text: string | null | undefined): text is WorkbenchPanel {
   return WORKBENCH_PANELS.some((panel) => panel === text);
 }

@@ -4,7 +4,7 @@ import type { ReactNode } from 'react';
 interface DialogProps {
   title: string;
   /** One or two sentences under the title; read out with it. */
-  description?: ReactNode;
+  description?: ReactNode | undefined;
   open: boolean;
   onOpenChange: (open: boolean) => void;
   /** False for what has to be answered before work goes on. */

@@ -32,7 +32,7 @@ export function TopBar({ home, links, title, right }: TopBarProps) {
         Borewright
       </Link>
       <nav aria-label="Main" className="max-bar:hidden h-full">
-        <ul className="-ml-3.5 flex h-full">
+        <ul className="flex h-full">
           {links.map((link) => (
             <li key={link.to} className="h-full">
               <NavLink to={link.to} className={barLinkLook}>

@@ -1,0 +1,109 @@
+import type { QueryClient } from '@tanstack/react-query';
+import { createBrowserRouter, Outlet, redirect, type RouteObject } from 'react-router';
+import { signedInLoader } from './lib/signed-in-loader.ts';
+import { AppFrame } from './pages/AppFrame.tsx';
+import { NotFoundPage } from './pages/NotFoundPage.tsx';
+import { PlainFrame } from './pages/PlainFrame.tsx';
+import { RouteError } from './pages/RouteError.tsx';
+import { paths, patterns } from './paths.ts';
+
+/** Every screen, fetched when it is first opened. */
+export function createRouter(queryClient: QueryClient) {
+  return createBrowserRouter([
+    {
+      // Until the first page knows its data an empty bench stands there, not a spinner.
+      hydrateFallbackElement: <PlainFrame>{null}</PlainFrame>,
+      errorElement: (
+        <PlainFrame>
+          <RouteError />
+        </PlainFrame>
+      ),
+      children: [
+        { path: paths.home(), loader: () => redirect(paths.today()) },
+        ...openRoutes(),
+        {
+          element: <AppFrame />,
+          loader: signedInLoader(queryClient),
+          shouldRevalidate: () => false,
+          children: [
+            { element: <Outlet />, errorElement: <RouteError />, children: signedInRoutes(queryClient) },
+          ],
+        },
+        { path: '*', element: <NotFoundPage /> },
+      ],
+    },
+  ]);
+}
+
+function openRoutes(): RouteObject[] {
+  return [
+    {
+      path: paths.signIn(),
+      lazy: async () => ({ Component: (await import('./pages/SignInPage.tsx')).SignInPage }),
+    },
+    {
+      path: paths.start(),
+      lazy: async () => ({ Component: (await import('./pages/StartPage.tsx')).StartPage }),
+    },
+  ];
+}
+
+function signedInRoutes(queryClient: QueryClient): RouteObject[] {
+  return [...designRoutes(queryClient), ...settingsRoutes(queryClient)];
+}
+
+function designRoutes(queryClient: QueryClient): RouteObject[] {
+  return [
+    {
+      path: paths.today(),
+      handle: { name: 'Today' },
+      lazy: async () => {
+        const { TodayPage, todayLoader } = await import('./pages/TodayPage.tsx');
+        return { Component: TodayPage, loader: todayLoader(queryClient) };
+      },
+    },
+    {
+      path: paths.designs(),
+      handle: { name: 'Designs' },
+      lazy: async () => {
+        const { DesignsPage, designsLoader } = await import('./pages/DesignsPage.tsx');
+        return { Component: DesignsPage, loader: designsLoader(queryClient) };
+      },
+    },
+    {
+      path: patterns.design,
+      lazy: async () => ({ loader: (await import('./pages/design-gate.ts')).designGate(queryClient) }),
+    },
+  ];
+}
+
+function settingsRoutes(queryClient: QueryClient): RouteObject[] {
+  return [
+    {
+      path: paths.account(),
+      handle: { name: 'Account' },
+      lazy: async () => {
+        const { AccountPage, accountLoader } = await import('./pages/AccountPage.tsx');
+        return { Component: AccountPage, loader: accountLoader(queryClient) };
+      },
+    },
+    {
+      path: paths.workshopMembers(),
+      handle: { name: 'Members and roles' },
+      lazy: async () => {
+        const { WorkshopMembersPage, workshopMembersLoader } =
+          await import('./pages/WorkshopMembersPage.tsx');
+        return { Component: WorkshopMembersPage, loader: workshopMembersLoader(queryClient) };
+      },
+    },
+    {
+      path: paths.workshopDefaults(),
+      handle: { name: 'Defaults' },
+      lazy: async () => {
+        const { WorkshopDefaultsPage, workshopDefaultsLoader } =
+          await import('./pages/WorkshopDefaultsPage.tsx');
+        return { Component: WorkshopDefaultsPage, loader: workshopDefaultsLoader(queryClient) };
+      },
+    },
+  ];
+}
