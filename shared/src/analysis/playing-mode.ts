@@ -13,7 +13,11 @@ function opensBeyond(column: Column, states: readonly HoleState[]): boolean {
 }
 
 /** Open–open and closed–closed columns, and closed cones, sound 1:2:3…; open–closed ones 1:3:5…. */
-export function ladderMultiples(column: Column, states: readonly HoleState[], maxima: boolean): LadderMultiples {
+export function ladderMultiples(
+  column: Column,
+  states: readonly HoleState[],
+  maxima: boolean,
+): LadderMultiples {
   const open = opensBeyond(column, states);
   if (!maxima) return open ? 'all' : 'odd';
   const mouth = column.bore[0]?.radius ?? NaN;

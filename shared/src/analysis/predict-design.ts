@@ -1,4 +1,3 @@
-import { prepareColumn } from '../acoustics/response/prepared-column.ts';
 import { findResonances, type Resonance } from '../acoustics/response/resonances.ts';
 import type { DesignDocument, Fingering } from '../document/design-document.ts';
 import { beatsBetween, centsBetween, frequencyAbove } from '../music/cents.ts';
@@ -8,7 +7,8 @@ import { ladderMultiples, playingResonance, ventCount } from './playing-mode.ts'
 import { ladderOf } from './ladder.ts';
 import { openHoleCutoffHz } from './open-hole-cutoff.ts';
 import type { DesignPrediction, FingeringPrediction } from './prediction.ts';
-import { toColumn, type DesignColumn } from './to-column.ts';
+import { prepareDesign } from './prepare-design.ts';
+import type { DesignColumn } from './to-column.ts';
 
 /** Modes of a ladder when nothing else is asked for. */
 const LADDER_MODES = 6;
@@ -28,8 +28,7 @@ export interface PredictionOptions {
  */
 export function predictDesign(document: DesignDocument, options: PredictionOptions = {}): DesignPrediction {
   const { modes = LADDER_MODES, coupling = true } = options;
-  const design = toColumn(document);
-  const { prepared, fingerings } = prepareColumn(design.column, design.states);
+  const { design, prepared, fingerings } = prepareDesign(document);
   const maxima = prepared.playsMaxima;
   const highest = Math.max(...document.fingerings.map((fingering) => fingering.register), 1);
   const count = Math.max(modes, highest + 1);
@@ -52,7 +51,10 @@ interface FingeringQuestion {
   modes: number;
 }
 
-function predictFingering(question: FingeringQuestion, resonances: readonly Resonance[]): FingeringPrediction {
+function predictFingering(
+  question: FingeringQuestion,
+  resonances: readonly Resonance[],
+): FingeringPrediction {
   const { document, design, fingering, index, maxima, modes } = question;
   const states = design.states[index] ?? [];
   const targetHz = targetFrequencyHz(document, fingering);
