@@ -27,17 +27,20 @@ function meaning(error: unknown): HttpError {
   if (error instanceof HttpError) return error;
   // A path such as /api/designs/%E0%A4%A that Express cannot decode.
   if (error instanceof URIError) return badRequest('This address cannot be read.');
-  if (error instanceof ConnectionError || isLockTimeout(error)) return noDatabase();
+  if (error instanceof ConnectionError || isPassing(error)) return noDatabase();
   return new HttpError(500, 'internal', 'Something broke here', {
     detail:
       'The workshop could not do this. Nothing was changed. Try again; if it stays, report the request id.',
   });
 }
 
-function isLockTimeout(error: unknown): boolean {
+const PASSING_CODES = new Set(['ER_LOCK_DEADLOCK', 'ER_LOCK_WAIT_TIMEOUT']);
+
+/** A lock that was not to be had, or a connection that broke: the same request may do better in a moment. */
+function isPassing(error: unknown): boolean {
   if (!(error instanceof DatabaseError)) return false;
-  const { parent } = error;
-  return 'code' in parent && (parent.code === 'ER_LOCK_DEADLOCK' || parent.code === 'ER_LOCK_WAIT_TIMEOUT');
+  const { code, fatal } = error.parent as { code?: string; fatal?: boolean };
+  return fatal === true || (code !== undefined && PASSING_CODES.has(code));
 }
 
 function noDatabase(): HttpError {

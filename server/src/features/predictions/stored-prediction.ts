@@ -19,23 +19,28 @@ export async function readPrediction(scope: WorkshopScope, designId: number): Pr
 /** Predicts what is stored, never what a client sends: the answer belongs to a version of the draft. */
 export async function predictStoredDraft(scope: WorkshopScope, designId: number): Promise<StoredPrediction> {
   await scope.visibleDesign(designId);
-  await scope.inTransaction(async (within) => {
-    // Locked, so that a save in the same moment cannot be given the older draft's prediction.
-    const draft = await within.drafts.findOne({ where: { designId }, lock: true });
-    if (draft === null) throw notFound();
-    const document = storedDocument(draft.document);
-    const prediction = predictDocument(document);
-    await within.predictions.put({
-      designId,
-      draftVersion: draft.version,
+  // Someone may save while we compute; then the figures are of an older version, and we begin again.
+  while (!(await predictNewest(scope, designId)));
+  return readPrediction(scope, designId);
+}
+
+/** Returns whether the version that was predicted was still the newest when its figures were stored. */
+async function predictNewest(scope: WorkshopScope, designId: number): Promise<boolean> {
+  const draft = await scope.drafts.findOne({ where: { designId } });
+  if (draft === null) throw notFound();
+  const document = storedDocument(draft.document);
+  const prediction = predictDocument(document);
+  const changed = await scope.predictions.update(
+    {
       engine: prediction.engine,
       documentHash: documentHash(document),
       prediction: JSON.stringify(prediction),
       sensitivities: JSON.stringify(sensitivitiesOf(document)),
       computedAt: new Date(),
-    });
-  });
-  return readPrediction(scope, designId);
+    },
+    { where: { designId, draftVersion: draft.version } },
+  );
+  return changed > 0;
 }
 
 function presentPrediction(row: PredictionRow): StoredPrediction {
