@@ -7,7 +7,7 @@ import { ladderMultiples, playingResonance, ventCount } from './playing-mode.ts'
 import { ladderOf } from './ladder.ts';
 import { openHoleCutoffHz } from './open-hole-cutoff.ts';
 import type { DesignPrediction, FingeringPrediction } from './prediction.ts';
-import { prepareDesign } from './prepare-design.ts';
+import { prepareDesign, type PreparedDesign } from './prepare-design.ts';
 import type { DesignColumn } from './to-column.ts';
 
 /** Modes of a ladder when nothing else is asked for. */
@@ -27,8 +27,15 @@ export interface PredictionOptions {
  * answers.
  */
 export function predictDesign(document: DesignDocument, options: PredictionOptions = {}): DesignPrediction {
-  const { modes = LADDER_MODES, coupling = true } = options;
-  const { design, prepared, fingerings } = prepareDesign(document);
+  return predictPrepared(document, prepareDesign(document), options);
+}
+
+/** The same for a design that is prepared already. */
+export function predictPrepared(
+  document: DesignDocument,
+  { design, prepared, fingerings }: PreparedDesign,
+  { modes = LADDER_MODES, coupling = true }: PredictionOptions,
+): DesignPrediction {
   const maxima = prepared.playsMaxima;
   const highest = Math.max(...document.fingerings.map((fingering) => fingering.register), 1);
   const count = Math.max(modes, highest + 1);
