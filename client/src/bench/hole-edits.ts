@@ -1,6 +1,6 @@
 import type { DesignDocument, Fingering, ToneHole } from '#shared/document/design-document.ts';
 import { WIDEST_HOLE_SHARE } from '#shared/document/document-faults.ts';
-import { boreEnds, diameterAt } from '#shared/document/profile.ts';
+import { boreEnds, chimneyMm, diameterAt } from '#shared/document/profile.ts';
 
 /** Widest hole that the bore there allows, mm, on a tenth. */
 export function widestHoleMm(document: DesignDocument, positionMm: number): number {
@@ -97,4 +97,13 @@ export function roomiestPosition(document: DesignDocument): number {
   const gaps = places.slice(1).map((end, index) => ({ start: places[index] ?? 0, end }));
   const longest = gaps.reduce((best, gap) => (gap.end - gap.start > best.end - best.start ? gap : best));
   return snapPosition(document, (longest.start + longest.end) / 2);
+}
+
+/** Undercut to a diameter at the bore; back to the hole's own diameter takes it away. */
+export function withUndercut(document: DesignDocument, id: string, innerDiameterMm: number): DesignDocument {
+  const hole = document.holes.find((other) => other.id === id);
+  if (hole === undefined) return document;
+  if (innerDiameterMm <= hole.diameterMm + 1e-6) return changeHole(document, id, { undercut: null });
+  const depthMm = hole.undercut?.depthMm ?? Math.round(chimneyMm(document, hole) * 5) / 10;
+  return changeHole(document, id, { undercut: { innerDiameterMm, depthMm } });
 }

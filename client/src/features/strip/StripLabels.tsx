@@ -1,17 +1,9 @@
-import type { DesignDocument, MouthEndKind } from '#shared/document/design-document.ts';
+import type { DesignDocument } from '#shared/document/design-document.ts';
 import { fromFootMm } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import type { BenchColumn, BenchGeometry } from '../../bench/bench-geometry.ts';
-
-const MOUTH_WORDS: Record<MouthEndKind, string> = {
-  window: 'window',
-  embouchure: 'embouchure hole',
-  rim: 'rim',
-  reed: 'reed',
-  'ideal-open': 'open end',
-  'ideal-closed': 'closed end',
-};
+import { MOUTH_WORDS } from '../../bench/mouth-words.ts';
 
 interface StripLabelsProps {
   geometry: BenchGeometry;

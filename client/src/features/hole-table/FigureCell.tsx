@@ -1,0 +1,63 @@
+import type { LengthUnit } from '#shared/lengths/read-length.ts';
+import { classNames } from '../../ui/class-names.ts';
+import { lengthFormat } from '../../ui/length-format.ts';
+import { plainFormat } from '../../ui/number-format.ts';
+import { useNumberEntry } from '../../ui/use-number-entry.ts';
+
+interface FigureCellProps {
+  label: string;
+  kind: 'length' | 'angle';
+  value: number;
+  min: number;
+  max: number;
+  unit: LengthUnit;
+  isQuiet: boolean;
+  isChosen: boolean;
+  canEdit: boolean;
+  onFocus: () => void;
+  onChange: (value: number) => void;
+}
+
+const FORMATS = { mm: lengthFormat('mm'), inch: lengthFormat('inch') };
+const ANGLE = plainFormat({ suffix: 'deg', step: 1, digits: 0, example: '15 or −30' });
+
+/** A size in the table that is typed over in place; what cannot be taken is said under it. */
+export function FigureCell(props: FigureCellProps) {
+  const { label, kind, value, min, max, unit, isQuiet, isChosen, canEdit, onFocus, onChange } = props;
+  const format = kind === 'length' ? FORMATS[unit] : ANGLE;
+  const entry = useNumberEntry({ value, format, min, max, onChange });
+  const look = isChosen ? 'font-bold text-ink' : isQuiet ? 'text-ink3' : 'text-ink';
+  if (!canEdit) return <span className={look}>{format.print(value)}</span>;
+  return (
+    <>
+      <input
+        type="text"
+        aria-label={label}
+        aria-invalid={entry.complaint === null ? undefined : true}
+        autoComplete="off"
+        spellCheck={false}
+        value={entry.text}
+        onChange={(event) => entry.onType(event.currentTarget.value)}
+        onFocus={(event) => {
+          event.currentTarget.select();
+          onFocus();
+        }}
+        onBlur={entry.commit}
+        onKeyDown={entry.onKeyDown}
+        className={classNames(
+          'rounded-chip hover:border-line focus:bg-sheet w-full border border-transparent bg-transparent text-center outline-offset-0',
+          'aria-invalid:border-stop h-[calc(100%-2px)]',
+          look,
+        )}
+      />
+      {entry.complaint !== null && (
+        <span
+          role="alert"
+          className="bg-sheet border-stop text-small text-stop rounded-chip shadow-pop absolute top-full left-1/2 z-20 w-44 -translate-x-1/2 border p-1.5 text-left font-semibold"
+        >
+          {entry.complaint}
+        </span>
+      )}
+    </>
+  );
+}

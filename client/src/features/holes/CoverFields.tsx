@@ -1,0 +1,63 @@
+import { useId } from 'react';
+import { COVERS, type ToneHole } from '#shared/document/design-document.ts';
+import type { DesignEdit } from '../../bench/panel-props.ts';
+import { changeHole } from '../../bench/hole-edits.ts';
+import { COVER_WORDS, HAND_WORDS, withCover } from './inspector-fields.ts';
+
+interface CoverFieldsProps {
+  hole: ToneHole;
+  title: string;
+  disabled: boolean;
+  onEdit: (edit: DesignEdit) => void;
+}
+
+const SELECT =
+  'border-line bg-sheet rounded-control text-data disabled:border-hair h-8 min-w-0 border px-2 disabled:bg-transparent max-[1279px]:h-12';
+
+/** What covers the hole, and which hand. */
+export function CoverFields({ hole, title, disabled, onEdit }: CoverFieldsProps) {
+  const id = useId();
+  return (
+    <div className="border-hair flex items-center gap-2 border-t py-2">
+      <label htmlFor={id} className="w-19 shrink-0">
+        Covered by
+      </label>
+      <select
+        id={id}
+        disabled={disabled}
+        value={hole.cover}
+        className={SELECT}
+        onChange={(event) => {
+          const cover = COVERS.find((each) => each === event.currentTarget.value);
+          if (cover === undefined) return;
+          onEdit({
+            label: `Cover of ${title.toLowerCase()}`,
+            change: (before) => withCover(before, hole, cover),
+          });
+        }}
+      >
+        {COVERS.map((cover) => (
+          <option key={cover} value={cover}>
+            {COVER_WORDS[cover]}
+          </option>
+        ))}
+      </select>
+      <select
+        aria-label="Hand"
+        disabled={disabled}
+        value={hole.hand}
+        className={SELECT}
+        onChange={(event) => {
+          const hand = event.currentTarget.value === 'right' ? 'right' : 'left';
+          onEdit({
+            label: `Hand of ${title.toLowerCase()}`,
+            change: (before) => changeHole(before, hole.id, { hand }),
+          });
+        }}
+      >
+        <option value="left">{HAND_WORDS.left}</option>
+        <option value="right">{HAND_WORDS.right}</option>
+      </select>
+    </div>
+  );
+}
