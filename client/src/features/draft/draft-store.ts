@@ -7,7 +7,8 @@ import type { CopyPlace, DeviceCopies, DeviceCopy } from './device-copy.ts';
 import { isSameDocument } from './document-changes.ts';
 import type { DraftApi } from './draft-api.ts';
 import { redone, sealed, startHistory, undone, withEdit, type DraftHistory } from './draft-history.ts';
-import type { PredictionEngine, PredictionOptions } from './prediction-engine.ts';
+import type { PredictionOptions } from '../../engine/engine-answers.ts';
+import type { PredictionEngine } from './prediction-engine.ts';
 import { Predictor, type PredictorState } from './predictor.ts';
 
 export interface OpenDraft {

@@ -1,18 +1,20 @@
-import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/prediction.ts';
+import type { DesignSensitivities } from '#shared/analysis/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import type { DocumentFault } from '#shared/document/document-faults.ts';
+import type { EngineAnswer, PredictionOptions } from '../../engine/engine-answers.ts';
+import { startEngine } from '../../engine/start-engine.ts';
 
-export interface PredictionOptions {
-  /** Whether openings feel each other's radiation. */
-  coupling: boolean;
-}
-
-export type EngineAnswer =
-  { status: 'predicted'; prediction: DesignPrediction } | { status: 'failed'; faults: DocumentFault[] };
-
-/** The engine as the bench asks it, wherever it runs. */
+/** The engine as a draft asks it, wherever it runs. */
 export interface PredictionEngine {
   predict: (document: DesignDocument, options: PredictionOptions) => Promise<EngineAnswer>;
-  sensitivities: (document: DesignDocument, options: PredictionOptions) => Promise<DesignSensitivities>;
+  sensitivities: (document: DesignDocument) => Promise<DesignSensitivities>;
   close: () => void;
+}
+
+export function startPredictionEngine(): PredictionEngine {
+  const { remote, close } = startEngine('prediction');
+  return {
+    predict: (document, options) => remote.predict(document, options),
+    sensitivities: (document) => remote.sensitivities(document),
+    close,
+  };
 }

@@ -2,7 +2,8 @@ import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { whistleDocument } from '../../../../tests/support/whistle-document.ts';
-import type { EngineAnswer, PredictionEngine } from './prediction-engine.ts';
+import type { EngineAnswer } from '../../engine/engine-answers.ts';
+import type { PredictionEngine } from './prediction-engine.ts';
 import { Predictor } from './predictor.ts';
 
 const named = (name: string) => whistleDocument({ name });

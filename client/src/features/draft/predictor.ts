@@ -2,7 +2,8 @@ import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/pre
 import type { StoredPrediction } from '#shared/contract/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import type { DocumentFault } from '#shared/document/document-faults.ts';
-import type { PredictionEngine, PredictionOptions } from './prediction-engine.ts';
+import type { PredictionOptions } from '../../engine/engine-answers.ts';
+import type { PredictionEngine } from './prediction-engine.ts';
 import { largestDifferenceCents } from './prediction-difference.ts';
 
 /** Figures, and the document they belong to: never to be shown beside another one. */
@@ -127,11 +128,11 @@ export class Predictor {
   }
 
   private async refine(): Promise<void> {
-    const { figures, options } = this.state;
+    const { figures } = this.state;
     if (figures?.sensitivities !== null || this.busy) return;
     this.busy = true;
     try {
-      const sensitivities = await this.engine.sensitivities(figures.of, options);
+      const sensitivities = await this.engine.sensitivities(figures.of);
       if (this.isClosed() || this.state.figures !== figures) return;
       this.state = { ...this.state, figures: { ...figures, sensitivities } };
       this.onChange();

@@ -1,0 +1,41 @@
+import type { DesignPrediction, ImpedanceCurve } from '#shared/analysis/prediction.ts';
+import type { DesignDocument } from '#shared/document/design-document.ts';
+import type { DocumentFault } from '#shared/document/document-faults.ts';
+import type { WiderHere } from './wider-here.ts';
+
+export interface PredictionOptions {
+  /** Whether openings feel each other's radiation. */
+  coupling: boolean;
+}
+
+export type EngineAnswer =
+  { status: 'predicted'; prediction: DesignPrediction } | { status: 'failed'; faults: DocumentFault[] };
+
+/** Pressure along the bore at one resonance; 1 is the most in the bore. */
+export interface Ribbon {
+  mode: number;
+  frequencyHz: number;
+  points: { positionMm: number; pressure: number }[];
+}
+
+/** What a panel wants to know beyond the prediction, and what it gets. */
+export interface Studies {
+  'wider-here': {
+    ask: { document: DesignDocument; fingerings: readonly string[] };
+    answer: WiderHere[];
+  };
+  impedance: {
+    ask: { document: DesignDocument; fingering: string; toHz: number };
+    answer: ImpedanceCurve;
+  };
+  ribbons: {
+    ask: {
+      document: DesignDocument;
+      fingering: string;
+      resonances: readonly { mode: number; frequencyHz: number }[];
+    };
+    answer: Ribbon[];
+  };
+}
+
+export type StudyKind = keyof Studies;
