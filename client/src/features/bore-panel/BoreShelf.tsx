@@ -1,0 +1,139 @@
+import { useMemo, useState } from 'react';
+import { printLength } from '#shared/lengths/print-length.ts';
+import { fromFootMm } from '#shared/document/profile.ts';
+import type { PanelProps } from '../../bench/panel-props.ts';
+import { BoreKnot } from './BoreKnot.tsx';
+import { moveStation } from './bore-edits.ts';
+import { ShelfCaption } from './ShelfCaption.tsx';
+import { SHELF, shelfScale, timesWider, type ShelfScale } from './shelf-scale.ts';
+import { SpanLines } from './SpanLines.tsx';
+import { WiderCurves } from './WiderCurves.tsx';
+
+interface BoreShelfProps extends PanelProps {
+  chosen: number | null;
+  onChoose: (index: number) => void;
+}
+
+/** More knots than this are drawn small; only the chosen one is at full size. */
+const MANY_STATIONS = 40;
+/** Captions stand beside the drawing where the bore leaves so much room at the left, px. */
+const ROOM_FOR_CAPTIONS = 150;
+
+/** The bore's wall, drawn many times wider than true, with a knot at every station; below it, what a wider place does. */
+export function BoreShelf(props: BoreShelfProps) {
+  const { document, geometry, unit, chosen, onChoose, onEdit, readOnly } = props;
+  const { stations } = document.bore;
+  // While a knot is dragged the scale stands still, or the knot would run away from the hand.
+  const [held, setHeld] = useState<ShelfScale | null>(null);
+  const fitted = useMemo(() => shelfScale(stations), [stations]);
+  const scale = held ?? fitted;
+  const line = stations
+    .map(
+      ({ positionMm, diameterMm }) =>
+        `${geometry.x(positionMm).toFixed(1)} ${scale.y(diameterMm).toFixed(1)}`,
+    )
+    .join('L');
+  const [left, right] = [
+    geometry.x(stations[0]?.positionMm ?? 0),
+    geometry.x(stations.at(-1)?.positionMm ?? 0),
+  ];
+  const isBeside = left >= ROOM_FOR_CAPTIONS;
+  return (
+    <svg
+      width={geometry.widthPx}
+      height={SHELF.height}
+      role="group"
+      aria-label="Bore, drawn wider than true"
+      className="border-hair block border-b"
+    >
+      <DropLines {...props} />
+      <g aria-hidden="true">
+        <path d={`M${left} ${SHELF.woodY}L${line}L${right} ${SHELF.woodY}Z`} className="bore-wood" />
+        <WidthGrid scale={scale} unit={unit} from={left} to={right} isBeside={isBeside} />
+        <path d={`M${line}`} className="bore-line" />
+        <ShelfCaption
+          isBeside={isBeside}
+          y={20}
+          title="Bore wall"
+          lines={[
+            'wood above, air below',
+            `${timesWider(scale, geometry.pxPerMm)} times wider`,
+            'than it is long',
+          ]}
+        />
+        <SpanLines stations={stations} geometry={geometry} unit={unit} isLabelled={isBeside} />
+      </g>
+      {stations.map((station, index) => (
+        <BoreKnot
+          // Stations have no name of their own; their order is what they are.
+          key={index}
+          station={station}
+          x={geometry.x(station.positionMm)}
+          y={scale.y(station.diameterMm)}
+          size={stations.length > MANY_STATIONS && index !== chosen ? 5 : 11}
+          name={`Station ${index + 1}, ${printLength(fromFootMm(document, station.positionMm), unit)} from foot, ${printLength(station.diameterMm, unit, 2)} wide`}
+          figure={printLength(station.diameterMm, unit, unit === 'mm' ? 2 : 3)}
+          isChosen={index === chosen}
+          readOnly={readOnly !== null}
+          onChoose={() => onChoose(index)}
+          onStep={(by) => onChoose(Math.max(0, Math.min(stations.length - 1, index + by)))}
+          onHold={(isHeld) => setHeld(isHeld ? fitted : null)}
+          toStation={(x, y) => ({ positionMm: geometry.mm(x), diameterMm: scale.diameterMm(y) })}
+          onMove={(to, gesture) =>
+            onEdit({
+              label: `Move station ${index + 1}`,
+              change: (before) => moveStation(before, 'bore', index, to),
+              mergeKey: `bore.stations.${index}.${gesture}`,
+            })
+          }
+        />
+      ))}
+      <WiderCurves {...props} isBeside={isBeside} />
+    </svg>
+  );
+}
+
+function DropLines({ document, geometry, selection }: PanelProps) {
+  return (
+    <g aria-hidden="true">
+      {document.holes.map(({ id, positionMm }) => {
+        const x = geometry.x(positionMm);
+        return x < geometry.viewLeft || x > geometry.viewRight ? null : (
+          <line
+            key={id}
+            x1={x}
+            x2={x}
+            y2={SHELF.height}
+            className={id === selection.hole ? 'bench-drop is-chosen' : 'bench-drop'}
+          />
+        );
+      })}
+    </g>
+  );
+}
+
+interface WidthGridProps {
+  scale: ShelfScale;
+  unit: PanelProps['unit'];
+  from: number;
+  to: number;
+  isBeside: boolean;
+}
+
+function WidthGrid({ scale, unit, from, to, isBeside }: WidthGridProps) {
+  const [first = 0, second = first + 1] = scale.ticks;
+  const digits = unit === 'inch' ? 3 : second - first < 0.099 ? 2 : 1;
+  return scale.ticks.map((mm) => (
+    <g key={mm}>
+      <line x1={from} x2={to} y1={scale.y(mm)} y2={scale.y(mm)} className="bore-grid" />
+      <text
+        x={isBeside ? 144 : to - 12}
+        y={scale.y(mm) + 4}
+        textAnchor="end"
+        className="bench-quiet-label bore-haloed"
+      >
+        {printLength(mm, unit, digits)}
+      </text>
+    </g>
+  ));
+}
