@@ -11,7 +11,9 @@ import { filledWidths, tableSection, type HeadCell, type TableCell } from './tab
 const NOTHING = '–';
 const ROW_MM = 11;
 
-const SHARES = [11, 14.4, 12.6, 8.4, 9.2, 9.2, 15.4, 8.4, 14.4, 9.4, 12, 9, 9.6, 12.6, 9, 10.6, 10.2];
+/** Columns from left to right; figures in inches are longer, and so are those with a second unit in brackets. */
+const SHARES_MM = [10, 15.4, 12.6, 8.4, 9, 9, 15, 8.4, 14.4, 9.4, 12, 8.6, 9.4, 12.4, 8.8, 10, 9.6];
+const SHARES_LONG = [9.4, 15.4, 12.6, 9.6, 11, 11, 14.4, 9.6, 14.2, 11, 12.4, 8.4, 9.4, 12.2, 8.4, 9.6, 9];
 
 /** Every hole in drilling order, from the foot upward, with two boxes to write in. */
 export function holeTableSection(context: SheetContext): FlowSection {
@@ -20,7 +22,7 @@ export function holeTableSection(context: SheetContext): FlowSection {
   return tableSection(context, {
     caption: 'Holes, in drilling order',
     note: `positions from the ${referenceName(input.document, referenceEnd)} to the centre of the hole; angles clockwise, seen from the foot`,
-    widthsMm: filledWidths(context, SHARES),
+    widthsMm: filledWidths(context, context.writing.besides === 'nothing' ? SHARES_MM : SHARES_LONG),
     head: holeHead(input.workshop.referenceEnd),
     headRowMm: 4.8,
     rowMm: ROW_MM,

@@ -89,6 +89,8 @@ function wordRows(heightMm: number): number[] {
   const isNarrow = heightMm < ROWS_APART_MM;
   const first = isNarrow ? NARROW_ROW_MM.first : FIRST_ROW_MM;
   const last = heightMm - (isNarrow ? NARROW_ROW_MM.last : LAST_ROW_MM);
-  const gaps = Math.max(1, Math.floor((last - first) / ROWS_APART_MM));
+  const room = Math.max(1, Math.floor((last - first) / ROWS_APART_MM));
+  // An even count of rows leaves the middle to the holes on the centre line.
+  const gaps = room % 2 === 0 ? room - 1 : room;
   return Array.from({ length: gaps + 1 }, (_, row) => first + ((last - first) * row) / gaps);
 }

@@ -9,10 +9,14 @@ import { tagged } from './tagging.ts';
 import { benchReading } from './template-frame.ts';
 import { outsideRadiusMm, seamEdge, turnedAngle } from './template-geometry.ts';
 
-const HEIGHT_MM = 30;
+const HEIGHT_MM = 33;
+
+/** Room for one figure in a row of them. */
+const FIGURE_MM = 9.4;
+
 const MIDDLE_MM = 12.5;
 const NUMBERS_MM = 4;
-const POSITIONS_MM = 24;
+const POSITIONS_MM = 22.6;
 const BODY_LINE = { widthMm: 0.27 };
 const LEADER = { widthMm: HAIRLINE_MM };
 const SMALL = { size: 8 } as const;
@@ -131,8 +135,9 @@ function drawHoles(context: SheetContext, scale: OutlineScale, topMm: number): v
   const reading = benchReading(context);
   const holes = numberedHoles(document).map((entry) => ({ ...entry, x: scale.x(entry.hole.positionMm) }));
   const xs = holes.map(({ x }) => x);
-  const numberXs = spreadOut(xs, 4.6);
-  const positionXs = spreadOut(xs, 9.4);
+  const ends = { fromMm: MARGIN_MM, toMm: pen.paper.widthMm - MARGIN_MM };
+  const numberXs = spreadOut(xs, { ...ends, roomMm: 4.6 });
+  const figures = positionPlaces(xs, ends);
   const middleY = topMm + MIDDLE_MM;
   holes.forEach(({ hole, number, x }, index) => {
     const angle = (turnedAngle(hole.angleDeg) * Math.PI) / 180;
@@ -143,16 +148,17 @@ function drawHoles(context: SheetContext, scale: OutlineScale, topMm: number): v
     else pen.fillCircle([x, y], radiusMm);
     const numberX = numberXs[index] ?? x;
     pen.text(String(number), [numberX, topMm + NUMBERS_MM], { size: 10, weight: 700, align: 'centre' });
-    const positionX = positionXs[index] ?? x;
+    const figure = figures[index] ?? { x, lowerMm: 0 };
+    const figureY = topMm + POSITIONS_MM + figure.lowerMm;
     const from: Point = [x, Math.max(y + radiusMm, middleY) + 1.4];
     pen.stroke(LEADER, (path) =>
       path
         .moveTo(...from)
         .lineTo(x, topMm + POSITIONS_MM - 5.4)
-        .lineTo(positionX, topMm + POSITIONS_MM - 3),
+        .lineTo(figure.x, figureY - 2.6),
     );
     const position = lengthInWords(reading(hole.positionMm), { ...writing, besides: 'nothing' });
-    pen.text(position, [positionX, topMm + POSITIONS_MM], { size: 8.8, align: 'centre' });
+    pen.text(position, [figure.x, figureY], { size: 8.8, align: 'centre' });
   });
 }
 
@@ -168,7 +174,7 @@ function drawEnds(context: SheetContext, scale: OutlineScale, topMm: number): vo
     { alongMm: footMm, name: 'foot' },
   ];
   // Ends stand on a line of their own: the positions of crowded holes may reach under them.
-  const y = topMm + POSITIONS_MM + 3.8;
+  const y = topMm + POSITIONS_MM + 7;
   for (const { alongMm, name } of ends) {
     const x = scale.x(alongMm);
     pen.line([x, topMm + MIDDLE_MM + 1.4], [x, y - 3], LEADER);
@@ -200,10 +206,17 @@ function besideEdge(pen: Pen, words: string, x: number): { align: 'left' | 'cent
   return { align: 'centre', at: x };
 }
 
-/** Moves places in a row apart until each has its room, as little as can be. */
-export function spreadOut(places: readonly number[], roomMm: number): number[] {
+/** Moves places in a row apart until each has its room, as little as can be, and keeps them between two ends. */
+export function spreadOut(
+  places: readonly number[],
+  { roomMm, fromMm, toMm }: { roomMm: number; fromMm: number; toMm: number },
+): number[] {
   const groups: { sum: number; count: number }[] = [];
-  const start = ({ sum, count }: { sum: number; count: number }) => sum / count - ((count - 1) * roomMm) / 2;
+  const start = ({ sum, count }: { sum: number; count: number }) => {
+    const spanMm = (count - 1) * roomMm;
+    const free = sum / count - spanMm / 2;
+    return Math.max(fromMm + roomMm / 2, Math.min(free, toMm - roomMm / 2 - spanMm));
+  };
   for (const place of places) {
     let group = { sum: place, count: 1 };
     let before = groups.at(-1);
@@ -218,4 +231,19 @@ export function spreadOut(places: readonly number[], roomMm: number): number[] {
   return groups.flatMap((group) =>
     Array.from({ length: group.count }, (_, index) => start(group) + index * roomMm),
   );
+}
+
+/** Figures under a crowd of holes stand in two rows, every other one lower. */
+function positionPlaces(xs: readonly number[], ends: { fromMm: number; toMm: number }) {
+  const rows = xs.length * FIGURE_MM > ends.toMm - ends.fromMm - 20 ? 2 : 1;
+  const spread = [0, 1].map((row) =>
+    spreadOut(
+      xs.filter((_, index) => index % rows === row),
+      { ...ends, roomMm: FIGURE_MM },
+    ),
+  );
+  return xs.map((x, index) => ({
+    x: spread[index % rows]?.[Math.floor(index / rows)] ?? x,
+    lowerMm: (index % rows) * 3.3,
+  }));
 }

@@ -17,8 +17,13 @@ export function drawReferenceBar(
   pen.line([x, topMm - 2], [x, bottomMm + 2], REFERENCE_LINE);
   if (!isNamed) return;
   const words = `${referenceName(document, workshop.referenceEnd)}, reference end`;
-  const middle = (topMm + bottomMm) / 2;
   const isAtRight = workshop.referenceEnd === 'foot';
+  if (!isAtRight && alongMm > frame.alongFromMm + 3) {
+    // The bar stands inside the template: its name goes beside it, clear of the opening on the centre line.
+    pen.text(words, [x + 1.4, bottomMm - 12], WORDS);
+    return;
+  }
+  const middle = (topMm + bottomMm) / 2;
   pen.turned([isAtRight ? x + 2.2 : x - 2.2, middle], isAtRight ? 90 : -90, () =>
     pen.text(words, [0, 0], { ...WORDS, align: 'centre' }),
   );

@@ -1,3 +1,4 @@
+import { MM_PER_INCH } from '#shared/lengths/drills.ts';
 import { printInchFraction, printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import type { SheetInput, SheetUnit } from './sheet-input.ts';
@@ -29,9 +30,16 @@ export function writingOf(input: SheetInput): LengthWriting {
 export function writeLength(mm: number, { unit, besides }: LengthWriting): WrittenLength {
   const main = printLength(mm, unit);
   if (besides === 'nothing') return { main, besides: '' };
-  if (besides === 'fraction') return { main, besides: printInchFraction(mm) };
+  if (besides === 'fraction') return { main, besides: nearestFraction(mm) };
   const other = unit === 'mm' ? 'inch' : 'mm';
   return { main, besides: `(${printLength(mm, other)})` };
+}
+
+/** The nearest 64th of an inch, marked when it is not the length itself. */
+function nearestFraction(mm: number): string {
+  const sixtyFourths = (mm / MM_PER_INCH) * 64;
+  const isExact = Math.abs(sixtyFourths - Math.round(sixtyFourths)) < 0.01;
+  return `${isExact ? '' : '~'}${printInchFraction(mm)}`;
 }
 
 /** A diameter: as a length, but to a hundredth of a millimetre where a tenth would round it. */
@@ -45,6 +53,7 @@ export function writeDiameter(mm: number, writing: LengthWriting): WrittenLength
 /** A span or a join within a sentence: without a decimal where there is none to write. */
 export function spanInWords(mm: number, writing: LengthWriting): string {
   const isWhole = Math.abs(mm - Math.round(mm)) < 0.005;
+  if (Math.abs(mm) < 0.005) return '0';
   if (writing.unit === 'inch' || !isWhole) return lengthInWords(mm, writing);
   const main = printLength(mm, 'mm', 0);
   return writing.besides === 'other-unit' ? `${main} (${printLength(mm, 'inch')})` : main;

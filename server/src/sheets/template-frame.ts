@@ -3,8 +3,8 @@ import { benchPositionMm, bodyEnds, type ReferenceEnd } from './bench-position.t
 import { MARGIN_MM } from './paper.ts';
 import { scaleTicks, type ScaleTick } from './scale-ticks.ts';
 import type { SheetContext } from './sheet-context.ts';
-import { halfRoundMm, holeAppearances } from './template-geometry.ts';
-import { ALONG_PAGE, planTiles, type Join, type Tile, type TileRoom } from './tiling.ts';
+import { holeAppearances, seamEdge } from './template-geometry.ts';
+import { ALONG_PAGE, planTiles, type Join, type TileRoom } from './tiling.ts';
 
 /** White to the left of the longest tile, for a ruler or for words, mm. */
 const LEFT_OF_TILE_MM = 20;
@@ -59,23 +59,30 @@ export interface RoundBand {
   joinsMm: number[];
 }
 
-export function roundBands(document: DesignDocument, mostMm: number): RoundBand[] {
-  const halfMm = Math.max(
-    ...document.outside.stations.map((station) => (Math.PI * station.diameterMm) / 2),
-    halfRoundMm(document, bodyEnds(document).toMm),
+/** Most and least that lies above the centre line along a tile, mm. */
+export function halfHeights(
+  document: DesignDocument,
+  frame: TemplateFrame,
+): { leastMm: number; mostMm: number } {
+  const halves = seamEdge(document, { fromMm: frame.alongFromMm, toMm: frame.alongToMm }).map(
+    ({ halfMm }) => halfMm,
   );
+  return { leastMm: Math.min(...halves), mostMm: Math.max(...halves) };
+}
+
+/** The bands of a tile: the whole height where the paper takes it. */
+export function roundBands(document: DesignDocument, frame: TemplateFrame, room: TileRoom): RoundBand[] {
+  const { mostMm } = halfHeights(document, frame);
   const marks = document.holes.flatMap((hole) =>
     holeAppearances(document, hole).map(({ centre, curve }) => ({
-      centreMm: centre.roundMm + halfMm,
+      centreMm: centre.roundMm + mostMm,
       radiusMm: curve.at(0.25).roundMm - centre.roundMm,
     })),
   );
-  const room: TileRoom = { drawnMm: mostMm, overlapMm: 10, clearMm: 8 };
-  const tiles: Tile[] = planTiles(2 * halfMm, marks, room);
-  return tiles.map((tile) => ({
-    lowMm: tile.fromMm - halfMm,
-    highMm: tile.toMm - halfMm,
-    joinsMm: [tile.joinBefore, tile.joinAfter].flatMap((join) => (join === null ? [] : [join.atMm - halfMm])),
+  return planTiles(2 * mostMm, marks, room).map((tile) => ({
+    lowMm: tile.fromMm - mostMm,
+    highMm: tile.toMm - mostMm,
+    joinsMm: [tile.joinBefore, tile.joinAfter].flatMap((join) => (join === null ? [] : [join.atMm - mostMm])),
   }));
 }
 

@@ -20,6 +20,7 @@ import {
   type RoundBand,
   type TemplateFrame,
 } from './template-frame.ts';
+import { ALONG_PAGE } from './tiling.ts';
 import { surfaceExcessMm } from './template-geometry.ts';
 import { SMALL_WORDS, WORDS } from './template-lines.ts';
 import { drawWrapAround } from './wrap-around-template.ts';
@@ -30,28 +31,27 @@ export interface TemplatePage {
   /** null on a page that holds the flat strip alone. */
   band: RoundBand | null;
   hasStrip: boolean;
-  /** Position among the pages of the same length of the body, where it takes several. */
-  sheetOfPart: number;
 }
 
 /** From the top of the contents to the wrap-around, and from one thing to the next, mm. */
-const HEADING_MM = 18;
+const HEADING_MM = 20.5;
 const BELOW_WRAP_MM = 19;
 const BELOW_STRIP_MM = 9;
 const RULER_ROOM_MM = RULER_ABOVE_MM + RULER_BELOW_MM + 6;
 
 export function templatePages(context: SheetContext): TemplatePage[] {
   const { document, workshop } = context.input;
-  const frames = templateFrames(document, workshop.referenceEnd);
   const roomMm = contentBottomMm(context.pen.paper) - CONTENT_TOP_MM - HEADING_MM - RULER_ROOM_MM;
   const stripMm = BELOW_WRAP_MM + stripHeightMm(document) + BELOW_STRIP_MM;
-  const bands = roundBands(document, roomMm - BELOW_STRIP_MM);
-  const [only] = bands;
-  const fitsTogether = bands.length === 1 && only !== undefined && bandHeight(only) + stripMm <= roomMm;
-  return frames.flatMap((frame) => {
-    if (fitsTogether) return [{ frame, band: only, hasStrip: true, sheetOfPart: 1 }];
-    const wraps = bands.map((band, index) => ({ frame, band, hasStrip: false, sheetOfPart: index + 1 }));
-    return [...wraps, { frame, band: null, hasStrip: true, sheetOfPart: bands.length + 1 }];
+  const room = { ...ALONG_PAGE, drawnMm: roomMm - BELOW_STRIP_MM };
+  return templateFrames(document, workshop.referenceEnd).flatMap((frame) => {
+    const bands = roundBands(document, frame, room);
+    const [only] = bands;
+    if (bands.length === 1 && only !== undefined && bandHeight(only) + stripMm <= roomMm) {
+      return [{ frame, band: only, hasStrip: true }];
+    }
+    const wraps = bands.map((band) => ({ frame, band, hasStrip: false }));
+    return [...wraps, { frame, band: null, hasStrip: true }];
   });
 }
 
@@ -78,12 +78,12 @@ export function drawTemplatePage(context: SheetContext, page: TemplatePage, page
   const alt = `Template at full scale, part ${frame.part} of ${frame.parts}; the positions stand in the hole table.`;
   tagged(pen, root, { type: 'Figure', tag: { alt } }, () => {
     if (band !== null) {
-      drawWrapWords(context, frame, { topMm: top, bottomMm: top + bandMm });
+      drawWrapWords(context, frame, { topMm: top, band });
       drawWrapAround(context, { frame, band, centreY: top + band.highMm });
     }
     if (page.hasStrip) {
       const words = 'Flat strip, for holes on the centre line';
-      pen.text(words, [wordsX(frame), stripTop - 1.6], SMALL_WORDS);
+      drawBeside(context, frame, { words, y: stripTop - 1.6, narrowY: stripTop + 4 });
       drawStrip(context, { frame, topMm: stripTop });
     }
   });
@@ -106,16 +106,42 @@ function drawHeading(context: SheetContext, frame: TemplateFrame): void {
 function drawWrapWords(
   context: SheetContext,
   frame: TemplateFrame,
-  { topMm, bottomMm }: { topMm: number; bottomMm: number },
+  { topMm, band }: { topMm: number; band: RoundBand },
 ): void {
   const { pen } = context;
-  const left = wordsX(frame);
-  pen.text(wrapWords(context), [left, topMm - 4.8], SMALL_WORDS);
-  pen.text('seam', [left, topMm - 1.4], SMALL_WORDS);
-  pen.text('seam, meets the other edge', [left, bottomMm + 3.6], SMALL_WORDS);
+  const words = wrapWords(context);
+  drawBeside(context, frame, { words, y: topMm - 9.4, narrowY: topMm + 4 });
+  // A tile too short for words has its neighbours' to go by, and a band's cut is no seam.
+  if (isNarrow(frame) || band.joinsMm.length > 0) return;
+  pen.text('seam', [wordsX(frame), topMm - 1.4], SMALL_WORDS);
+  pen.text('seam, meets the other edge', [wordsX(frame), topMm + bandHeight(band) + 3.6], SMALL_WORDS);
 }
 
-/** Words beside a template begin at its left end, after the ring marks where there are any. */
+function isNarrow(frame: TemplateFrame): boolean {
+  return frame.alongToMm - frame.alongFromMm < 90;
+}
+
+/** Words over a template, or in the white beside one that is too short to carry them. */
+function drawBeside(
+  { pen, input }: SheetContext,
+  frame: TemplateFrame,
+  { words, y, narrowY }: { words: string; y: number; narrowY: number },
+): void {
+  if (!isNarrow(frame)) {
+    pen.text(words, [wordsX(frame), y], SMALL_WORDS);
+    return;
+  }
+  const isAtRight = input.workshop.referenceEnd === 'foot';
+  const x = isAtRight ? frame.pageX(frame.alongFromMm) - 7 : frame.pageX(frame.alongToMm) + 7;
+  wrapText(pen, words, 60, SMALL_WORDS).forEach((line, index) =>
+    pen.text(line, [x, narrowY + index * leadingMm(SMALL_WORDS.size)], {
+      ...SMALL_WORDS,
+      align: isAtRight ? 'right' : 'left',
+    }),
+  );
+}
+
+/** Words over a template begin at its left end, after the ring marks where there are any. */
 function wordsX(frame: TemplateFrame): number {
   const left = frame.pageX(frame.alongFromMm);
   return frame.joins.some(({ alongMm }) => frame.pageX(alongMm) < left + 20) ? left + 10 : left;

@@ -82,7 +82,9 @@ function widestGapMiddle(span: { first: number; last: number }, marks: readonly 
   const centres = marks.map((mark) => mark.centreMm).sort((a, b) => a - b);
   const middles = centres.slice(1).map((centre, index) => (centre + (centres[index] ?? centre)) / 2);
   const within = [last, ...middles.filter((middle) => middle >= span.first && middle <= last)];
-  return within.reduce((best, at) => (clearOf(at, marks) > clearOf(best, marks) ? at : best));
+  const widestMm = Math.max(...within.map((at) => clearOf(at, marks)));
+  // Of places that are as good, within what an eye sees, the farthest: fewer pages.
+  return Math.max(...within.filter((at) => clearOf(at, marks) > widestMm - 0.25));
 }
 
 function overlapEnds(atMm: number, marks: readonly TileMark[], room: TileRoom): [number, number] {

@@ -63,30 +63,30 @@ function drawCells(
     {
       label: 'Revision',
       value: revision.state === 'draft' ? `${revision.number}, draft` : String(revision.number),
-      widthMm: 20,
+      widthMm: 18.4,
     },
-    { label: 'Sheet', value: 'none', widthMm: 16 },
-    { label: 'Page', value: `${page} of ${pages}`, widthMm: 20 },
-    { label: 'Printed', value: printDay(input.printedAt), widthMm: 26 },
+    { label: 'Sheet', value: 'none', widthMm: 13 },
+    { label: 'Page', value: `${page} of ${pages}`, widthMm: 18 },
+    { label: 'Printed', value: printDay(input.printedAt), widthMm: 25 },
   ];
   let x = MARGIN_MM;
   for (const cell of cells) {
-    pen.text(cell.label, [x + 2.4, topMm + 4], { size: 8 });
+    pen.text(cell.label, [x + 2, topMm + 4], { size: 8 });
     const style = { size: 11.5, weight: 600 } as const;
-    const box = { widthMm: cell.widthMm - 3.6, heightMm: 4 };
+    const box = { widthMm: cell.widthMm - 3, heightMm: 4 };
     const fitted = fitText(pen, cell.value, box, style);
-    writeLines(pen, fitted, [x + 2.4, topMm + 9], style);
+    writeLines(pen, fitted, [x + 2, topMm + 9], style);
     x += cell.widthMm;
     pen.line([x, topMm], [x, topMm + CELLS_HEIGHT_MM], RULE);
   }
-  pen.text('Not approved', [x + 2.4, topMm + 4.9], { size: 12, weight: 700 });
+  pen.text('Not approved', [x + 2, topMm + 4.9], { size: 12, weight: 700 });
   const words = fitText(
     pen,
     notApprovedWords(revision),
-    { widthMm: MARGIN_MM + widthMm - x - 4, heightMm: 3 },
+    { widthMm: MARGIN_MM + widthMm - x - 3, heightMm: 3 },
     { size: 8.5 },
   );
-  writeLines(pen, words, [x + 2.4, topMm + 9], { size: 8.5 });
+  writeLines(pen, words, [x + 2, topMm + 9], { size: 8.5 });
 }
 
 /** An unapproved print has no code; the place of the picture code stays empty and says so. */

@@ -5,7 +5,7 @@ import { drawReferenceBar } from './reference-bar.ts';
 import { drawJoinLine, drawRegistrationMark } from './registration-marks.ts';
 import type { SheetContext } from './sheet-context.ts';
 import { spanInWords } from './sheet-lengths.ts';
-import { benchReading, frameTicks } from './template-frame.ts';
+import { benchReading, frameTicks, halfHeights } from './template-frame.ts';
 import { halfRoundMm, seamEdge } from './template-geometry.ts';
 import { CUT_LINE, FOLD_LINE, HAIR_LINE, SMALL_WORDS } from './template-lines.ts';
 import { drawWrapHoles } from './wrap-holes.ts';
@@ -18,7 +18,7 @@ export const MARK_OUTSIDE_MM = 5;
 export function drawWrapAround(context: SheetContext, place: WrapPlace): void {
   const { pen } = context;
   const box = bandBox(place);
-  drawNotApprovedInside(pen, box);
+  drawNotApprovedInside(pen, wordsBox(context, place));
   pen.clipped([box.at[0] - 4, box.at[1] - 1], box.widthMm + 8, box.heightMm + 2, () => {
     drawOutline(context, place);
     drawFolds(context, place);
@@ -29,6 +29,17 @@ export function drawWrapAround(context: SheetContext, place: WrapPlace): void {
   drawJoins(context, place);
   const { at, heightMm } = box;
   drawReferenceBar(context, place.frame, { topMm: at[1], bottomMm: at[1] + heightMm });
+}
+
+/** What surely lies inside the outline, also where the body is thinnest. */
+function wordsBox({ input }: SheetContext, { frame, band, centreY }: WrapPlace) {
+  const { leastMm } = halfHeights(input.document, frame);
+  const [high, low] = [Math.min(band.highMm, leastMm), Math.max(band.lowMm, -leastMm)];
+  return {
+    at: [frame.pageX(frame.alongFromMm), centreY - high] as const,
+    widthMm: frame.alongToMm - frame.alongFromMm,
+    heightMm: high - low,
+  };
 }
 
 function drawOutline({ pen, input }: SheetContext, { frame, band, centreY }: WrapPlace): void {
@@ -68,34 +79,39 @@ function drawSeamScales(context: SheetContext, { frame, band, centreY }: WrapPla
   }));
   const isInBand = (mm: number) => mm <= band.highMm + 1e-6 && mm >= band.lowMm - 1e-6;
   for (const side of [1, -1]) {
+    const shown = ticks.filter(({ halfMm }) => isInBand(side * halfMm));
+    if (shown.length === 0) continue;
     pen.stroke(HAIR_LINE, (path) => {
-      for (const { x, halfMm, length } of ticks) {
+      for (const { x, halfMm, length } of shown) {
         const y = centreY - side * halfMm;
-        if (isInBand(side * halfMm)) path.moveTo(x, y).lineTo(x, y + side * 2.6 * length);
+        path.moveTo(x, y).lineTo(x, y + side * 2.6 * length);
       }
     });
   }
   const [left, right] = [frame.pageX(frame.alongFromMm) + 3, frame.pageX(frame.alongToMm) - 3];
-  for (const { x, halfMm, figure } of ticks) {
-    if (figure === '' || x < left || x > right || !isInBand(halfMm)) continue;
+  for (const { x, alongMm, halfMm, figure } of ticks) {
+    const isAtStep = Math.abs(halfRoundMm(input.document, alongMm - 3) - halfMm) > 1;
+    if (figure === '' || x < left || x > right || !isInBand(halfMm) || isAtStep) continue;
     pen.text(figure, [x, centreY - halfMm + 5.6], { ...SMALL_WORDS, align: 'centre' });
   }
 }
 
+/** Join lines end at the seams; their ring marks stand as far outside the seams on either page. */
 function drawJoins(context: SheetContext, { frame, band, centreY }: WrapPlace): void {
-  const { pen, writing } = context;
+  const { pen, input, writing } = context;
   const reading = benchReading(context);
-  const top = centreY - band.highMm;
-  const bottom = centreY - band.lowMm;
   for (const { alongMm } of frame.joins) {
+    const half = halfRoundMm(input.document, alongMm);
     const x = frame.pageX(alongMm);
+    const top = centreY - Math.min(half, band.highMm);
+    const bottom = centreY + Math.min(half, -band.lowMm);
     drawJoinLine(pen, [x, top], [x, bottom]);
     drawRegistrationMark(pen, [x, top - MARK_OUTSIDE_MM]);
     drawRegistrationMark(pen, [x, bottom + MARK_OUTSIDE_MM]);
     const isLeft = x < frame.pageX((frame.alongFromMm + frame.alongToMm) / 2);
     const words = `join ${spanInWords(reading(alongMm), writing)}`;
     const at = isLeft ? x + 1.2 : x - 1.2;
-    pen.text(words, [at, bottom - 4.8], { ...SMALL_WORDS, align: isLeft ? 'left' : 'right' });
+    pen.text(words, [at, bottom - 4], { ...SMALL_WORDS, align: isLeft ? 'left' : 'right' });
   }
   for (const roundMm of band.joinsMm) {
     const y = centreY - roundMm;
