@@ -108,15 +108,12 @@ function touchedBetween(document: DesignDocument, fromMm: number, toMm: number):
 
 function stationDimension(document: DesignDocument, index: number): Dimension {
   const { stations } = document.bore;
-  const station = stations[index];
-  const value = station?.diameterMm ?? NaN;
-  const from = stations[index - 1]?.positionMm ?? station?.positionMm ?? 0;
-  const to = stations[index + 1]?.positionMm ?? station?.positionMm ?? 0;
+  const near = stations.slice(Math.max(index - 1, 0), index + 2).map((station) => station.positionMm);
   return {
     key: `bore.stations.${index}.diameterMm`,
-    value,
+    value: stations[index]?.diameterMm ?? NaN,
     at: (diameterMm) => withStation(document, index, { diameterMm }),
-    touched: touchedBetween(document, from, to),
+    touched: touchedBetween(document, Math.min(...near), Math.max(...near)),
   };
 }
 

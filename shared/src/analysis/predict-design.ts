@@ -2,6 +2,9 @@ import { findResonances, type Resonance } from '../acoustics/response/resonances
 import type { DesignDocument, Fingering } from '../document/design-document.ts';
 import { beatsBetween, centsBetween, frequencyAbove } from '../music/cents.ts';
 import { noteFrequencyHz } from '../music/temperament.ts';
+import { accuracyParts, expectedAccuracyCents } from './expected-accuracy.ts';
+import { fingeringNotices } from './fingering-notices.ts';
+import { designNotices } from './notices.ts';
 import { ENGINE } from './engine-version.ts';
 import { ladderMultiples, playingResonance, ventCount } from './playing-mode.ts';
 import { ladderOf } from './ladder.ts';
@@ -40,11 +43,18 @@ export function predictPrepared(
   const highest = Math.max(...document.fingerings.map((fingering) => fingering.register), 1);
   const count = Math.max(modes, highest + 1);
   const resonances = findResonances(prepared, fingerings, { count, coupling, maxima });
+  const notices = designNotices(document);
+  const unusualUndercuts = new Set(
+    notices.filter(({ code }) => code === 'undercut-outside-formula').map(({ hole }) => hole ?? ''),
+  );
   return {
     engine: ENGINE,
-    notices: [],
+    notices,
     fingerings: document.fingerings.map((fingering, i) =>
-      predictFingering({ document, design, fingering, index: i, maxima, modes }, resonances[i] ?? []),
+      predictFingering(
+        { document, design, fingering, index: i, maxima, modes, unusualUndercuts },
+        resonances[i] ?? [],
+      ),
     ),
   };
 }
@@ -56,13 +66,14 @@ interface FingeringQuestion {
   index: number;
   maxima: boolean;
   modes: number;
+  unusualUndercuts: ReadonlySet<string>;
 }
 
 function predictFingering(
   question: FingeringQuestion,
   resonances: readonly Resonance[],
 ): FingeringPrediction {
-  const { document, design, fingering, index, maxima, modes } = question;
+  const { document, design, fingering, index, maxima, modes, unusualUndercuts } = question;
   const states = design.states[index] ?? [];
   const targetHz = targetFrequencyHz(document, fingering);
   const multiples = ladderMultiples(design.column, states, maxima);
@@ -75,6 +86,13 @@ function predictFingering(
   });
   const vent = design.holes[states.findIndex((state) => state.kind !== 'closed')];
   const frequencyHz = playing?.frequency ?? null;
+  const accuracy = accuracyParts({
+    document,
+    design,
+    states,
+    register: fingering.register,
+    unusualUndercuts,
+  });
   return {
     id: fingering.id,
     note: fingering.note,
@@ -87,8 +105,9 @@ function predictFingering(
     ladder: ladderOf(resonances.slice(0, modes), maxima, multiples),
     ventHole: vent?.id ?? null,
     cutoffHz: openHoleCutoffHz(design.column, states),
-    accuracyCents: 1,
-    notices: [],
+    accuracyCents: expectedAccuracyCents(accuracy),
+    accuracy,
+    notices: fingeringNotices({ document, design, fingering, states, resonances, playing, maxima }),
   };
 }
 

@@ -24,6 +24,13 @@ export interface LadderRung {
   weak: boolean;
 }
 
+/** One thing that a note's figure rests on, and how far it may be off, ± cents. */
+export interface AccuracyPart {
+  part:
+    'bore-and-holes' | 'losses' | 'undercut' | 'half-covered' | 'pad' | 'mouth-end' | 'mouth-end-calibrated';
+  cents: number;
+}
+
 export interface FingeringPrediction {
   id: string;
   note: string;
@@ -42,8 +49,10 @@ export interface FingeringPrediction {
   ventHole: string | null;
   /** Above this the open holes leak, Hz; null with no open holes. */
   cutoffHz: number | null;
-  /** Expected accuracy of this figure before calibration, ± cents. */
+  /** Expected accuracy of this figure, ± cents: before calibration, or after it where the mouth end is calibrated. */
   accuracyCents: number;
+  /** What that is made of. */
+  accuracy?: AccuracyPart[] | undefined;
   notices: Notice[];
 }
 

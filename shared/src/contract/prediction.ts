@@ -29,6 +29,22 @@ const fingeringPredictionSchema = z.object({
   ventHole: z.string().nullable(),
   cutoffHz: z.number().nullable(),
   accuracyCents: z.number(),
+  accuracy: z
+    .array(
+      z.object({
+        part: z.enum([
+          'bore-and-holes',
+          'losses',
+          'undercut',
+          'half-covered',
+          'pad',
+          'mouth-end',
+          'mouth-end-calibrated',
+        ]),
+        cents: z.number(),
+      }),
+    )
+    .optional(),
   notices: z.array(noticeSchema),
 });
 

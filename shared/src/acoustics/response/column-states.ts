@@ -85,22 +85,23 @@ function writeOpeningStates(prepared: PreparedColumn, out: ColumnStates): void {
   const { cells, branches, coupling, system } = prepared;
   for (let i = 0; i < system.nodes; i += 1) {
     const branch = branches[system.branch[i] ?? -1];
+    const own = branch === undefined ? prepared.footRadiation : branch.radiation;
     const opening = system.opening[i] ?? 0;
     const row = coupling.outer + 2 * opening * coupling.openings;
     const mouth = row + 2 * (coupling.openings - 1);
     sum[0] = -cell(cells, mouth);
     sum[1] = -cell(cells, mouth + 1);
     for (let j = 0; j < system.nodes; j += 1) {
-      const own = branch?.radiation ?? prepared.footRadiation;
-      addProduct(cells, i === j ? own : row + 2 * (system.opening[j] ?? 0), outflowAt(system, j));
+      if (i !== j) addProduct(cells, row + 2 * (system.opening[j] ?? 0), outflowAt(system, j));
     }
     const flow = outflowAt(system, i);
+    addProduct(cells, own, flow);
     state[0] = cell(sum, 0);
     state[1] = cell(sum, 1);
     state[2] = cell(cells, flow);
     state[3] = cell(cells, flow + 1);
     out.outer.set(state, STATE_CELLS * opening);
-    passTwoPort(cells, branch?.inside ?? prepared.footTwoPort, state);
+    passTwoPort(cells, branch === undefined ? prepared.footTwoPort : branch.inside, state);
     out.inner.set(state, STATE_CELLS * opening);
   }
 }

@@ -1,0 +1,65 @@
+import { UNUSUAL_UNDERCUT_CENTS } from '../acoustics/tone-hole/undercut.ts';
+import type { HoleState } from '../acoustics/response/column.ts';
+import type { DesignDocument, MouthEndKind } from '../document/design-document.ts';
+import type { AccuracyPart } from './prediction.ts';
+import type { DesignColumn } from './to-column.ts';
+
+/**
+ * Largest errors of bores with plain holes against three-dimensional finite elements of whole instruments, cents, in
+ * registers 1 and 2, and the root of the mean square above.
+ */
+const BORE_AND_HOLES = [0.6, 1.3, 2];
+
+/** Measured of a vented register, undercut (studied shapes), half-cover and pad on whole instruments or elements, cents. */
+const UNDERCUT_CENTS = 1.5;
+const HALF_COVERED_CENTS = 1.5;
+const PAD_CENTS = 3;
+
+/** Real walls, finger pads and edges, which nothing here was held against, cents; common practice. */
+const LOSSES_CENTS = 1;
+
+/** What a mouth end adds before it is calibrated on a measured set of notes, and after, cents. */
+const MOUTH_ENDS: Record<MouthEndKind, { before: number; after: number }> = {
+  'ideal-open': { before: 0, after: 0 },
+  'ideal-closed': { before: 0, after: 0 },
+  window: { before: 8, after: 1 },
+  embouchure: { before: 20, after: 2 },
+  rim: { before: 25, after: 3 },
+  reed: { before: 30, after: 5 },
+};
+
+export interface AccuracyQuestion {
+  document: DesignDocument;
+  design: DesignColumn;
+  states: readonly HoleState[];
+  register: number;
+  unusualUndercuts: ReadonlySet<string>;
+}
+
+/** What a note's figure rests on, and how far each part may be off, ± cents. */
+export function accuracyParts(question: AccuracyQuestion): AccuracyPart[] {
+  const { document, design, states, register, unusualUndercuts } = question;
+  const calibrated = document.mouthEnd.correctionScale !== 1;
+  const mouth = MOUTH_ENDS[document.mouthEnd.kind][calibrated ? 'after' : 'before'];
+  const undercuts = design.holes.filter((hole) => hole.undercut !== null);
+  const undercut = undercuts.some((hole) => unusualUndercuts.has(hole.id))
+    ? UNUSUAL_UNDERCUT_CENTS
+    : UNDERCUT_CENTS;
+  const padOpen = design.holes.some((hole, i) => hole.cover === 'pad' && states[i]?.kind === 'open');
+  const parts: (AccuracyPart | null)[] = [
+    { part: 'bore-and-holes', cents: BORE_AND_HOLES[Math.min(register, 3) - 1] ?? 2 },
+    document.air.losses ? { part: 'losses', cents: LOSSES_CENTS } : null,
+    undercuts.length > 0 ? { part: 'undercut', cents: undercut } : null,
+    states.some((state) => state.kind === 'half')
+      ? { part: 'half-covered', cents: HALF_COVERED_CENTS }
+      : null,
+    padOpen ? { part: 'pad', cents: PAD_CENTS } : null,
+    mouth > 0 ? { part: calibrated ? 'mouth-end-calibrated' : 'mouth-end', cents: mouth } : null,
+  ];
+  return parts.filter((part) => part !== null);
+}
+
+/** The parts together, independent of one another, ± cents. */
+export function expectedAccuracyCents(parts: readonly AccuracyPart[]): number {
+  return Math.sqrt(parts.reduce((sum, { cents }) => sum + cents * cents, 0));
+}
