@@ -1,5 +1,5 @@
 import { useEffect, useRef } from 'react';
-import { Outlet, ScrollRestoration, useLocation, useMatches, useNavigate, useNavigation } from 'react-router';
+import { Outlet, ScrollRestoration, useLocation, useMatches, useNavigation } from 'react-router';
 import { SessionExpiredDialog } from '../features/session/SessionExpiredDialog.tsx';
 import { useSignOut } from '../features/session/session.queries.ts';
 import { useSession } from '../lib/session.ts';
@@ -16,7 +16,6 @@ const LINKS = [
 
 /** What stands round every page behind the sign-in. */
 export function AppFrame() {
-  const navigate = useNavigate();
   const { pathname, search } = useLocation();
   const { person, workshop } = useSession();
   const signOut = useSignOut();
@@ -42,7 +41,7 @@ export function AppFrame() {
             accountPath={paths.account()}
             workshopPath={paths.workshopDefaults()}
             isSigningOut={signOut.isPending}
-            onSignOut={() => signOut.mutate(undefined, { onSuccess: () => void navigate(paths.signIn()) })}
+            onSignOut={() => signOut.mutate()}
           />
         }
       />

@@ -3,6 +3,7 @@ import type { z } from 'zod';
 import { sessionSchema, type createWorkshopRequest, type signInRequest } from '#shared/contract/session.ts';
 import { apiRequest, noAnswer } from '../../lib/api-client.ts';
 import { sessionQuery, startSession } from '../../lib/session.ts';
+import { paths } from '../../paths.ts';
 
 type SignIn = z.input<typeof signInRequest>;
 type CreateWorkshop = z.input<typeof createWorkshopRequest>;
@@ -27,11 +28,11 @@ export function useSignInAgain() {
 }
 
 export function useSignOut() {
-  const queryClient = useQueryClient();
   return useMutation({
     mutationFn: () =>
       apiRequest({ method: 'DELETE', path: '/api/session', schema: noAnswer, onSignedOut: 'none' }),
-    onSuccess: () => startSession(queryClient, null),
+    // A fresh page rather than an emptied cache: what is still on the screen cannot do without its session.
+    onSuccess: () => window.location.assign(paths.signIn()),
   });
 }
 
