@@ -135,7 +135,8 @@ const phone: BenchMeasures = {
 export const LAYOUTS: Record<BenchLayout, BenchMeasures> = { wide: desk, tablet, standing, phone };
 
 export function layoutOf(widthPx: number): BenchLayout {
-  if (widthPx >= 1280) return 'wide';
-  if (widthPx >= 1024) return 'tablet';
-  return widthPx >= 700 ? 'standing' : 'phone';
+  // The window less its scroll bar.
+  if (widthPx >= 1260) return 'wide';
+  if (widthPx >= 1004) return 'tablet';
+  return widthPx >= 684 ? 'standing' : 'phone';
 }

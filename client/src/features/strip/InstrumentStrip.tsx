@@ -15,19 +15,20 @@ import { StripLabels } from './StripLabels.tsx';
 import { useViewGestures } from './use-view-gestures.ts';
 
 interface InstrumentStripProps extends PanelProps {
-  view: BenchView;
-  onView: (view: BenchView) => void;
-  /** Where a new hole is offered, mm from the mouth end; null for nowhere. */
-  spotMm: number | null;
-  onSpot: (positionMm: number | null) => void;
-  /** The next touch of the bare instrument places a hole. */
-  isPlacing: boolean;
+  desk: { view: BenchView; setView: (view: BenchView) => void };
+  placing: {
+    /** Where a new hole is offered, mm from the mouth end; null for nowhere. */
+    spotMm: number | null;
+    /** The next touch of the bare instrument places a hole. */
+    isPlacing: boolean;
+    moveSpot: (positionMm: number | null) => void;
+  };
   onDragging: (isDragging: boolean) => void;
 }
 
 /** The instrument across the top of the bench, to scale: plan, section and rule, its holes in hand. */
 export function InstrumentStrip(props: InstrumentStripProps) {
-  const { document, geometry, unit, selection, readOnly, onEdit } = props;
+  const { document, geometry, unit, selection, readOnly, onEdit, desk, placing } = props;
   const { frame } = geometry;
   const strip = useRef<HTMLDivElement>(null);
   const { bore, outside, mouthEnd, foot } = document;
@@ -36,23 +37,23 @@ export function InstrumentStrip(props: InstrumentStripProps) {
   const canEdit = readOnly === null;
   const placeHole = (positionMm: number) => {
     onEdit({ label: 'Add a hole', change: (before) => addHole(before, positionMm, usualDiameter(props)) });
-    props.onSpot(null);
+    placing.moveSpot(null);
   };
   const touchAt = (x: number) => {
     const positionMm = snapPosition(document, frame.mm(x));
     const isOnBore = frame.mm(x) > 0 && frame.mm(x) < boreEnds(document).footMm;
-    if (!canEdit || !isOnBore) props.onSpot(null);
-    else if (props.isPlacing) placeHole(positionMm);
-    else props.onSpot(positionMm);
+    if (!canEdit || !isOnBore) placing.moveSpot(null);
+    else if (placing.isPlacing) placeHole(positionMm);
+    else placing.moveSpot(positionMm);
   };
-  const gestures = useViewGestures({ strip, frame, view: props.view, onView: props.onView, onTap: touchAt });
+  const gestures = useViewGestures({ strip, frame, view: desk.view, onView: desk.setView, onTap: touchAt });
   const chosen = columnOf(geometry, selection.hole);
   return (
     <div
       ref={strip}
       role="group"
       aria-label="Instrument"
-      className="bg-bench border-hair relative touch-pan-y border-b"
+      className="relative touch-pan-y"
       style={{ height: frame.measures.stripHeight }}
     >
       <svg
@@ -91,9 +92,9 @@ export function InstrumentStrip(props: InstrumentStripProps) {
           ))}
         </g>
         <StripLabels geometry={geometry} document={document} chosen={chosen} unit={unit} />
-        {props.spotMm !== null && (
+        {placing.spotMm !== null && (
           <circle
-            cx={frame.x(props.spotMm)}
+            cx={frame.x(placing.spotMm)}
             cy={frame.measures.planY}
             r={(usualDiameter(props) * frame.pxPerMm) / 2}
             className="bench-ghost-ring"
@@ -101,17 +102,17 @@ export function InstrumentStrip(props: InstrumentStripProps) {
         )}
       </svg>
       <HoleButtons {...props} shape={shape} holes={holes} />
-      {props.spotMm !== null && (
+      {placing.spotMm !== null && (
         <PlaceSpot
           frame={frame}
-          positionMm={props.spotMm}
-          figure={printLength(fromFootMm(document, props.spotMm), unit)}
-          takesFocus={props.isPlacing}
-          onPlace={() => props.spotMm !== null && placeHole(props.spotMm)}
+          positionMm={placing.spotMm}
+          figure={printLength(fromFootMm(document, placing.spotMm), unit)}
+          takesFocus={placing.isPlacing}
+          onPlace={() => placing.spotMm !== null && placeHole(placing.spotMm)}
           onMove={(byMm) =>
-            props.spotMm !== null && props.onSpot(snapPosition(document, props.spotMm + byMm))
+            placing.spotMm !== null && placing.moveSpot(snapPosition(document, placing.spotMm + byMm))
           }
-          onLeave={() => props.onSpot(null)}
+          onLeave={() => placing.moveSpot(null)}
         />
       )}
     </div>

@@ -1,0 +1,124 @@
+import { useState } from 'react';
+import { useLocation, useNavigate } from 'react-router';
+import type { DesignSummary } from '#shared/contract/designs.ts';
+import { permissionRefusal } from '#shared/rules/permissions.ts';
+import { BenchDefs } from '../bench/BenchDefs.tsx';
+import { WHOLE } from '../bench/bench-view.ts';
+import type { PanelProps } from '../bench/panel-props.ts';
+import { ConflictDialog } from '../features/draft/ConflictDialog.tsx';
+import { DraftBands } from '../features/draft/DraftBands.tsx';
+import type { DraftOnBench } from '../features/draft/use-draft.ts';
+import { useSuggestionDesk } from '../features/holes/use-suggestion-desk.ts';
+import { InstrumentStrip } from '../features/strip/InstrumentStrip.tsx';
+import { benchCommands } from '../features/workbench/bench-commands.ts';
+import { choosing } from '../features/workbench/choosing.ts';
+import { FailureLine } from '../features/workbench/FailureLine.tsx';
+import { SpokenChange } from '../features/workbench/SpokenChange.tsx';
+import { useBenchKeys } from '../features/workbench/use-bench-keys.ts';
+import { useBenchView } from '../features/workbench/use-bench-view.ts';
+import { usePlacing } from '../features/workbench/use-placing.ts';
+import { useSelection } from '../features/workbench/use-selection.ts';
+import { useZones } from '../features/workbench/use-zones.ts';
+import { ZoomButtons } from '../features/workbench/ZoomButtons.tsx';
+import { useSession } from '../lib/session.ts';
+import { useUnit } from '../lib/unit.ts';
+import { paths, WORKBENCH_PANELS, type WorkbenchPanel } from '../paths.ts';
+import { useElementWidth } from '../ui/use-element-width.ts';
+import { WorkbenchHead } from './WorkbenchHead.tsx';
+import { WorkbenchPanels } from './WorkbenchPanels.tsx';
+
+interface OpenWorkbenchProps {
+  design: DesignSummary;
+  draft: DraftOnBench;
+  panel: WorkbenchPanel;
+}
+
+/** Width that a bench is laid out for before it is measured, px. */
+const GUESSED_PX = 1440;
+
+/** An open draft on the bench: the strip on top, below it what the panel shows. */
+export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
+  const { document } = draft;
+  const { role, workshop } = useSession();
+  const unit = useUnit();
+  const navigate = useNavigate();
+  const { search } = useLocation();
+  const [measure, widthPx] = useElementWidth();
+  const desk = useBenchView(document, widthPx ?? GUESSED_PX);
+  const placing = usePlacing(document);
+  const [isDragging, setDragging] = useState(false);
+  const [selection, select] = useSelection(document);
+  const bench: PanelProps = {
+    document,
+    prediction: draft.prediction,
+    sensitivities: draft.predictionOf === document ? draft.sensitivities : null,
+    unit,
+    bandCents: workshop.bandCents,
+    readOnly: permissionRefusal({ role }, 'edit-design'),
+    selection,
+    onSelect: choosing(document, selection, select),
+    onEdit: draft.edit,
+    geometry: desk.geometry,
+  };
+  const suggestion = useSuggestionDesk(bench, isDragging);
+  const [best] = suggestion.suggestions ?? [];
+  useZones();
+  useBenchKeys({
+    ...benchCommands(bench),
+    stepPanel: (by) => {
+      const next = WORKBENCH_PANELS[WORKBENCH_PANELS.indexOf(panel) + by];
+      if (next === undefined) return;
+      const to = paths.workbench(design.id, design.revisionNumber, next) + search;
+      void navigate(to, { preventScrollReset: true });
+    },
+    undo: draft.undo,
+    redo: draft.redo,
+    trySuggestion: () => best !== undefined && suggestion.tryOut(best),
+    putBack: () => suggestion.canPutBack && suggestion.putBack(),
+    zoom: desk.zoom,
+  });
+  return (
+    <>
+      <BenchDefs />
+      <WorkbenchHead {...{ design, draft, panel, bench }} onAddHole={placing.start} />
+      <div
+        className="bg-bench border-hair sticky top-0 z-20 border-b outline-offset-[-3px]"
+        data-zone="strip"
+        tabIndex={-1}
+      >
+        <div ref={measure} className="relative mx-auto max-w-400">
+          <InstrumentStrip {...bench} desk={desk} placing={placing} onDragging={setDragging} />
+          {desk.geometry.layout === 'wide' && (
+            <ZoomButtons
+              isWhole={desk.view.kind === 'whole'}
+              onZoom={desk.zoom}
+              onWhole={() => desk.setView(WHOLE)}
+              onHoles={desk.showHoles}
+            />
+          )}
+        </div>
+      </div>
+      <DraftBands save={draft.save} keptOnDevice={draft.keptOnDevice} mismatchCents={draft.mismatchCents} />
+      {draft.predictionFailure !== null && (
+        <FailureLine
+          faults={draft.predictionFailure.faults}
+          document={document}
+          onChooseHole={(hole) => bench.onSelect({ hole })}
+        />
+      )}
+      <div className="mx-auto max-w-400">
+        <WorkbenchPanels {...{ panel, bench, draft, isDragging, suggestion }} />
+      </div>
+      {draft.save.status === 'conflict' && (
+        <ConflictDialog
+          mine={document}
+          newer={draft.save.newer}
+          ancestor={draft.save.ancestor}
+          unit={unit}
+          onSettle={draft.settle}
+        />
+      )}
+      <SpokenChange {...bench} />
+    </>
+  );
+}

@@ -1,0 +1,107 @@
+import type { ReactNode } from 'react';
+import type { PanelProps } from '../bench/panel-props.ts';
+import { BorePanel } from '../features/bore-panel/BorePanel.tsx';
+import type { DraftOnBench } from '../features/draft/use-draft.ts';
+import { HoleTable } from '../features/hole-table/HoleTable.tsx';
+import { HoleInspector } from '../features/holes/HoleInspector.tsx';
+import type { SuggestionDesk } from '../features/holes/use-suggestion-desk.ts';
+import { Ladder } from '../features/ladder/Ladder.tsx';
+import { NotesPanel } from '../features/notes-panel/NotesPanel.tsx';
+import { PlumbChart } from '../features/plumb/PlumbChart.tsx';
+import { RegisterChoice } from '../features/plumb/RegisterChoice.tsx';
+import { BottomDrawer } from '../features/workbench/BottomDrawer.tsx';
+import { ColumnTint } from '../features/workbench/ColumnTint.tsx';
+import { NoticeList } from '../features/workbench/NoticeList.tsx';
+import type { WorkbenchPanel } from '../paths.ts';
+
+interface WorkbenchPanelsProps {
+  panel: WorkbenchPanel;
+  bench: PanelProps;
+  draft: DraftOnBench;
+  isDragging: boolean;
+  suggestion: SuggestionDesk;
+}
+
+/** What stands below the strip. Features do not know each other: this is where they are put side by side. */
+export function WorkbenchPanels({ panel, bench, draft, isDragging, suggestion }: WorkbenchPanelsProps) {
+  const chart = (
+    <PlumbChart
+      {...bench}
+      isDragging={isDragging}
+      isOld={draft.predictionFailure !== null}
+      showsFingering={panel === 'holes'}
+    />
+  );
+  switch (panel) {
+    case 'bore':
+      return (
+        <BorePanel
+          {...bench}
+          hang={
+            <HangZone bench={bench}>
+              {chart}
+              <RegisterChoice {...bench} />
+            </HangZone>
+          }
+        />
+      );
+    case 'notes':
+      return <NotesPanel {...bench} />;
+    case 'holes':
+    case 'air':
+      return <HolesPanel bench={bench} chart={chart} suggestion={suggestion} />;
+  }
+}
+
+function HangZone({ bench, children }: { bench: PanelProps; children: ReactNode }) {
+  return (
+    <div className="relative" data-zone="columns" tabIndex={-1}>
+      <ColumnTint geometry={bench.geometry} chosen={bench.selection.hole} />
+      {children}
+    </div>
+  );
+}
+
+interface HolesPanelProps {
+  bench: PanelProps;
+  chart: ReactNode;
+  suggestion: SuggestionDesk;
+}
+
+/** Inspector and ladder at the left, where nothing hangs; plumb lines and sizes under the holes. */
+function HolesPanel({ bench, chart, suggestion }: HolesPanelProps) {
+  const { geometry, prediction, selection } = bench;
+  const { leftZone } = geometry.measures;
+  const chosen = selection.fingering ?? bench.document.fingerings[0]?.id;
+  const predicted = prediction?.fingerings.find(({ id }) => id === chosen) ?? null;
+  const inspector = <HoleInspector {...bench} suggestion={suggestion} />;
+  const hasLeftZone = leftZone.width > 0;
+  return (
+    <div className={geometry.layout === 'wide' ? 'grid' : 'grid pb-18'}>
+      {hasLeftZone && (
+        <div
+          className="z-10 col-start-1 row-start-1 flex items-start gap-7.5 justify-self-start pt-3 pb-4"
+          style={{ marginLeft: leftZone.x }}
+        >
+          <div style={{ width: leftZone.width }} data-zone="left" tabIndex={-1}>
+            {inspector}
+          </div>
+          {geometry.ladderFits && <Ladder prediction={predicted} height={384} />}
+        </div>
+      )}
+      <div className="col-start-1 row-start-1 min-w-0">
+        <HangZone bench={bench}>
+          {chart}
+          <RegisterChoice {...bench} />
+          <div data-zone="table" tabIndex={-1} className="mt-2">
+            <HoleTable {...bench} />
+          </div>
+        </HangZone>
+        <div style={{ paddingLeft: Math.max(16, geometry.hangLeft - 112), paddingRight: 16 }}>
+          <NoticeList prediction={prediction} />
+        </div>
+      </div>
+      {!hasLeftZone && <BottomDrawer label="Hole">{inspector}</BottomDrawer>}
+    </div>
+  );
+}
