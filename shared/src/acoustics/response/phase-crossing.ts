@@ -4,7 +4,7 @@ import type { PhaseTrack } from './phase-track.ts';
 /** Relative to the frequency; far below anything that can be heard or measured. */
 const TOLERANCE = 1e-9;
 /** Once two steps in a row multiply to less than this, Hz², the next one would be below 1e-6 Hz. */
-const CLOSE = 2e-5;
+const CLOSE = 1e-4;
 const MOST_STEPS = 60;
 const POINTS = 5;
 

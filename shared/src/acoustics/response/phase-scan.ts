@@ -3,7 +3,7 @@ import { chainImpedance } from './chain.ts';
 import { coupledImpedance } from './input-impedance.ts';
 import { countedPhase } from './phase-count.ts';
 import { PhaseTrack } from './phase-track.ts';
-import { tuneColumn, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
+import { tuneColumn, tuneFingering, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
 
 export interface ResonanceSearch {
   /** How many to find, from the lowest. */
@@ -32,7 +32,7 @@ const SAMPLES_PER_TURN = 4;
 const LARGEST_FALL = 2.4;
 const LARGEST_RISE = 0.4;
 /** An interval looked into is settled once it is this share of the grid's and its step this small, rad. */
-const SETTLED_SHARE = 1 / 16;
+const SETTLED_SHARE = 1 / 8;
 const SETTLED_STEP = 0.8;
 /** Hz; nothing in an instrument is narrower. */
 const NARROWEST = 1e-3;
@@ -148,7 +148,7 @@ function settle(probe: Probe): void {
       continue;
     }
     const middle = (cell(track.frequencies, i - 1) + cell(track.frequencies, i)) / 2;
-    tuneColumn(prepared, middle, search.coupling);
+    tuneFingering(prepared, probe.fingering, middle, search.coupling);
     sample(probe, i, middle);
   }
 }

@@ -27,6 +27,8 @@ export interface PreparedColumn {
   system: OpeningSystem;
   /** Which openings take part in the coupling, by their place. */
   coupled: Uint8Array;
+  /** The same for one fingering. */
+  sounding: Uint8Array;
   foot: Column['foot'];
   footRadius: number;
   /** Address of the foot's radiation impedance. */
@@ -79,6 +81,7 @@ export function prepareColumn(
     coupling,
     system,
     coupled: coupledOpenings(branches, coupling),
+    sounding: new Uint8Array(coupling.openings).fill(1),
     foot: column.foot,
     footRadius,
     footRadiation,
@@ -148,6 +151,32 @@ export function tuneColumn(prepared: PreparedColumn, frequency: number, coupling
   const { cells, plan } = prepared;
   for (const branch of prepared.branches) tuneHoleBranch(cells, branch, plan.outside);
   if (coupling) tuneCoupling(cells, prepared.coupling, plan.outside, prepared.coupled);
+}
+
+/**
+ * Sets a column to a frequency for one fingering alone; others may not be solved then.
+ *
+ * @param prepared - the column
+ * @param fingering - its branches
+ * @param frequency - Hz, > 0
+ * @param coupling - false: openings do not hear each other
+ * @returns nothing; the result is in the column's cells
+ */
+export function tuneFingering(
+  prepared: PreparedColumn,
+  fingering: FingeringBranches,
+  frequency: number,
+  coupling: boolean,
+): void {
+  tuneBore(prepared, frequency);
+  const { cells, plan, branches, sounding } = prepared;
+  for (let h = 0; h < fingering.length; h += 1) {
+    const branch = branches[fingering[h] ?? -1];
+    if (branch === undefined) continue;
+    tuneHoleBranch(cells, branch, plan.outside);
+    sounding[h] = branch.closed ? 0 : 1;
+  }
+  if (coupling) tuneCoupling(cells, prepared.coupling, plan.outside, sounding);
 }
 
 /**

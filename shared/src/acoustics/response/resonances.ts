@@ -2,7 +2,7 @@ import { cell } from '../complex/cells.ts';
 import { phaseCrossing } from './phase-crossing.ts';
 import { levelOf, reflectionPhase, scanPhases, type Probe, type ResonanceSearch } from './phase-scan.ts';
 import { nearestTurn } from './phase-track.ts';
-import { tuneColumn, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
+import { tuneFingering, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
 
 /** One resonance at the mouth end. */
 export interface Resonance {
@@ -44,7 +44,7 @@ function crossings(probe: Probe): Resonance[] {
     while (i < track.count && cell(track.phases, i) > level) i += 1;
     if (i >= track.count) break;
     const frequency = phaseCrossing(track, i, level, (at, expected) => {
-      tuneColumn(prepared, at, search.coupling);
+      tuneFingering(prepared, probe.fingering, at, search.coupling);
       return nearestTurn(reflectionPhase(prepared, probe.fingering, search.coupling), expected);
     });
     const magnitude = realImpedance(prepared, search.maxima);
