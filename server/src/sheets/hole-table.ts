@@ -9,11 +9,15 @@ import { writeDiameter, writeLength, type WrittenLength } from './sheet-lengths.
 import { filledWidths, tableSection, type HeadCell, type TableCell } from './table.ts';
 
 const NOTHING = '–';
+/** Room for a carpenter's pencil. */
 const ROW_MM = 11;
 
+/** A row whose figures have another unit under them and a drill's name under that. */
+const TALL_ROW_MM = 13.6;
+
 /** Columns from left to right; figures in inches are longer, and so are those with a second unit in brackets. */
-const SHARES_MM = [10, 15.4, 12.6, 8.4, 9, 9, 15, 8.4, 14.4, 9.4, 12, 8.6, 9.4, 12.4, 8.8, 10, 9.6];
-const SHARES_LONG = [9.4, 15.4, 12.6, 9.6, 11, 11, 14.4, 9.6, 14.2, 11, 12.4, 8.4, 9.4, 12.2, 8.4, 9.6, 9];
+const SHARES_MM = [10, 15.4, 12.6, 8.4, 9, 9, 20, 8.4, 9.4, 9.4, 12, 8.8, 9.4, 12.4, 8.8, 10, 9.6];
+const SHARES_LONG = [9.4, 15.4, 12.6, 9.6, 11, 11, 19.6, 9.6, 9, 11, 12.4, 8.4, 9.4, 12.2, 8.4, 9.6, 9];
 
 /** Every hole in drilling order, from the foot upward, with two boxes to write in. */
 export function holeTableSection(context: SheetContext): FlowSection {
@@ -24,8 +28,8 @@ export function holeTableSection(context: SheetContext): FlowSection {
     note: `positions from the ${referenceName(input.document, referenceEnd)} to the centre of the hole; angles clockwise, seen from the foot`,
     widthsMm: filledWidths(context, context.writing.besides === 'nothing' ? SHARES_MM : SHARES_LONG),
     head: holeHead(input.workshop.referenceEnd),
-    headRowMm: 4.8,
-    rowMm: ROW_MM,
+    headRowMm: 6.2,
+    rowMm: context.writing.besides === 'other-unit' ? TALL_ROW_MM : ROW_MM,
     rows: holeRows(input).map((row) => holeCells(context, row)),
     gapMm: 2,
   });

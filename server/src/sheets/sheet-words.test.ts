@@ -39,6 +39,26 @@ describe('words', () => {
     },
   );
 
+  it.each([
+    ['mm', 'foot'],
+    ['mm', 'mouth'],
+    ['inch', 'foot'],
+    ['inch', 'mouth'],
+    ['both', 'foot'],
+    ['both', 'mouth'],
+  ] as const)('in %s from the %s are never cut short', async (unit, referenceEnd) => {
+    const whistle = buildWhistle();
+    const document = {
+      ...whistle,
+      holes: whistle.holes.map((hole) => ({ ...hole, diameterMm: hole.diameterMm + 0.03 })),
+    };
+    for (const ownUnit of ['mm', 'inch'] as const) {
+      const workshop = { name: 'Saltgate Yard', unit: ownUnit, referenceEnd, bandCents: [5, 10] };
+      const sheet = await drawnSheet({ document, unit, workshop });
+      for (const page of sheet.pages) expect(wordsOf(page)).not.toContain('…');
+    }
+  });
+
   it('are never smaller than 8 points', async () => {
     const sheet = await drawnSheet({ unit: 'both' });
     const sizes = sheet.pages.flatMap((page) => page.texts.map(({ sizeMm }) => (sizeMm / 25.4) * 72));
