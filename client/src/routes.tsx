@@ -71,6 +71,14 @@ function designRoutes(queryClient: QueryClient): RouteObject[] {
       },
     },
     {
+      path: paths.newDesign(),
+      handle: { name: 'New design' },
+      lazy: async () => {
+        const { NewDesignPage, newDesignLoader } = await import('./pages/NewDesignPage.tsx');
+        return { Component: NewDesignPage, loader: newDesignLoader(queryClient) };
+      },
+    },
+    {
       path: patterns.design,
       lazy: async () => ({ loader: (await import('./pages/design-gate.ts')).designGate(queryClient) }),
     },

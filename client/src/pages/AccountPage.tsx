@@ -14,7 +14,7 @@ export function AccountPage() {
   return (
     <div className="px-margin pt-4 pb-12">
       <PageTitle>Account</PageTitle>
-      <h1 className="text-page font-semibold">Account</h1>
+      <h1 className="text-page max-bar:sr-only font-semibold">Account</h1>
       <div className="lying:grid-cols-2 mt-4 grid gap-x-20 gap-y-10">
         <div className="grid content-start gap-10">
           <Part title="You">

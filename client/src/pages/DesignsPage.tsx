@@ -52,10 +52,10 @@ export function DesignsPage() {
     <div className="px-margin pt-3.5 pb-10">
       <PageTitle>Designs</PageTitle>
       <DesignsHead refusal={permissionRefusal(session, 'create-design')} />
-      <div className="mt-3 mb-2 flex flex-wrap items-center justify-between gap-x-8 gap-y-3">
+      <div className="mt-3 mb-2 flex flex-wrap items-center justify-between gap-x-4 gap-y-3">
         <DesignFilters list={list} counts={found.counts} />
-        <SortSelect list={list} onChange={handleList} />
         <FindBox search={list.search} onSearch={handleSearch} />
+        <SortSelect list={list} onChange={handleList} />
       </div>
       <p role="status" className="sr-only">
         {found.total === 1 ? '1 design' : `${found.total} designs`}
@@ -88,8 +88,8 @@ export function DesignsPage() {
 function DesignsHead({ refusal }: { refusal: string | null }) {
   const navigate = useNavigate();
   return (
-    <div className="flex flex-wrap items-start justify-between gap-3">
-      <h1 className="text-page font-semibold">Designs</h1>
+    <div className="max-bar:justify-end flex flex-wrap items-start justify-between gap-3">
+      <h1 className="text-page max-bar:sr-only font-semibold">Designs</h1>
       {refusal === null ? (
         <div className="flex gap-2">
           <ReadInDesign onCreated={(design) => void navigate(paths.design(design.id))} />

@@ -1,5 +1,6 @@
 import { useId, type ComponentProps, type ReactNode } from 'react';
 import { classNames } from './class-names.ts';
+import { Select } from './Select.tsx';
 
 interface FieldFrameProps {
   label: ReactNode;
@@ -81,7 +82,7 @@ type SelectFieldProps = FieldFrameProps & Omit<ComponentProps<'select'>, 'classN
 export function SelectField({ label, beside, hint, error, className, ...select }: SelectFieldProps) {
   return (
     <FieldFrame label={label} beside={beside} hint={hint} error={error} className={className}>
-      {(parts) => <select {...select} {...parts} className={classNames(CONTROL, 'h-12')} />}
+      {(parts) => <Select {...select} {...parts} className={classNames(CONTROL, 'h-12')} />}
     </FieldFrame>
   );
 }

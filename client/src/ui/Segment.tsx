@@ -23,7 +23,7 @@ export function Segment<Value extends string>({
     <div
       role="group"
       aria-label={label}
-      className="rounded-control border-line bg-sheet text-data inline-flex border"
+      className="rounded-control border-line bg-sheet text-data inline-flex w-fit border"
     >
       {options.map((option) => (
         <button

@@ -89,7 +89,7 @@ function DesignRow({ design, scale, bandCents, to, refusals }: DesignRowProps) {
       <div role="cell" className="max-tablet:my-2 min-w-0 overflow-hidden [grid-area:draw]">
         {scale !== null && <RackDrawing outline={design.outline} plumb={design.plumb} scale={scale} />}
       </div>
-      <div role="cell" className="[grid-area:low]">
+      <div role="cell" className="max-tablet:flex max-tablet:items-baseline max-tablet:gap-2 [grid-area:low]">
         <p className="font-semibold">
           {design.lowestNote === null ? '–' : <NoteName note={design.lowestNote} />}
         </p>
@@ -129,12 +129,14 @@ function Furthest({ register, furthest, bandCents }: FurthestProps) {
   if (furthest === null) return <span className="text-ink3 max-desk:hidden">–</span>;
   const isOutside = Math.abs(furthest.cents) > bandCents;
   return (
-    <span className={classNames('whitespace-nowrap', isOutside && 'font-bold')}>
-      <span className="desk:hidden mr-1 align-[-3px]">
+    <span className={classNames('inline-flex items-center whitespace-nowrap', isOutside && 'font-bold')}>
+      <span className="desk:hidden mr-1 inline-flex">
         <BobMark register={register} />
       </span>
       <span className="desk:hidden sr-only">register {register}, </span>
-      <NoteName note={furthest.note} /> {formatCents(furthest.cents)}
+      <span>
+        <NoteName note={furthest.note} /> {formatCents(furthest.cents)}
+      </span>
     </span>
   );
 }

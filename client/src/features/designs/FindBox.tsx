@@ -48,7 +48,7 @@ export function FindBox({ search, onSearch }: FindBoxProps) {
   }, []);
 
   return (
-    <label className="tablet:w-75 relative block w-full">
+    <label className="tablet:w-60 desk:w-75 relative block w-full">
       <span className="sr-only">Find a design</span>
       <input
         ref={input}
@@ -63,7 +63,7 @@ export function FindBox({ search, onSearch }: FindBoxProps) {
         className="rounded-control border-line bg-sheet text-body placeholder:text-ink3 target w-full border pr-10 pl-3 max-[1100px]:text-[16px]"
       />
       {singleKeysPreference.use() === 'on' && typed === '' && (
-        <kbd className="rounded-chip border-hair text-small text-ink3 pointer-events-none absolute top-1/2 right-3 -translate-y-1/2 border px-1.5 font-sans pointer-coarse:hidden">
+        <kbd className="rounded-chip border-hair text-small text-ink3 pointer-events-none absolute top-1/2 right-3 -translate-y-1/2 border px-1.5 font-sans max-[1100px]:hidden pointer-coarse:hidden">
           /
         </kbd>
       )}

@@ -26,7 +26,7 @@ export function RackHead({ list, onChange, scale, unit, drawingRef }: RackHeadPr
           <span className="sr-only">Drawn to scale; the rule counts from the foot</span>
           {scale !== null && <RackRule scale={scale} unit={unit} />}
         </div>
-        <SortHead {...sort} column="lowest-note" area="[grid-area:low] max-desk:hidden">
+        <SortHead {...sort} column="lowest-note" area="[grid-area:low]">
           Lowest note
         </SortHead>
         <div role="columnheader" className="max-desk:sr-only min-h-6 content-center [grid-area:state]">
@@ -44,7 +44,7 @@ export function RackHead({ list, onChange, scale, unit, drawingRef }: RackHeadPr
         >
           Furthest 2
         </div>
-        <SortHead {...sort} column="changed" area="text-right [grid-area:changed] max-desk:hidden">
+        <SortHead {...sort} column="changed" area="text-right [grid-area:changed]">
           Changed
         </SortHead>
         <div role="columnheader" className="[grid-area:menu]">
@@ -67,11 +67,20 @@ function SortHead({ list, onChange, column, area, children }: SortHeadProps) {
   const isSorted = list.sort === column;
   const direction = list.order === 'asc' ? 'ascending' : 'descending';
   return (
-    <div role="columnheader" aria-sort={isSorted ? direction : 'none'} className={area}>
+    <div
+      role="columnheader"
+      aria-sort={isSorted ? direction : 'none'}
+      className={classNames('max-desk:sr-only', area)}
+    >
+      {/* Where the heads are only read out, the order is chosen beside the find box. */}
+      <span className="desk:hidden">{children}</span>
       <button
         type="button"
         onClick={() => onChange(sortList(list, column))}
-        className={classNames('rounded-chip hover:text-ink min-h-6', isSorted && 'text-ink2 font-semibold')}
+        className={classNames(
+          'max-desk:hidden rounded-chip hover:text-ink min-h-6',
+          isSorted && 'text-ink2 font-semibold',
+        )}
       >
         {children}
         {isSorted && <span aria-hidden="true">{list.order === 'asc' ? ' ↑' : ' ↓'}</span>}

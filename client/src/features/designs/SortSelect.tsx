@@ -1,4 +1,5 @@
 import type { ListDesignsQuery } from '#shared/contract/designs.ts';
+import { Select } from '../../ui/Select.tsx';
 import { changeList } from './list-address.ts';
 
 const CHOICES = [
@@ -25,19 +26,19 @@ export function SortSelect({ list, onChange }: SortSelectProps) {
     onChange(changeList(list, { sort, order }));
   };
   return (
-    <label className="text-data text-ink3 desk:hidden flex items-center gap-2">
-      Order
-      <select
+    <label className="desk:hidden">
+      <span className="sr-only">Order</span>
+      <Select
         value={`${list.sort} ${list.order}`}
         onChange={(event) => handleChange(event.currentTarget.value)}
-        className="rounded-control border-line bg-sheet text-ink target border px-2"
+        className="rounded-control border-line bg-sheet text-ink target border pl-3"
       >
         {CHOICES.map(([key, label]) => (
           <option key={key} value={key}>
             {label}
           </option>
         ))}
-      </select>
+      </Select>
     </label>
   );
 }

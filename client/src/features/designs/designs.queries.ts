@@ -2,8 +2,10 @@ import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query
 import {
   designListSchema,
   designSummarySchema,
+  draftSchema,
   type DesignList,
   type DesignSummary,
+  type Draft,
   type ListDesignsQuery,
 } from '#shared/contract/designs.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
@@ -21,6 +23,14 @@ export const designQuery = (id: number) =>
     queryKey: ['designs', 'one', id],
     queryFn: ({ signal }): Promise<DesignSummary> =>
       apiRequest({ path: `/api/designs/${id}`, schema: designSummarySchema, signal }),
+  });
+
+/** The draft as it is stored, to begin another design from. */
+export const draftQuery = (id: number) =>
+  queryOptions({
+    queryKey: ['designs', 'draft', id],
+    queryFn: ({ signal }): Promise<Draft> =>
+      apiRequest({ path: `/api/designs/${id}/draft`, schema: draftSchema, signal }),
   });
 
 /** Every change of a design moves it in the lists and changes their counts. */
