@@ -110,23 +110,3 @@ export function reverseTwoPort(cells: Cells, at: number): void {
   cells[at + 6] = re;
   cells[at + 7] = im;
 }
-
-/**
- * Impedance seen through a two-port that an impedance ends: (A·Z + B)/(C·Z + D).
- *
- * @param cells - where the two-port and the load lie
- * @param at - address of the two-port
- * @param load - address of the load's real and imaginary part, Pa·s/m³; replaced by what is seen
- * @returns nothing; the result is in the cells
- */
-export function seeThrough(cells: Cells, at: number, load: number): void {
-  const zr = cell(cells, load);
-  const zi = cell(cells, load + 1);
-  const nr = cell(cells, at) * zr - cell(cells, at + 1) * zi + cell(cells, at + 2);
-  const ni = cell(cells, at) * zi + cell(cells, at + 1) * zr + cell(cells, at + 3);
-  const dr = cell(cells, at + 4) * zr - cell(cells, at + 5) * zi + cell(cells, at + 6);
-  const di = cell(cells, at + 4) * zi + cell(cells, at + 5) * zr + cell(cells, at + 7);
-  const scale = 1 / (dr * dr + di * di);
-  cells[load] = (nr * dr + ni * di) * scale;
-  cells[load + 1] = (ni * dr - nr * di) * scale;
-}

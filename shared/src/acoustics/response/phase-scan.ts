@@ -110,15 +110,8 @@ export function reflectionPhase(
   return Math.atan2(2 * im * unit, re * re + im * im - unit * unit);
 }
 
-/**
- * Phase at which a resonance lies.
- *
- * @param order - counts the resonances of its kind, 1 the lowest
- * @param track - the fingering's
- * @param maxima - which kind
- * @returns rad
- */
-export function levelOf(order: number, track: PhaseTrack, maxima: boolean): number {
+// Phase at which the resonance of an order lies if none before it was lost.
+function levelOf(order: number, track: PhaseTrack, maxima: boolean): number {
   if (!maxima) return Math.PI - 2 * Math.PI * order;
   // A column that is shut all along begins at a maximum, that of no frequency at all, which does not count.
   return cell(track.phases, 0) > 0 ? 2 * Math.PI * (1 - order) : -2 * Math.PI * order;

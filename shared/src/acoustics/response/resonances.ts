@@ -1,6 +1,6 @@
 import { cell } from '../complex/cells.ts';
 import { phaseCrossing } from './phase-crossing.ts';
-import { levelOf, reflectionPhase, scanPhases, type Probe, type ResonanceSearch } from './phase-scan.ts';
+import { reflectionPhase, scanPhases, type Probe, type ResonanceSearch } from './phase-scan.ts';
 import { nearestTurn } from './phase-track.ts';
 import { tuneFingering, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
 
@@ -34,23 +34,34 @@ export function findResonances(
   return scanPhases(prepared, fingerings, search).map(crossings);
 }
 
-// One resonance for every level that the phase falls through.
+// One resonance for every time that the phase falls through a level. Where the holes leak it may rise again and fall through
+// the same level once more, which is another resonance.
 function crossings(probe: Probe): Resonance[] {
-  const { track, search, prepared } = probe;
+  const { track, search, prepared, fingering } = probe;
   const found: Resonance[] = [];
-  let i = 1;
-  for (let order = 1; order <= search.count; order += 1) {
-    const level = levelOf(order, track, search.maxima);
-    while (i < track.count && cell(track.phases, i) > level) i += 1;
-    if (i >= track.count) break;
-    const frequency = phaseCrossing(track, i, level, (at, expected) => {
-      tuneFingering(prepared, probe.fingering, at, search.coupling);
-      return nearestTurn(reflectionPhase(prepared, probe.fingering, search.coupling), expected);
-    });
+  const sampleAt = (frequency: number, expected: number) => {
+    tuneFingering(prepared, fingering, frequency, search.coupling);
+    return nearestTurn(reflectionPhase(prepared, fingering, search.coupling), expected);
+  };
+  for (let i = 1; i < track.count && found.length < search.count; i += 1) {
+    const level = levelBelow(cell(track.phases, i - 1), search.maxima);
+    if (cell(track.phases, i) > level) continue;
+    const frequency = phaseCrossing(track, i, level, sampleAt);
     const magnitude = realImpedance(prepared, search.maxima);
-    found.push({ order, frequency, magnitude, weak: magnitude > 1 / 3 && magnitude < 3 });
+    found.push({
+      order: found.length + 1,
+      frequency,
+      magnitude,
+      weak: magnitude > 1 / 3 && magnitude < 3,
+    });
   }
   return found;
+}
+
+// The next level under a phase: whole turns for maxima, odd halves of one for minima.
+function levelBelow(phase: number, maxima: boolean): number {
+  const offset = maxima ? 0 : Math.PI;
+  return offset + 2 * Math.PI * (Math.ceil((phase - offset) / (2 * Math.PI)) - 1);
 }
 
 // The impedance at the root: its imaginary part is 0 there, and a step short of it only the real one is right.
