@@ -30,7 +30,7 @@ export function allRoutes(dependencies: Dependencies): Route[] {
     ...membersRoutes(),
     ...designRoutes(),
     ...draftRoutes(),
-    ...predictionRoutes(),
+    ...predictionRoutes(dependencies),
     ...sheetRoutes(dependencies),
     ...healthRoutes(dependencies),
   ];

@@ -1,13 +1,13 @@
 import { createServer, type Server } from 'node:http';
 import { once } from 'node:events';
 import type { AddressInfo } from 'node:net';
-import { pino, type Logger } from 'pino';
+import { pino } from 'pino';
 import { createApp } from './app.ts';
 import { readConfig, StartRefusal, type Config } from './config.ts';
 import { connectDatabase, type Database } from './db/connect.ts';
+import { gatherDependencies, type Dependencies } from './dependencies.ts';
 import { migrateDatabase } from './db/migrate.ts';
 import { loadDemoWorkshop } from './demo/load-demo-workshop.ts';
-import { SessionDirectory } from './identity/session-directory.ts';
 
 /** How long requests that are under way may take to finish once we are asked to stop, ms. */
 const PATIENCE_MS = 10_000;
@@ -18,8 +18,9 @@ async function main(): Promise<void> {
   const database = connectDatabase(config.databaseUrl);
   try {
     await prepareDatabase(database, config);
-    const server = await listen(config, database, log);
-    stopOnSignal(server, database, log);
+    const dependencies = gatherDependencies({ config: config.app, database, log });
+    const server = await listen(config, dependencies);
+    stopOnSignal(server, dependencies);
     const { port } = server.address() as AddressInfo;
     process.stdout.write(`Borewright answers at http://${config.host}:${port}\n`);
   } catch (error) {
@@ -41,9 +42,8 @@ async function prepareDatabase(database: Database, config: Config): Promise<void
   if (config.loadDemo) await loadDemoWorkshop({ database, config: config.app });
 }
 
-async function listen(config: Config, database: Database, log: Logger): Promise<Server> {
-  const sessions = new SessionDirectory(database);
-  const server = createServer(createApp({ config: config.app, database, log, sessions }));
+async function listen(config: Config, dependencies: Dependencies): Promise<Server> {
+  const server = createServer(createApp(dependencies));
   server.listen(config.port, config.host);
   try {
     await once(server, 'listening');
@@ -56,7 +56,7 @@ async function listen(config: Config, database: Database, log: Logger): Promise<
   return server;
 }
 
-function stopOnSignal(server: Server, database: Database, log: Logger): void {
+function stopOnSignal(server: Server, { database, engine, log }: Dependencies): void {
   let stopping = false;
   const stop = () => {
     if (stopping) return;
@@ -64,7 +64,9 @@ function stopOnSignal(server: Server, database: Database, log: Logger): void {
     const force = setTimeout(() => server.closeAllConnections(), PATIENCE_MS);
     server.close(() => {
       clearTimeout(force);
-      database.sequelize.close().catch((error: unknown) => log.error({ err: error }, 'closing the pool'));
+      Promise.all([engine.close(), database.sequelize.close()]).catch((error: unknown) => {
+        log.error({ err: error }, 'closing what the server had open');
+      });
     });
     server.closeIdleConnections();
   };

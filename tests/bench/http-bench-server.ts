@@ -7,8 +7,8 @@ import { createApp } from '../../server/src/app.ts';
 import type { AppConfig } from '../../server/src/config.ts';
 import { connectDatabase, type Database } from '../../server/src/db/connect.ts';
 import { migrateDatabase } from '../../server/src/db/migrate.ts';
+import { gatherDependencies } from '../../server/src/dependencies.ts';
 import { loadDemoWorkshop } from '../../server/src/demo/load-demo-workshop.ts';
-import { SessionDirectory } from '../../server/src/identity/session-directory.ts';
 
 /** What this process tells the one that measures it. */
 export interface BenchAddresses {
@@ -51,9 +51,8 @@ async function listen(listener: RequestListener): Promise<string> {
 const database = connectDatabase(process.env.BENCH_DATABASE_URL ?? '');
 await migrateDatabase(database.sequelize);
 await loadDemoWorkshop({ database, config });
-const sessions = new SessionDirectory(database);
 const addresses: BenchAddresses = {
-  ours: await listen(createApp({ config, database, log: pino({ level: 'silent' }), sessions })),
+  ours: await listen(createApp(gatherDependencies({ config, database, log: pino({ level: 'silent' }) }))),
   bare: await listen(bareApp(database)),
 };
 process.send?.(addresses);

@@ -5,8 +5,8 @@ import { pino } from 'pino';
 import { createApp } from '../../server/src/app.ts';
 import { connectDatabase } from '../../server/src/db/connect.ts';
 import { migrateDatabase } from '../../server/src/db/migrate.ts';
+import { gatherDependencies } from '../../server/src/dependencies.ts';
 import { loadDemoWorkshop } from '../../server/src/demo/load-demo-workshop.ts';
-import { SessionDirectory } from '../../server/src/identity/session-directory.ts';
 import { createDatabase } from './create-database.ts';
 
 export interface RunningApp {
@@ -36,9 +36,8 @@ export async function startApp({ databaseUrl, clientFolder }: AppSettings): Prom
   };
   await migrateDatabase(database.sequelize);
   await loadDemoWorkshop({ database, config });
-  const sessions = new SessionDirectory(database);
-  const log = pino({ level: 'silent' });
-  const server = createServer(createApp({ config, database, log, sessions }));
+  const dependencies = gatherDependencies({ config, database, log: pino({ level: 'silent' }) });
+  const server = createServer(createApp(dependencies));
   const address = await listen(server);
   return {
     address,
@@ -46,6 +45,7 @@ export async function startApp({ databaseUrl, clientFolder }: AppSettings): Prom
       server.closeAllConnections();
       server.close();
       await once(server, 'close');
+      await dependencies.engine.close();
       await database.sequelize.close();
       await own.drop();
     },

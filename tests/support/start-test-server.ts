@@ -7,8 +7,7 @@ import { createApp } from '../../server/src/app.ts';
 import type { AppConfig } from '../../server/src/config.ts';
 import { connectDatabase } from '../../server/src/db/connect.ts';
 import { migrateDatabase } from '../../server/src/db/migrate.ts';
-import type { Dependencies } from '../../server/src/dependencies.ts';
-import { SessionDirectory } from '../../server/src/identity/session-directory.ts';
+import { gatherDependencies, type Dependencies } from '../../server/src/dependencies.ts';
 import { createDatabase } from './create-database.ts';
 
 export interface TestServer extends Dependencies {
@@ -31,18 +30,15 @@ export async function startTestServer(changes: Partial<AppConfig> = {}): Promise
   const own = await createDatabase(inject('databaseUrl'));
   const database = connectDatabase(own.url);
   await migrateDatabase(database.sequelize);
-  const dependencies = {
-    config: { ...CONFIG, ...changes },
-    database,
-    log: pino({ level: 'silent' }),
-    sessions: new SessionDirectory(database),
-  };
+  const config = { ...CONFIG, ...changes };
+  const dependencies = gatherDependencies({ config, database, log: pino({ level: 'silent' }) });
   const server = createServer(createApp(dependencies));
   server.listen(0, '127.0.0.1');
   await once(server, 'listening');
   afterAll(async () => {
     server.closeAllConnections();
     server.close();
+    await dependencies.engine.close();
     await database.sequelize.close();
     await own.drop();
   });

@@ -1,7 +1,6 @@
 import { EngineInputError } from '#shared/acoustics/engine-input-error.ts';
-import { designSensitivities } from '#shared/analysis/design-sensitivities.ts';
 import { predictDesign } from '#shared/analysis/predict-design.ts';
-import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/prediction.ts';
+import type { DesignPrediction } from '#shared/analysis/prediction.ts';
 import { fieldPath } from '#shared/contract/problem.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { documentFaults } from '#shared/document/document-faults.ts';
@@ -19,18 +18,10 @@ export function predictDocument(document: DesignDocument): DesignPrediction {
     const errors = faults.map(({ path, message }) => ({ path: fieldPath(['document', ...path]), message }));
     throw unprocessable(first.message, errors);
   }
-  return answering(() => predictDesign(document));
-}
-
-export function sensitivitiesOf(document: DesignDocument): DesignSensitivities {
-  return answering(() => designSensitivities(document));
-}
-
-/** The engine's own refusals name a field of the document too. */
-function answering<T>(compute: () => T): T {
   try {
-    return compute();
+    return predictDesign(document);
   } catch (error) {
+    // The engine's own refusals name a field of the document too.
     if (!(error instanceof EngineInputError)) throw error;
     throw unprocessable(error.message, [{ path: `document.${error.field}`, message: error.message }]);
   }

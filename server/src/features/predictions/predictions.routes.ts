@@ -1,9 +1,10 @@
 import { designIdParams } from '#shared/contract/designs.ts';
 import { storedPredictionSchema } from '#shared/contract/prediction.ts';
+import type { Dependencies } from '../../dependencies.ts';
 import { route, type Route } from '../../http/route.ts';
 import { predictStoredDraft, readPrediction } from './stored-prediction.ts';
 
-export function predictionRoutes(): Route[] {
+export function predictionRoutes(dependencies: Dependencies): Route[] {
   const shared = {
     path: '/designs/:id/draft/prediction',
     tag: 'Predictions',
@@ -25,7 +26,9 @@ export function predictionRoutes(): Route[] {
       summary: 'Predict the stored draft anew, with the cents of each dimension, and save that.',
       answer: { status: 200, description: 'The prediction, saved.', schema: storedPredictionSchema },
       refusals: [422],
-      handle: async ({ scope, params }) => ({ body: await predictStoredDraft(scope, params.id) }),
+      handle: async ({ scope, params }) => ({
+        body: await predictStoredDraft(dependencies, scope, params.id),
+      }),
     }),
   ];
 }

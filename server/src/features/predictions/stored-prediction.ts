@@ -1,10 +1,12 @@
 import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/prediction.ts';
 import type { StoredPrediction } from '#shared/contract/prediction.ts';
 import type { WorkshopScope } from '../../db/workshop-scope.ts';
+import type { Dependencies } from '../../dependencies.ts';
+import type { EnginePool } from '../../jobs/engine-pool.ts';
 import { notFound } from '../../http/http-error.ts';
 import type { PredictionRow } from '../../models/prediction.ts';
 import { documentHash } from '../../predicting/document-hash.ts';
-import { predictDocument, sensitivitiesOf } from '../../predicting/predict-document.ts';
+import { predictDocument } from '../../predicting/predict-document.ts';
 import { storedDocument } from '../../predicting/stored-document.ts';
 
 export async function readPrediction(scope: WorkshopScope, designId: number): Promise<StoredPrediction> {
@@ -17,15 +19,19 @@ export async function readPrediction(scope: WorkshopScope, designId: number): Pr
 }
 
 /** Predicts what is stored, never what a client sends: the answer belongs to a version of the draft. */
-export async function predictStoredDraft(scope: WorkshopScope, designId: number): Promise<StoredPrediction> {
+export async function predictStoredDraft(
+  { engine }: Dependencies,
+  scope: WorkshopScope,
+  designId: number,
+): Promise<StoredPrediction> {
   await scope.visibleDesign(designId);
   // Someone may save while we compute; then the figures are of an older version, and we begin again.
-  while (!(await predictNewest(scope, designId)));
+  while (!(await predictNewest(engine, scope, designId)));
   return readPrediction(scope, designId);
 }
 
 /** Returns whether the version that was predicted was still the newest when its figures were stored. */
-async function predictNewest(scope: WorkshopScope, designId: number): Promise<boolean> {
+async function predictNewest(engine: EnginePool, scope: WorkshopScope, designId: number): Promise<boolean> {
   const draft = await scope.drafts.findOne({ where: { designId } });
   if (draft === null) throw notFound();
   const document = storedDocument(draft.document);
@@ -35,7 +41,7 @@ async function predictNewest(scope: WorkshopScope, designId: number): Promise<bo
       engine: prediction.engine,
       documentHash: documentHash(document),
       prediction: JSON.stringify(prediction),
-      sensitivities: JSON.stringify(sensitivitiesOf(document)),
+      sensitivities: JSON.stringify(await engine.sensitivities(document)),
       computedAt: new Date(),
     },
     { where: { designId, draftVersion: draft.version } },

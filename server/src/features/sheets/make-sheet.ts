@@ -6,13 +6,13 @@ import { notFound } from '../../http/http-error.ts';
 import type { Reply } from '../../http/route.ts';
 import { presentWorkshop } from '../../identity/present-workshop.ts';
 import { presentName } from '../../models/present-name.ts';
-import { predictDocument, sensitivitiesOf } from '../../predicting/predict-document.ts';
+import { predictDocument } from '../../predicting/predict-document.ts';
 import { storedDocument } from '../../predicting/stored-document.ts';
 import { drawDrillingSheet } from '../../sheets/draw-drilling-sheet.ts';
 
 /** Draws the sheet of the stored draft; every figure on it is worked out from that draft now. */
 export async function makeSheet(
-  { database }: Dependencies,
+  { database, engine }: Dependencies,
   scope: WorkshopScope,
   { designId, paper, unit }: { designId: number } & z.output<typeof sheetQuery>,
 ): Promise<Reply<unknown>> {
@@ -24,10 +24,12 @@ export async function makeSheet(
   if (draft === null || workshopRow === null) throw notFound();
   const document = storedDocument(draft.document);
   const workshop = presentWorkshop(workshopRow);
+  const prediction = predictDocument(document);
+  const sensitivities = await engine.sensitivities(document);
   const stream = drawDrillingSheet({
     document,
-    prediction: predictDocument(document),
-    sensitivities: sensitivitiesOf(document),
+    prediction,
+    sensitivities,
     workshop,
     revision: { number: design.revisionNumber, state: 'draft', draftSavedAt: draft.savedAt },
     printedAt: new Date(),
