@@ -8,6 +8,8 @@ export interface Slice {
   at: number;
   duct: number;
   conical: boolean;
+  mouth: BorePoint;
+  foot: BorePoint;
 }
 
 /** Slices that belong together: their two-port, and the phase that a wave turns by on the way there and back. */
@@ -34,14 +36,21 @@ export interface Duct {
   radius: number;
 }
 
-/** Slices of a lossy cone change in radius by no more than this factor. */
-const SLICE_RATIO = 1.06;
+/** Slices of a lossy cone change in radius by about this factor. */
+const SLICE_RATIO = 1.05;
 /** m; also for a column whose air changes along it. */
 const SLICE_LENGTH = 0.02;
 /** Counting the turns of a wave stays certain while a link's area changes by less than e². */
 const LINK_CHANGE = 2;
+/** A cone whose radius changes by more than e^this is cut into slices of equal ratio instead of equal length. */
+const STEEP_CHANGE = 1;
 /** Below this difference of radius, m, a cone is a cylinder. */
 const EVEN = 1e-9;
+
+// Share of a cone's length that lies before a share of its slices.
+function shareAlong(slices: number, ratio: number): number {
+  return Math.abs(Math.log(ratio)) <= STEEP_CHANGE ? slices : (ratio ** slices - 1) / (ratio - 1);
+}
 
 /**
  * Lays out the cells of a column and remembers what has to be in them before the first frequency.
@@ -117,7 +126,7 @@ export class BorePlan {
     const at = this.take(SLICE_CELLS);
     this.fixed.push([at, from.radius], [at + 1, to.radius], [at + 2, Math.abs(to.position - from.position)]);
     const conical = Math.abs(to.radius - from.radius) >= EVEN;
-    return { at, duct: this.duct((from.radius + to.radius) / 2, medium), conical };
+    return { at, duct: this.duct((from.radius + to.radius) / 2, medium), conical, mouth: from, foot: to };
   }
 
   /**
@@ -132,13 +141,16 @@ export class BorePlan {
     const length = Math.abs(to.position - from.position);
     if (length === 0) return [];
     const count = this.sliceCount(from, to, medium);
-    const point = (share: number): BorePoint => ({
-      position: from.position + share * (to.position - from.position),
-      radius: from.radius + share * (to.radius - from.radius),
-    });
+    const point = (i: number): BorePoint => {
+      const share = shareAlong(i / count, to.radius / from.radius);
+      return {
+        position: from.position + share * (to.position - from.position),
+        radius: from.radius + share * (to.radius - from.radius),
+      };
+    };
     return Array.from({ length: count }, (_, i) => {
-      const air = medium ?? this.mediumAt(point((i + 0.5) / count).position);
-      return this.slice(point(i / count), point((i + 1) / count), air);
+      const air = medium ?? this.mediumAt(point(i + 0.5).position);
+      return this.slice(point(i), point(i + 1), air);
     });
   }
 
@@ -153,7 +165,9 @@ export class BorePlan {
   negativeSlice(radius: number, length: number, medium: number): Slice {
     const at = this.take(SLICE_CELLS);
     this.fixed.push([at, radius], [at + 1, radius], [at + 2, length]);
-    return { at, duct: this.duct(radius, medium), conical: false };
+    const mouth = { position: 0, radius };
+    const foot = { position: length, radius };
+    return { at, duct: this.duct(radius, medium), conical: false, mouth, foot };
   }
 
   /**
@@ -171,17 +185,16 @@ export class BorePlan {
       const parts = this.slices(from, to);
       const each = Math.abs(2 * Math.log(to.radius / from.radius)) / Math.max(parts.length, 1);
       change += parts.length === 0 ? each : 0;
-      parts.forEach((slice, i) => {
+      for (const slice of parts) {
         change += each;
         if (change > LINK_CHANGE || links.length === 0) {
-          links.push(this.link(from, (i / parts.length) * (to.position - from.position), to));
+          links.push(this.link(slice.mouth));
           change = each;
         }
         const link = links.at(-1);
-        if (link === undefined) return;
-        link.slices.push(slice);
-        link.footRadius = from.radius + ((i + 1) / parts.length) * (to.radius - from.radius);
-      });
+        link?.slices.push(slice);
+        if (link !== undefined) link.footRadius = slice.foot.radius;
+      }
     });
     const only = links.length === 1 ? links[0] : undefined;
     return { links, twoPort: only?.twoPort ?? this.take(TWO_PORT_CELLS) };
@@ -198,15 +211,14 @@ export class BorePlan {
     return cells;
   }
 
-  private link(from: BorePoint, along: number, to: BorePoint): Link {
-    const radius = from.radius + (along / (to.position - from.position)) * (to.radius - from.radius);
+  private link({ position, radius }: BorePoint): Link {
     return {
       slices: [],
       twoPort: this.take(TWO_PORT_CELLS),
       turn: this.take(1),
       mouthRadius: radius,
       footRadius: radius,
-      medium: this.mediumAt(from.position + along),
+      medium: this.mediumAt(position),
     };
   }
 

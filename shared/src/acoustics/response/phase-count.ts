@@ -126,11 +126,11 @@ function roughAngle(y: number, x: number): number {
 }
 
 function passMouth(prepared: PreparedColumn): number {
-  const { cells, mouth, inputRadius } = prepared;
-  scaleTo(prepared, inputRadius);
+  const { cells, mouth, phaseRadius } = prepared;
+  scaleTo(prepared, phaseRadius);
   before.set(state);
   passTwoPort(cells, mouth.twoPort, state);
-  const unit = unitImpedance(prepared, inputRadius);
+  const unit = unitImpedance(prepared, phaseRadius);
   if (mouth.embouchure === null) {
     turnBy(unit);
     return cell(state, PHASE);

@@ -38,6 +38,7 @@ export function phaseCrossing(
   for (let i = 0; i < MOST_STEPS; i += 1) {
     const share = (at - low) / (high - low);
     const phase = sample(at, lowPhase + share * (highPhase - lowPhase));
+    if (phase === level) return at;
     if (phase > level) {
       low = at;
       lowPhase = phase;
@@ -91,5 +92,5 @@ function guess(known: number, low: number, high: number): number {
     }
     sum += weight;
   }
-  return sum > low && sum < high ? sum : (low + high) / 2;
+  return sum >= low && sum <= high ? sum : (low + high) / 2;
 }

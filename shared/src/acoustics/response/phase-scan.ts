@@ -34,6 +34,8 @@ const LARGEST_RISE = 0.4;
 /** An interval looked into is settled once it is this share of the grid's and its step this small, rad. */
 const SETTLED_SHARE = 1 / 8;
 const SETTLED_STEP = 0.8;
+/** Share of the power that comes back, below which losses and radiation may let a pair of resonances vanish. */
+const LEAKING = 0.7;
 /** Hz; nothing in an instrument is narrower. */
 const NARROWEST = 1e-3;
 /** A fall below the first lets the next grid sample be left out, below the second the next three, rad. */
@@ -104,10 +106,23 @@ export function reflectionPhase(
   coupling: boolean,
 ): number {
   const at = coupling ? coupledImpedance(prepared, fingering) : chainImpedance(prepared, fingering);
-  const unit = prepared.inputImpedance;
+  const unit = referenceImpedance(prepared);
   const re = cell(prepared.cells, at);
   const im = cell(prepared.cells, at + 1);
   return Math.atan2(2 * im * unit, re * re + im * im - unit * unit);
+}
+
+// A narrow input to a wide cone would turn its whole circle within a hair of each resonance; a middle radius spreads it.
+function referenceImpedance({ inputImpedance, inputRadius, phaseRadius }: PreparedColumn): number {
+  return inputImpedance * (inputRadius / phaseRadius) ** 2;
+}
+
+// Share of the power that comes back.
+function reflectedPower(prepared: PreparedColumn): number {
+  const unit = referenceImpedance(prepared);
+  const re = cell(prepared.cells, prepared.system.impedance);
+  const im = cell(prepared.cells, prepared.system.impedance + 1);
+  return ((re - unit) ** 2 + im * im) / ((re + unit) ** 2 + im * im);
 }
 
 // Phase at which the resonance of an order lies if none before it was lost.
@@ -120,7 +135,8 @@ function levelOf(order: number, track: PhaseTrack, maxima: boolean): number {
 // Puts a sample at the frequency that the column is set to into the track.
 function sample({ prepared, fingering, search, track }: Probe, place: number, frequency: number): void {
   const phase = reflectionPhase(prepared, fingering, search.coupling);
-  track.insert(place, { frequency, phase, counted: countedPhase(prepared, fingering) });
+  const reflected = reflectedPower(prepared);
+  track.insert(place, { frequency, phase, reflected, counted: countedPhase(prepared, fingering) });
 }
 
 // Whether all resonances wanted lie below the last sample, or would if none had leaked away.
@@ -151,7 +167,9 @@ function isSettled({ track, step }: Probe, i: number): boolean {
   const turn = cell(track.phases, i) - cell(track.phases, i - 1);
   const counted = cell(track.counts, i) - cell(track.counts, i - 1);
   if (Math.abs(counted - turn) < Math.PI && turn > -LARGEST_FALL && turn < LARGEST_RISE) return true;
-  return (width <= SETTLED_SHARE * step && Math.abs(turn) <= SETTLED_STEP) || width < NARROWEST;
+  const reflected = Math.min(cell(track.reflected, i), cell(track.reflected, i - 1));
+  const leaks = reflected < LEAKING && width <= SETTLED_SHARE * step;
+  return (leaks && Math.abs(turn) <= SETTLED_STEP) || width < NARROWEST;
 }
 
 // How many grid steps on the next sample lies: more where the phase falls slowly.

@@ -6,6 +6,8 @@ export interface PhaseSample {
   frequency: number;
   /** Turns of no account. */
   phase: number;
+  /** Share of the power that comes back. */
+  reflected: number;
   /** With its turns as counted along the bore. */
   counted: number;
 }
@@ -18,6 +20,8 @@ export class PhaseTrack {
   phases = new Float64Array(64);
   /** Phase with its turns as counted along the bore at each sample, rad. */
   counts = new Float64Array(64);
+  /** Share of the power that comes back at each sample. */
+  reflected = new Float64Array(64);
   count = 0;
 
   /**
@@ -29,11 +33,12 @@ export class PhaseTrack {
    */
   insert(place: number, sample: PhaseSample): void {
     if (this.count === this.frequencies.length) this.grow();
-    for (const values of [this.frequencies, this.phases, this.counts]) {
+    for (const values of [this.frequencies, this.phases, this.counts, this.reflected]) {
       values.copyWithin(place + 1, place, this.count);
     }
     this.frequencies[place] = sample.frequency;
     this.counts[place] = sample.counted;
+    this.reflected[place] = sample.reflected;
     const phase = place === 0 ? sample.phase : nearestTurn(sample.phase, cell(this.phases, place - 1));
     this.phases[place] = phase;
     this.count += 1;
@@ -44,7 +49,7 @@ export class PhaseTrack {
   }
 
   private grow(): void {
-    for (const key of ['frequencies', 'phases', 'counts'] as const) {
+    for (const key of ['frequencies', 'phases', 'counts', 'reflected'] as const) {
       const wider = new Float64Array(2 * this[key].length);
       wider.set(this[key]);
       this[key] = wider;

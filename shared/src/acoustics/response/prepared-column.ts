@@ -38,6 +38,8 @@ export interface PreparedColumn {
   /** ρc/S at the input, outside air: the unit of input impedances, Pa·s/m³. */
   inputImpedance: number;
   inputRadius: number;
+  /** Radius of the duct that reflections at the input are reckoned against, m: between the input's and the widest. */
+  phaseRadius: number;
   /** Of the bore from the input to the foot, m. */
   length: number;
   /** Of the bore, m. */
@@ -71,6 +73,7 @@ export function prepareColumn(
   const footRadiation = plan.take(2);
   const footTwoPort = plan.take(TWO_PORT_CELLS);
   const inputRadius = boreRadiusAt(column.bore, column.input);
+  const widestRadius = Math.max(...column.bore.map((point) => point.radius));
   const footRadius = column.bore.at(-1)?.radius ?? NaN;
   const prepared: PreparedColumn = {
     cells: plan.cells(),
@@ -89,7 +92,8 @@ export function prepareColumn(
     inputImpedance: (column.outside.density * column.outside.speedOfSound) / (Math.PI * inputRadius ** 2),
     inputRadius,
     length: (column.bore.at(-1)?.position ?? NaN) - column.input,
-    widestRadius: Math.max(...column.bore.map((point) => point.radius)),
+    widestRadius,
+    phaseRadius: Math.sqrt(inputRadius * widestRadius),
     speedOfSound: column.outside.speedOfSound,
     playsMaxima: column.mouth.kind === 'reed' || column.mouth.kind === 'ideal-closed',
     frequency: 0,
