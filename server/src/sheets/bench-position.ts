@@ -6,6 +6,8 @@ import type { SheetInput } from './sheet-input.ts';
 export interface NumberedHole {
   /** From 1 at the mouth end down. */
   number: number;
+  /** What stands at the hole on paper: its own name where all holes have short ones, else its number. */
+  label: string;
   /** Where it stands in the document, whose paths name it by index. */
   index: number;
   hole: ToneHole;
@@ -13,10 +15,24 @@ export interface NumberedHole {
 
 /** Holes from the mouth end down; of two at one position the first in the document leads. */
 export function numberedHoles(document: DesignDocument): NumberedHole[] {
+  const areNamed = haveShortNames(document.holes);
   return document.holes
     .map((hole, index) => ({ hole, index }))
     .sort((a, b) => a.hole.positionMm - b.hole.positionMm || a.index - b.index)
-    .map((entry, at) => ({ ...entry, number: at + 1 }));
+    .map((entry, at) => ({
+      ...entry,
+      number: at + 1,
+      label: areNamed ? entry.hole.name.trim() : String(at + 1),
+    }));
+}
+
+/** Longest name that fits over a hole; two ways of counting the same holes would be worse than none. */
+const LONGEST_LABEL = 3;
+
+function haveShortNames(holes: readonly ToneHole[]): boolean {
+  const names = holes.map((hole) => hole.name.trim());
+  const areShort = names.every((name) => name !== '' && name.length <= LONGEST_LABEL);
+  return areShort && new Set(names).size === names.length;
 }
 
 export type ReferenceEnd = SheetInput['workshop']['referenceEnd'];

@@ -76,16 +76,16 @@ export function drillingSteps(context: SheetContext, pages: PagesNamed): string[
   const trim = trimStep(context);
   const last = 'Ease every edge. Let the bore cool, then play all notes.';
   if (holes.length === 0) return [first, trim, last];
-  const numbers = holes.map(({ number }) => number);
-  const span = numbers.length === 1 ? `hole ${numbers[0]}` : `holes ${numbers[0]} to ${numbers.at(-1)}`;
-  const [lowest, ...others] = numbers;
+  const labels = holes.map(({ label }) => label);
+  const span = labels.length === 1 ? `hole ${labels[0]}` : `holes ${labels[0]} to ${labels.at(-1)}`;
+  const [lowest, ...others] = labels;
   const then = others.length === 0 ? '' : `, then ${shortList(others)}`;
   return [
     first,
     settingStep(context),
     `Glue on the template (${pagesInWords(pages.templates)}). Check both 100 mm rulers first.`,
     `Centre punch ${span}. Check each against the table before drilling.`,
-    `Pilot ${shortList(numbers)}. Clear the chips each time.`,
+    `Pilot ${shortList(labels)}. Clear the chips each time.`,
     trim,
     `Open ${lowest}${then}. After each: play, read, open a little, read again.`,
     `${undercutWords(holes)}${last}`,
@@ -118,16 +118,14 @@ function trimStep({ input, writing }: SheetContext): string {
 }
 
 function undercutWords(holes: ReturnType<typeof numberedHoles>): string {
-  const undercut = holes.filter(({ hole }) => hole.undercut !== null).map(({ number }) => number);
+  const undercut = holes.filter(({ hole }) => hole.undercut !== null).map(({ label }) => label);
   if (undercut.length === 0) return '';
-  return undercut.length === 1 ? `Undercut hole ${undercut[0]}. ` : `Undercut holes ${shortList(undercut)}. `;
+  return undercut.length === 1 ? `Undercut hole ${undercut[0]}. ` : `Undercut holes ${undercut.join(', ')}. `;
 }
 
-/** Every number of a short list; the ends of a long one, which runs down without a gap. */
-function shortList(numbers: readonly number[]): string {
-  const isRun = numbers.every((number, index) => index === 0 || number === (numbers[index - 1] ?? 0) - 1);
-  if (numbers.length > 9 && isRun) return `${numbers[0]} down to ${numbers.at(-1)}`;
-  return numbers.join(', ');
+/** All holes from the foot upward: every one of a few, the ends of many. */
+function shortList(labels: readonly string[]): string {
+  return labels.length > 9 ? `${labels[0]} up to ${labels.at(-1)}` : labels.join(', ');
 }
 
 function pagesInWords(pages: readonly number[]): string {

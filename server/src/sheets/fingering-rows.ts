@@ -95,9 +95,9 @@ function specialWords(input: SheetInput, fingering: Fingering): string {
   const numbered = numberedHoles(input.document);
   if (fingering.half.length > 0) {
     const parts = fingering.half.map(({ hole, fraction, from }) => {
-      const number = numbered.find((entry) => entry.hole.id === hole)?.number ?? hole;
+      const label = numbered.find((entry) => entry.hole.id === hole)?.label ?? hole;
       const share = fraction === 0.5 ? 'half-cover' : `cover ${Math.round(fraction * 100)} % of`;
-      return `${share} hole ${number}${from === 'end' ? ' from the end' : ''}`;
+      return `${share} hole ${label}${from === 'end' ? ' from the end' : ''}`;
     });
     return parts.join(', ');
   }

@@ -72,7 +72,7 @@ function holeCells(context: SheetContext, row: HoleRow): TableCell[] {
   const tolerance = (mm: number) => ({ text: printLength(mm, writing.unit, writing.unit === 'mm' ? 2 : 3) });
   const position = length(row.fromReferenceMm);
   return [
-    { text: String(row.number), look: 'head', ...nameBelow(row) },
+    { text: row.label, look: 'head', ...nameBelow(row) },
     {
       ...position,
       look: 'key',
@@ -105,9 +105,9 @@ function cellOf({ main, besides }: WrittenLength): { text: string; below: string
   return { text: main, below: besides };
 }
 
-function nameBelow({ hole, number }: HoleRow): { below?: string } {
+function nameBelow({ hole, label }: HoleRow): { below?: string } {
   const name = hole.name.trim();
-  return name === '' || name === String(number) ? {} : { below: name };
+  return name === '' || name === label ? {} : { below: name };
 }
 
 /** Shanks of the inch sets carry names; their size follows. */

@@ -136,10 +136,10 @@ function drawHoles(context: SheetContext, scale: OutlineScale, topMm: number): v
   const holes = numberedHoles(document).map((entry) => ({ ...entry, x: scale.x(entry.hole.positionMm) }));
   const xs = holes.map(({ x }) => x);
   const ends = { fromMm: MARGIN_MM, toMm: pen.paper.widthMm - MARGIN_MM };
-  const numberXs = spreadOut(xs, { ...ends, roomMm: 4.6 });
+  const numberXs = spreadOut(xs, { ...ends, roomMm: 5.4 });
   const figures = positionPlaces(xs, ends);
   const middleY = topMm + MIDDLE_MM;
-  holes.forEach(({ hole, number, x }, index) => {
+  holes.forEach(({ hole, label, x }, index) => {
     const angle = (turnedAngle(hole.angleDeg) * Math.PI) / 180;
     const y = middleY - (outsideRadiusMm(document, hole.positionMm) * scale.across * Math.sin(angle)) / 1.2;
     const radiusMm = (hole.diameterMm / 2) * scale.across;
@@ -147,7 +147,7 @@ function drawHoles(context: SheetContext, scale: OutlineScale, topMm: number): v
     if (isBehind) pen.circle([x, y], radiusMm, { widthMm: 0.2, dashMm: [0.6, 0.5] });
     else pen.fillCircle([x, y], radiusMm);
     const numberX = numberXs[index] ?? x;
-    pen.text(String(number), [numberX, topMm + NUMBERS_MM], { size: 10, weight: 700, align: 'centre' });
+    pen.text(label, [numberX, topMm + NUMBERS_MM], { size: 10, weight: 700, align: 'centre' });
     const figure = figures[index] ?? { x, lowerMm: 0 };
     const figureY = topMm + POSITIONS_MM + figure.lowerMm;
     const from: Point = [x, Math.max(y + radiusMm, middleY) + 1.4];

@@ -56,13 +56,13 @@ function drawStripHoles({ pen, input }: SheetContext, { frame, topMm }: StripPla
   const { document } = input;
   const heightMm = stripHeightMm(document);
   const middle = topMm + heightMm / 2;
-  for (const { hole, number } of numberedHoles(document)) {
+  for (const { hole, label } of numberedHoles(document)) {
     if (hole.positionMm < frame.alongFromMm || hole.positionMm > frame.alongToMm) continue;
     const x = frame.pageX(hole.positionMm);
     const isOnLine = turnedAngle(hole.angleDeg) === 0;
     const numberStyle = { size: 10, weight: 700 } as const;
     pen.line([x, topMm], [x, topMm + heightMm], HAIR_LINE);
-    pen.text(String(number), [x + 0.8, topMm + 3.4], numberStyle);
+    pen.text(label, [x + 0.8, topMm + 3.4], numberStyle);
     if (!isOnLine) {
       const words = `at ${formatAngle(hole.angleDeg)}°`;
       pen.text(words, [x + 0.8, topMm + 6.8], SMALL_WORDS);

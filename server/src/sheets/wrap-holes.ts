@@ -49,7 +49,7 @@ function drawWords(context: SheetContext, place: WrapPlace, shown: readonly Show
     const { x, row } = hole;
     const position = writeLength(reading(row.hole.positionMm), writing).main;
     const final = `final ${writeDiameter(row.hole.diameterMm, writing).main}`;
-    pen.text(String(row.number), [x, numberY], { size: 14, weight: 700, align: 'centre' });
+    pen.text(row.label, [x, numberY], { size: 14, weight: 700, align: 'centre' });
     pen.text(position, [x, positionY], { ...WORDS, align: 'centre' });
     pen.text(final, [x, finalY], { ...SMALL_WORDS, align: 'centre' });
   });
