@@ -13,18 +13,16 @@ const LOCK_WAIT_S = 60;
  * @throws StartRefusal if a newer version of the program has been at this database
  */
 export async function migrateDatabase(sequelize: Sequelize): Promise<void> {
-  const umzug = new Umzug({
-    migrations: [...ALL_MIGRATIONS],
-    context: sequelize.getQueryInterface(),
-    storage: new SequelizeStorage({ sequelize, tableName: 'migrations' }),
-    logger: undefined,
-  });
+  const storage = new SequelizeStorage({ sequelize, tableName: 'migrations' });
+  const context = sequelize.getQueryInterface();
+  const umzug = new Umzug({ migrations: [...ALL_MIGRATIONS], context, storage, logger: undefined });
   await withLock(sequelize, async () => {
     const known = new Set(ALL_MIGRATIONS.map((migration) => migration.name));
-    const newer = (await umzug.executed()).filter((migration) => !known.has(migration.name));
+    // Umzug itself leaves out of its list what it does not know.
+    const newer = (await storage.executed()).filter((name) => !known.has(name));
     if (newer.length > 0) {
       throw new StartRefusal(
-        `This database was last used by a newer version of Borewright (it has ${newer.map((migration) => migration.name).join(', ')}): start that version, or restore a backup from before.`,
+        `This database was last used by a newer version of Borewright (it has ${newer.join(', ')}): start that version, or restore a backup from before.`,
       );
     }
     await umzug.up();
