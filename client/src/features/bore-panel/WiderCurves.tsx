@@ -6,6 +6,7 @@ import { useStudy } from '../../engine/use-study.ts';
 import { Bob } from '../../bench/Bob.tsx';
 import { NoteSpan } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
+import { boreEnds } from '#shared/document/profile.ts';
 import { ShelfCaption } from './ShelfCaption.tsx';
 import { SHELF } from './shelf-scale.ts';
 
@@ -39,8 +40,8 @@ export function WiderCurves({ document, geometry, selection, isBeside }: WiderCu
         lines={['up is sharper', 'cents, 0.1 mm', 'over 10 mm']}
       />
       <line
-        x1={geometry.viewLeft}
-        x2={geometry.viewRight}
+        x1={geometry.x(boreEnds(document).mouthMm)}
+        x2={geometry.x(boreEnds(document).footMm)}
         y1={SHELF.curveY}
         y2={SHELF.curveY}
         className="bore-zero"
@@ -62,6 +63,7 @@ export function WiderCurves({ document, geometry, selection, isBeside }: WiderCu
           return fingering === undefined ? null : (
             <Curve
               key={curve.fingering}
+              labelShare={isBeside ? 0.08 : 0.35}
               curve={curve}
               fingering={fingering}
               place={index}
@@ -78,18 +80,20 @@ export function WiderCurves({ document, geometry, selection, isBeside }: WiderCu
 interface CurveProps {
   curve: WiderHere;
   fingering: Fingering;
+  /** Which of the two curves this is: names stand above the first and below the second. */
   place: number;
+  /** How far along the curve its name stands. */
+  labelShare: number;
   x: (mm: number) => number;
   y: (cents: number) => number;
 }
 
 /** Register 2 is dashed and ringed as everywhere, so that the hue is not alone. */
-function Curve({ curve, fingering, place, x, y }: CurveProps) {
+function Curve({ curve, fingering, place, labelShare, x, y }: CurveProps) {
   const points = curve.points.map(({ positionMm, cents }) => [x(positionMm), y(cents)] as [number, number]);
   const path = line()(points) ?? '';
   const [first, last] = [points[0], points.at(-1)];
-  // Names stand at the far left of their curve, one above and one below it.
-  const label = points[Math.round(points.length * 0.08)] ?? [0, 0];
+  const label = points[Math.round(points.length * labelShare)] ?? [0, 0];
   const look = `is-register${Math.min(fingering.register, 3)}`;
   if (first === undefined || last === undefined) return null;
   return (

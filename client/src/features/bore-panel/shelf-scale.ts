@@ -30,7 +30,9 @@ export function shelfScale(stations: readonly Station[]): ShelfScale {
   const room = SHELF.narrowY - SHELF.wideY;
   const pxPerMm = Math.min(MOST_PX_PER_MM, room / Math.max(widest - narrowest, 1e-6));
   const scale = scaleLinear([widest, widest - room / pxPerMm], [SHELF.wideY, SHELF.narrowY]);
-  const ticks = scaleLinear([widest - room / pxPerMm, widest], [0, 1]).ticks(2);
+  const axis = scaleLinear([widest - room / pxPerMm, widest], [0, 1]);
+  // As many figures as stand clear of each other.
+  const ticks = [3, 2, 1].map((count) => axis.ticks(count)).find(({ length }) => length <= 4) ?? [];
   return { y: (mm) => scale(mm), diameterMm: (y) => scale.invert(y), ticks, pxPerMm };
 }
 

@@ -51,7 +51,7 @@ export function FingeringEditor({ row, holes, readOnly, onSelect, onEdit, childr
             if (note !== null) edit('note', (before) => ({ ...before, note: printNoteName(note) }));
           }}
         />
-        <div className="w-32">
+        <div className="w-32 max-[1100px]:w-56">
           <NumberField
             label="Register"
             value={fingering.register}
@@ -62,7 +62,7 @@ export function FingeringEditor({ row, holes, readOnly, onSelect, onEdit, childr
             onChange={set('register', 'register')}
           />
         </div>
-        <div className="w-44">
+        <div className="w-44 max-[1100px]:w-56">
           <NumberField
             label="Wanted above the scale"
             value={fingering.centsOffset}
@@ -73,7 +73,7 @@ export function FingeringEditor({ row, holes, readOnly, onSelect, onEdit, childr
             onChange={set('centsOffset', 'offset')}
           />
         </div>
-        <div className="w-36">
+        <div className="w-36 max-[1100px]:w-56">
           <NumberField
             label="Weight in a fit"
             value={fingering.weight}

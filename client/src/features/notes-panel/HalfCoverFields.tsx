@@ -21,7 +21,7 @@ export function HalfCoverFields({ fingering, holes, readOnly, onChange }: HalfCo
     const title = holes.find(({ hole }) => hole.id === entry.hole)?.title ?? entry.hole;
     return (
       <div key={entry.hole} className="flex items-end gap-2">
-        <div className="w-40">
+        <div className="w-40 max-[1100px]:w-56">
           <NumberField
             label={`${title} covered`}
             value={entry.fraction}

@@ -62,7 +62,7 @@ export function ScaleForm({ pitch, readOnly, onEdit }: ScaleFormProps) {
         Scale
       </h2>
       <div className="mt-2 flex flex-wrap items-end gap-4">
-        <div className="w-44">
+        <div className="w-44 max-[1100px]:w-60">
           <NumberField
             label="A4"
             value={pitch.a4Hz}
@@ -126,7 +126,7 @@ function OwnCents({ tonic, offsets, disabled, onChange }: OwnCentsProps) {
   return (
     <fieldset className="mt-3">
       <legend className="text-label text-ink3">Cents above equal temperament, from the tonic upwards</legend>
-      <div className="mt-1 grid grid-cols-[repeat(auto-fill,minmax(150px,1fr))] gap-3">
+      <div className="mt-1 grid grid-cols-[repeat(auto-fill,minmax(170px,1fr))] gap-3 max-[1100px]:grid-cols-[repeat(auto-fill,minmax(230px,1fr))]">
         {offsets.map((cents, index) => {
           const { letter, accidental } = noteOfMidi(midiNumber(root) + index, root.accidental === 'b');
           const name = letter + accidental;
