@@ -89,6 +89,7 @@ export const holeSchema = z.strictObject({
   name: z.string().max(40),
   positionMm,
   diameterMm,
+  /** Round the body from the centre line, clockwise seen from the foot. */
   angleDeg: z.number().min(-360).max(360).default(0),
   /** null: taken from the outside profile. */
   chimneyMm: lengthMm.positive().nullable().default(null),
