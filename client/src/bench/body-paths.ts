@@ -164,7 +164,8 @@ export function planHole(shape: BodyShape, hole: ToneHole, place: Place): PlanHo
   const ry = (hole.diameterMm * place.across) / 2;
   return {
     cx: place.x(hole.positionMm),
-    cy: place.axisY + outer * Math.sin(turn),
+    // Clockwise seen from the foot, which lies at the right: towards the top of the page.
+    cy: place.axisY - outer * Math.sin(turn),
     rx,
     ry: Math.max(1.5, ry * Math.abs(Math.cos(turn))),
     behind: Math.cos(turn) < -1e-9,
