@@ -65,8 +65,9 @@ export default defineConfig({
             'tests/support/client-setup.ts',
             'tests/support/browser-setup.ts',
           ],
-          testTimeout: 60_000,
+          testTimeout: 120_000,
           hookTimeout: 60_000,
+          expect: { poll: { timeout: 15_000 } },
           // One browser at a time: two cores carry a server, a database and Chromium already.
           maxWorkers: 1,
           sequence: { groupOrder: 3 },
