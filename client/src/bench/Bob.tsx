@@ -1,4 +1,5 @@
 import { memo } from 'react';
+import { classNames } from '../ui/class-names.ts';
 
 interface BobProps {
   register: number;
@@ -13,15 +14,15 @@ interface BobProps {
 /** A register's bob: disc, ring, diamond; higher registers a hollow diamond. Shape says it as well as hue. */
 export const Bob = memo(function Bob({ register, scale = 1, small = false, hollow = false }: BobProps) {
   const size = scale * (small ? 0.64 : 1);
-  const look = hollow ? 'bench-bob-hollow' : '';
-  if (register === 1) return <circle r={7.8 * size} className={`bench-bob1 ${look}`} />;
+  const look = hollow && 'bench-bob-hollow';
+  if (register === 1) return <circle r={7.8 * size} className={classNames('bench-bob1', look)} />;
   if (register === 2)
-    return <circle r={6.3 * size} className={`bench-bob2 ${look}`} strokeWidth={2.8 * size} />;
+    return <circle r={6.3 * size} className={classNames('bench-bob2', look)} strokeWidth={2.8 * size} />;
   const half = 6.7 * size;
   return (
     <path
       d={`M0 ${-half}L${half} 0L0 ${half}L${-half} 0Z`}
-      className={`${register === 3 ? 'bench-bob3' : 'bench-bob4'} ${look}`}
+      className={classNames(register === 3 ? 'bench-bob3' : 'bench-bob4', look)}
     />
   );
 });

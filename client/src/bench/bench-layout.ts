@@ -49,7 +49,7 @@ const desk: BenchMeasures = {
   ruleY: 197,
   ruleHeight: 24,
   spacing: 82,
-  columnsFrom: 716,
+  columnsFrom: 736,
   columnsFromWithoutLadder: 490,
   columnReach: 42,
   labelGap: 73,

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import type { PanelProps } from '../bench/panel-props.ts';
+import { AirPanel } from '../features/air-panel/AirPanel.tsx';
 import { BorePanel } from '../features/bore-panel/BorePanel.tsx';
 import type { DraftOnBench } from '../features/draft/use-draft.ts';
 import { HoleTable } from '../features/hole-table/HoleTable.tsx';
@@ -47,8 +48,15 @@ export function WorkbenchPanels({ panel, bench, draft, isDragging, suggestion }:
       );
     case 'notes':
       return <NotesPanel {...bench} />;
-    case 'holes':
     case 'air':
+      return (
+        <AirPanel
+          {...bench}
+          predictionOptions={draft.predictionOptions}
+          onChoosePredictionOptions={draft.choosePredictionOptions}
+        />
+      );
+    case 'holes':
       return <HolesPanel bench={bench} chart={chart} suggestion={suggestion} />;
   }
 }
@@ -57,7 +65,8 @@ function HangZone({ bench, children }: { bench: PanelProps; children: ReactNode 
   return (
     <div className="relative" data-zone="columns" tabIndex={-1}>
       <ColumnTint geometry={bench.geometry} chosen={bench.selection.hole} />
-      {children}
+      {/* Above the tint, which is placed and would otherwise cover the rows. */}
+      <div className="relative">{children}</div>
     </div>
   );
 }
@@ -92,11 +101,11 @@ function HolesPanel({ bench, chart, suggestion }: HolesPanelProps) {
       <div className="col-start-1 row-start-1 min-w-0">
         <HangZone bench={bench}>
           {chart}
-          <RegisterChoice {...bench} />
           <div data-zone="table" tabIndex={-1} className="mt-2">
             <HoleTable {...bench} />
           </div>
         </HangZone>
+        <RegisterChoice {...bench} />
         <div style={{ paddingLeft: Math.max(16, geometry.hangLeft - 112), paddingRight: 16 }}>
           <NoticeList prediction={prediction} />
         </div>

@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { classNames } from '../../ui/class-names.ts';
 import { lengthFormat } from '../../ui/length-format.ts';
@@ -12,6 +13,7 @@ interface FigureCellProps {
   max: number;
   unit: LengthUnit;
   isQuiet: boolean;
+  quietText?: string | undefined;
   isChosen: boolean;
   canEdit: boolean;
   onFocus: () => void;
@@ -26,8 +28,9 @@ export function FigureCell(props: FigureCellProps) {
   const { label, kind, value, min, max, unit, isQuiet, isChosen, canEdit, onFocus, onChange } = props;
   const format = kind === 'length' ? FORMATS[unit] : ANGLE;
   const entry = useNumberEntry({ value, format, min, max, onChange });
-  const look = isChosen ? 'font-bold text-ink' : isQuiet ? 'text-ink3' : 'text-ink';
-  if (!canEdit) return <span className={look}>{format.print(value)}</span>;
+  const [isFocused, setFocused] = useState(false);
+  const look = classNames(isQuiet ? 'text-ink3' : 'text-ink', isChosen && 'font-bold');
+  if (!canEdit) return <span className={look}>{props.quietText ?? format.print(value)}</span>;
   return (
     <>
       <input
@@ -36,13 +39,18 @@ export function FigureCell(props: FigureCellProps) {
         aria-invalid={entry.complaint === null ? undefined : true}
         autoComplete="off"
         spellCheck={false}
-        value={entry.text}
+        value={isFocused ? entry.text : (props.quietText ?? entry.text)}
         onChange={(event) => entry.onType(event.currentTarget.value)}
         onFocus={(event) => {
-          event.currentTarget.select();
+          setFocused(true);
+          // What is typed over is the figure, which takes the place of a dash only after this event.
+          requestAnimationFrame(() => event.target.select());
           onFocus();
         }}
-        onBlur={entry.commit}
+        onBlur={() => {
+          setFocused(false);
+          entry.commit();
+        }}
         onKeyDown={entry.onKeyDown}
         className={classNames(
           'rounded-chip hover:border-line focus:bg-sheet w-full border border-transparent bg-transparent text-center outline-offset-0',

@@ -11,7 +11,8 @@ import { tableRows, type EditableFigure, type TableRow } from './table-rows.ts';
 /** Every size of every hole, each column under its hole. */
 export function HoleTable(props: PanelProps) {
   const { document, prediction, geometry, unit, selection, sensitivities } = props;
-  const [showsAll, setShowsAll] = useState(geometry.layout === 'wide');
+  const [chosenAll, setShowsAll] = useState<boolean | null>(null);
+  const showsAll = chosenAll ?? geometry.layout === 'wide';
   const holes = useMemo(() => labelledHoles(document), [document]);
   const notes = useMemo(() => hungNotes(document, prediction), [document, prediction]);
   const places = tablePlaces(geometry);

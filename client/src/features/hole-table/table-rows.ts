@@ -15,6 +15,8 @@ export interface EditableFigure {
   max: number;
   /** Nothing special about it: no undercut, no turn. */
   isQuiet: boolean;
+  /** What stands there instead while it is not being typed over. */
+  quietText?: string;
   edit: (document: DesignDocument, value: number) => DesignDocument;
 }
 
@@ -82,7 +84,7 @@ function placeRows({ document, unit, printLength }: RowSource): TableRow[] {
   ];
 }
 
-function wallRows({ document, unit }: RowSource): TableRow[] {
+function wallRows({ document, unit, printLength }: RowSource): TableRow[] {
   return [
     {
       key: 'chimney',
@@ -95,6 +97,7 @@ function wallRows({ document, unit }: RowSource): TableRow[] {
         min: 0.1,
         max: 100,
         isQuiet: hole.chimneyMm === null,
+        ...(hole.chimneyMm === null ? { quietText: printLength(chimneyMm(document, hole)) } : {}),
         edit: (before, value) => changeHole(before, hole.id, { chimneyMm: value }),
       }),
     },
@@ -109,6 +112,7 @@ function wallRows({ document, unit }: RowSource): TableRow[] {
         min: hole.diameterMm,
         max: Math.max(hole.diameterMm, widestHoleMm(document, hole.positionMm)),
         isQuiet: hole.undercut === null,
+        ...(hole.undercut === null ? { quietText: '–' } : {}),
         edit: (before, value) => withUndercut(before, hole.id, value),
       }),
     },

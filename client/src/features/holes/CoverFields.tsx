@@ -2,6 +2,7 @@ import { useId } from 'react';
 import { COVERS, type ToneHole } from '#shared/document/design-document.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';
 import { changeHole } from '../../bench/hole-edits.ts';
+import { classNames } from '../../ui/class-names.ts';
 import { COVER_WORDS, HAND_WORDS, withCover } from './inspector-fields.ts';
 
 interface CoverFieldsProps {
@@ -26,7 +27,7 @@ export function CoverFields({ hole, title, disabled, onEdit }: CoverFieldsProps)
         id={id}
         disabled={disabled}
         value={hole.cover}
-        className={SELECT}
+        className={classNames(SELECT, 'flex-1')}
         onChange={(event) => {
           const cover = COVERS.find((each) => each === event.currentTarget.value);
           if (cover === undefined) return;
@@ -46,7 +47,7 @@ export function CoverFields({ hole, title, disabled, onEdit }: CoverFieldsProps)
         aria-label="Hand"
         disabled={disabled}
         value={hole.hand}
-        className={SELECT}
+        className={classNames(SELECT, 'w-28')}
         onChange={(event) => {
           const hand = event.currentTarget.value === 'right' ? 'right' : 'left';
           onEdit({

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { chimneyMm, fromFootMm } from '#shared/document/profile.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { changeHole, removeHole, widestHoleMm, withUndercut } from '../../bench/hole-edits.ts';
@@ -112,41 +113,76 @@ interface SizeFieldProps extends SizeContext {
   max: number;
   format?: typeof ANGLE_FORMAT;
   onChange: (value: number) => void;
-  children?: React.ReactNode;
+  children?: ReactNode;
 }
 
 function SizeField({ label, hint, dimension, sign = 1, children, ...props }: SizeFieldProps) {
-  const { sensitivities, unit, leading, index, isWide } = props;
-  const step = SENSITIVITY_STEP[unit];
-  const key = `holes.${index}.${dimension ?? ''}`;
-  const cents = dimension === null ? null : centsPerStep(sensitivities, leading, key, step.mm * sign);
-  return (
-    <div className="border-hair border-t py-1.25 max-[1279px]:border-t-0">
-      <NumberField
-        label={label}
-        layout={isWide ? 'row' : 'stack'}
-        value={props.value}
-        format={props.format ?? LENGTH_FORMATS[unit]}
-        min={props.min}
-        max={props.max}
-        disabled={props.disabled}
-        {...(hint === undefined ? {} : { hint })}
-        beside={<CentsBeside cents={cents} words={isWide ? null : `cents per ${step.label}`} />}
-        onChange={props.onChange}
-      />
-      {children !== undefined && <div className="mt-1">{children}</div>}
+  const { unit, isWide } = props;
+  const figure = dimension === null ? '' : centsFigure(props, dimension, sign);
+  const field = (
+    <NumberField
+      label={label}
+      layout={isWide ? 'cell' : 'stack'}
+      value={props.value}
+      format={props.format ?? LENGTH_FORMATS[unit]}
+      min={props.min}
+      max={props.max}
+      disabled={props.disabled}
+      hint={hint}
+      beside={
+        isWide || figure === '' ? undefined : (
+          <CentsWords figure={figure} step={SENSITIVITY_STEP[unit].label} />
+        )
+      }
+      onChange={props.onChange}
+    />
+  );
+  const below = children !== undefined && <div className="mt-1">{children}</div>;
+  return isWide ? (
+    <div className="border-hair border-t py-1.25">
+      <SizeRow label={label} hint={hint} figure={figure} field={field} />
+      {below}
+    </div>
+  ) : (
+    <div className="py-1.25">
+      {field}
+      {below}
     </div>
   );
 }
 
-/** Figures stand in one column, also where there is none. */
-function CentsBeside({ cents, words }: { cents: number | null; words: string | null }) {
-  const figure = cents === null ? '' : formatCents(cents, 2);
-  if (words === null)
-    return <span className="text-body text-ink2 w-12 text-right font-semibold">{figure}</span>;
-  return figure === '' ? null : (
+/** What one small step of a size does to the leading note; empty until it is known. */
+function centsFigure({ sensitivities, unit, leading, index }: SizeContext, dimension: string, sign: 1 | -1) {
+  const stepMm = SENSITIVITY_STEP[unit].mm * sign;
+  const cents = centsPerStep(sensitivities, leading, `holes.${index}.${dimension}`, stepMm);
+  return cents === null ? '' : formatCents(cents, 2);
+}
+
+interface SizeRowProps {
+  label: string;
+  hint: string | undefined;
+  figure: string;
+  field: ReactNode;
+}
+
+/** Label, stepper and cents in three columns that line up from row to row. */
+function SizeRow({ label, hint, figure, field }: SizeRowProps) {
+  return (
+    <div className="flex items-center">
+      <span aria-hidden="true" className="w-19 shrink-0 leading-4.25">
+        {label}
+        {hint !== undefined && <span className="text-small text-ink3 block leading-3.5">{hint}</span>}
+      </span>
+      <div className="w-39.5 shrink-0">{field}</div>
+      <span className="text-body text-ink2 ml-auto font-semibold">{figure}</span>
+    </div>
+  );
+}
+
+function CentsWords({ figure, step }: { figure: string; step: string }) {
+  return (
     <span className="text-data text-ink3">
-      {figure} {words}
+      {figure} cents per {step}
     </span>
   );
 }
@@ -164,6 +200,8 @@ function WallFields({ size, chosen, edit, widestMm }: WallFieldsProps) {
   const { hole } = chosen;
   const { undercut } = hole;
   const wallMm = chimneyMm(document, hole);
+  // What is taken from the wall was never typed: a hundredth is as much as it is good for.
+  const shownMm = hole.chimneyMm ?? Math.round(wallMm * 100) / 100;
   return (
     <>
       <SizeField
@@ -171,7 +209,7 @@ function WallFields({ size, chosen, edit, widestMm }: WallFieldsProps) {
         label="Chimney"
         hint={hole.chimneyMm === null ? 'from wall' : 'as typed'}
         dimension="chimneyMm"
-        value={wallMm}
+        value={shownMm}
         min={0.1}
         max={100}
         onChange={(value) => edit('Chimney', { chimneyMm: value })}

@@ -29,8 +29,8 @@ interface Request {
 }
 
 /** Sizes tried on either side of the present one. */
-const TRIED = 9;
-const MOVES_MM = [-3, -2, -1.5, -1, -0.5, 0.5, 1, 1.5, 2, 3];
+const TRIED = 7;
+const MOVES_MM = [-3, -2, -1, -0.5, 0.5, 1, 2, 3];
 /** A change that helps less than this is not worth a drill, cents. */
 const LEAST_GAIN_CENTS = 0.5;
 /** Notes that move less than this are summed up in one figure, cents. */
@@ -90,11 +90,11 @@ async function best(
   return found?.suggestion ?? null;
 }
 
-/** The chosen note counts in full, each other by a third, so that mending one does not spoil its neighbours. */
+/** The chosen note counts in full, each other by half, so that mending one does not spoil its neighbours. */
 function costOf(prediction: DesignPrediction, fingering: string): number {
   return prediction.fingerings.reduce((sum, { id, centsFromScale }) => {
     const size = Math.abs(centsFromScale ?? 50);
-    return sum + (id === fingering ? size : size / 3);
+    return sum + (id === fingering ? size : size / 2);
   }, 0);
 }
 

@@ -1,6 +1,7 @@
 import { formatCents } from '#shared/music/cents.ts';
 import type { FingeringPrediction } from '#shared/analysis/prediction.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
+import { classNames } from '../../ui/class-names.ts';
 import { ladderPlaces, type PlacedRung } from './ladder-places.ts';
 
 interface LadderProps {
@@ -124,12 +125,12 @@ const decibels = (strength: number) => `${strength < -0.5 ? '−' : ''}${Math.ab
 function RungDrawing({ placed }: { placed: PlacedRung }) {
   const { rung, y, multipleY, share } = placed;
   const end = LEFT + (RIGHT - LEFT) * share;
-  const look = rung.weak ? ' is-weak' : '';
+  const look = rung.weak && 'is-weak';
   return (
     <>
       <path d={`M${LEFT} ${multipleY}H${RIGHT}`} className="bench-multiple" />
-      <path d={`M${LEFT} ${y}H${end}`} className={`bench-rung${look}`} />
-      <circle cx={end} cy={y} r={3.2} className={`bench-rung-end${look}`} />
+      <path d={`M${LEFT} ${y}H${end}`} className={classNames('bench-rung', look)} />
+      <circle cx={end} cy={y} r={3.2} className={classNames('bench-rung-end', look)} />
       <text x={LEFT - 8} y={y + 4.5} textAnchor="end" className="bench-label bench-label-strong">
         {rung.mode}
       </text>

@@ -3,6 +3,7 @@ import type { BenchGeometry } from '../../bench/bench-geometry.ts';
 import { FingeringCircle } from '../../bench/FingeringCircle.tsx';
 import { holeMark } from '../../bench/fingering-marks.ts';
 import type { LabelledHole } from '../../bench/hole-labels.ts';
+import { classNames } from '../../ui/class-names.ts';
 
 interface FingeringRowProps {
   geometry: BenchGeometry;
@@ -25,7 +26,7 @@ export function FingeringRow({ geometry, holes, fingering, chosenKey }: Fingerin
       <g key={key}>
         <path
           d={`M${holeX} ${start}V${beamY - 16}L${x} ${beamY - 3}V${beamY}`}
-          className={`bench-leader${key === chosenKey ? 'is-chosen' : ''}`}
+          className={classNames('bench-leader', key === chosenKey && 'is-chosen')}
         />
         {hole !== undefined && hasCircles && (
           <FingeringCircle x={holeX} y={fingeringY} radius={radius} mark={holeMark(fingering, hole)} />

@@ -2,6 +2,7 @@ import { memo, type KeyboardEvent } from 'react';
 import { formatCents } from '#shared/music/cents.ts';
 import { Bob } from '../../bench/Bob.tsx';
 import { NoteSpan } from '../../bench/NoteName.tsx';
+import { classNames } from '../../ui/class-names.ts';
 import { bobPlace } from './plumb-scale.ts';
 
 interface HangingNoteProps {
@@ -78,7 +79,7 @@ function Pendulum({ cents, register, y, threadFrom, isOld, ...scale }: PendulumP
       <g transform={`translate(0 ${threadFrom})`}>
         <line
           y2={length}
-          className={`bench-thread bench-swing is-register${register}${isOld ? 'is-old' : ''}`}
+          className={classNames('bench-thread bench-swing', `is-register${register}`, isOld && 'is-old')}
           style={{ transform: `matrix(1, 0, ${dx / length}, 1, 0, 0)` }}
         />
       </g>
@@ -96,7 +97,7 @@ function NoteLabel({ note, cents, isOutside, isOnTint, y, labelBelow, twoLines, 
   const below = rest.isCross ? labelBelow + 15 : labelBelow;
   const figure = cents === null ? '–' : formatCents(cents);
   return (
-    <text y={y + below} textAnchor="middle" className={`bench-note${isOnTint ? 'is-chosen' : ''}`}>
+    <text y={y + below} textAnchor="middle" className={classNames('bench-note', isOnTint && 'is-chosen')}>
       <NoteSpan note={note} className={rest.isChosen ? 'bench-label-strong' : 'bench-note-name'} />
       <tspan className={isOutside ? 'is-outside' : undefined} {...(twoLines ? { x: 0, dy: 16 } : { dx: 5 })}>
         {figure}

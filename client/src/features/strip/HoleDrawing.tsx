@@ -3,6 +3,7 @@ import type { ToneHole } from '#shared/document/design-document.ts';
 import { chimneyPaths, planHole, type ChimneyPaths, type Place } from '../../bench/body-paths.ts';
 import type { BenchFrame } from '../../bench/bench-geometry.ts';
 import type { BodyShape } from '../../bench/drawn-body.ts';
+import { classNames } from '../../ui/class-names.ts';
 
 interface HoleDrawingProps {
   frame: BenchFrame;
@@ -26,7 +27,7 @@ export const HoleDrawing = memo(function HoleDrawing({
   const chimney = measures.hasSection
     ? chimneyPaths(shape, hole, { ...plan, axisY: measures.sectionY })
     : null;
-  const chosen = isChosen ? ' is-chosen' : '';
+  const chosen = isChosen && 'is-chosen';
   return (
     <g>
       {chimney !== null && <Chimney {...chimney} />}
@@ -46,9 +47,9 @@ export const HoleDrawing = memo(function HoleDrawing({
         x2={ellipse.cx}
         y1={ellipse.cy + ellipse.ry + (isChosen ? 6 : 2)}
         y2={measures.ruleY}
-        className={`bench-drop${chosen}`}
+        className={classNames('bench-drop', chosen)}
       />
-      <text x={ellipse.cx} y={17} textAnchor="middle" className={`bench-hole-label${chosen}`}>
+      <text x={ellipse.cx} y={17} textAnchor="middle" className={classNames('bench-hole-label', chosen)}>
         {label}
       </text>
     </g>

@@ -4,7 +4,7 @@ type Height = 'peek' | 'half' | 'full';
 
 const LOOK: Record<Height, string> = {
   peek: 'h-36',
-  half: 'h-[46dvh]',
+  half: 'h-[41dvh]',
   full: 'h-[calc(100dvh-180px)]',
 };
 
