@@ -2,6 +2,7 @@ import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, describe, expect, it } from 'vitest';
+import { expectProblem } from '../support/expect-problem.ts';
 import { anonymous } from '../support/sign-in-as.ts';
 import { startTestServer } from '../support/start-test-server.ts';
 
@@ -41,6 +42,11 @@ describe('the built pages', () => {
       expect((await agent.get(path)).text).not.toContain('"dependencies"');
     },
   );
+
+  it('are missed quietly where they are not built', async () => {
+    const bare = anonymous(await startTestServer({ staticDir: join(folder, 'nowhere') }));
+    expectProblem(await bare.get('/designs'), 404, 'not-found');
+  });
 
   it('load nothing from elsewhere and stand in no frame', async () => {
     const policy = (await agent.get('/')).headers['content-security-policy'] ?? '';

@@ -1,5 +1,6 @@
 import { join } from 'node:path';
 import express, { Router } from 'express';
+import { notFound } from './http-error.ts';
 
 const YEAR_S = 365 * 24 * 60 * 60;
 
@@ -19,10 +20,15 @@ export function staticClient(folder: string): Router {
   router.get('/{*path}', (_req, res, next) => {
     res.set('Cache-Control', 'no-cache');
     res.sendFile('index.html', { root: folder, cacheControl: false }, (error) => {
-      if (error !== undefined && !res.headersSent) next(error);
+      if (error !== undefined && !res.headersSent) next(isMissing(error) ? notFound() : error);
     });
   });
   return router;
+}
+
+/** The pages are not built, or not into this folder. */
+function isMissing(error: Error): boolean {
+  return 'code' in error && error.code === 'ENOENT';
 }
 
 function askEachTime(res: { setHeader: (name: string, value: string) => unknown }): void {

@@ -2,8 +2,8 @@ import type { ApiDescription, Operation } from './describe-api.ts';
 
 const STYLE = `body{font:16px/1.5 system-ui,sans-serif;max-width:56rem;margin:2rem auto;padding:0 1rem;color:#1c1a17;background:#fbfaf7}
 h1,h2{line-height:1.2}h2{margin-top:2.5rem;border-top:1px solid #cfc9bd;padding-top:1.5rem}code,pre{font:14px/1.45 ui-monospace,monospace}
-pre{overflow-x:auto;background:#f1eee6;padding:.75rem}table{border-collapse:collapse}th,td{text-align:left;vertical-align:top;padding:.2rem 1rem .2rem 0}
-summary{cursor:pointer}`;
+h2 code{font-size:1.2rem;font-weight:600}pre{overflow:auto;max-height:26rem;background:#f1eee6;padding:.75rem}table{border-collapse:collapse}th,td{text-align:left;vertical-align:top;padding:.2rem 1rem .2rem 0}
+summary{cursor:pointer;margin:.5rem 0}`;
 
 /** A page that a person can read, without a script: the same description as /api/openapi.json. */
 export function docsPage(api: ApiDescription): string {
