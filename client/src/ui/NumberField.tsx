@@ -129,7 +129,8 @@ function Stepper({ id, label, entry, suffix, isFaulty, disabled, describedBy, ..
           aria-describedby={describedBy}
           onChange={(event) => entry.onType(event.currentTarget.value)}
           onFocus={(event) => {
-            event.currentTarget.select();
+            // What could not be read is there to be mended, not to be typed over.
+            if (entry.complaint === null) event.currentTarget.select();
             props.onFocus?.();
           }}
           onBlur={entry.commit}
