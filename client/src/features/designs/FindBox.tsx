@@ -63,7 +63,10 @@ export function FindBox({ search, onSearch }: FindBoxProps) {
         className="rounded-control border-line bg-sheet text-body placeholder:text-ink3 target w-full border pr-10 pl-3 max-[1100px]:text-[16px]"
       />
       {singleKeysPreference.use() === 'on' && typed === '' && (
-        <kbd className="rounded-chip border-hair text-small text-ink3 pointer-events-none absolute top-1/2 right-3 -translate-y-1/2 border px-1.5 font-sans max-[1100px]:hidden pointer-coarse:hidden">
+        <kbd
+          aria-hidden="true"
+          className="rounded-chip border-hair text-small text-ink3 pointer-events-none absolute top-1/2 right-3 -translate-y-1/2 border px-1.5 font-sans max-[1100px]:hidden pointer-coarse:hidden"
+        >
           /
         </kbd>
       )}
