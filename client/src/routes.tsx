@@ -82,6 +82,20 @@ function designRoutes(queryClient: QueryClient): RouteObject[] {
       path: patterns.design,
       lazy: async () => ({ loader: (await import('./pages/design-gate.ts')).designGate(queryClient) }),
     },
+    {
+      path: patterns.workbench,
+      handle: { name: 'Workbench' },
+      lazy: async () => {
+        const [{ WorkbenchPage }, { workbenchLoader }] = await Promise.all([
+          import('./pages/WorkbenchPage.tsx'),
+          import('./pages/design-gate.ts'),
+        ]);
+        return { Component: WorkbenchPage, loader: workbenchLoader(queryClient) };
+      },
+      // Another panel, hole or note is another address of the same bench: nothing need be asked for.
+      shouldRevalidate: ({ currentParams, nextParams }) =>
+        currentParams.id !== nextParams.id || currentParams.rev !== nextParams.rev,
+    },
   ];
 }
 
