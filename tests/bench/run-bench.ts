@@ -2,6 +2,7 @@ import { chromium } from 'playwright-core';
 import { CHROMIUM_FLAGS } from '../support/chromium-flags.ts';
 import { startApp } from '../support/start-app.ts';
 import { measureDrag } from './drag-bench.ts';
+import { measureEngine } from './engine-bench.ts';
 import { measureFirstLoad } from './first-load-bench.ts';
 import { measureReads } from './http-bench.ts';
 import { measureSheet } from './sheet-bench.ts';
@@ -36,6 +37,7 @@ async function measureInBrowser(databaseUrl: string): Promise<Record<string, Fig
 
 const databaseUrl = setting('TEST_DATABASE_URL');
 const figures = {
+  predictions: await measureEngine(),
   sheet: await measureSheet(),
   ...(await measureReads(databaseUrl)),
   ...(await measureInBrowser(databaseUrl)),
