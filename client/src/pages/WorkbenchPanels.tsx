@@ -10,6 +10,7 @@ import { Ladder } from '../features/ladder/Ladder.tsx';
 import { NotesPanel } from '../features/notes-panel/NotesPanel.tsx';
 import { PlumbChart } from '../features/plumb/PlumbChart.tsx';
 import { RegisterChoice } from '../features/plumb/RegisterChoice.tsx';
+import { SoundBar } from '../features/sound/SoundBar.tsx';
 import { BottomDrawer } from '../features/workbench/BottomDrawer.tsx';
 import { ColumnTint } from '../features/workbench/ColumnTint.tsx';
 import { NoticeList } from '../features/workbench/NoticeList.tsx';
@@ -47,13 +48,14 @@ export function WorkbenchPanels({ panel, bench, draft, isDragging, suggestion }:
         />
       );
     case 'notes':
-      return <NotesPanel {...bench} />;
+      return <NotesPanel {...bench} sound={<SoundBar {...bench} />} />;
     case 'air':
       return (
         <AirPanel
           {...bench}
           predictionOptions={draft.predictionOptions}
           onChoosePredictionOptions={draft.choosePredictionOptions}
+          sound={<SoundBar {...bench} />}
         />
       );
     case 'holes':

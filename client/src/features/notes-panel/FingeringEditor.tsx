@@ -1,4 +1,3 @@
-import type { ReactNode } from 'react';
 import type { Fingering } from '#shared/document/design-document.ts';
 import { readNoteName, printNoteName } from '#shared/music/note-name.ts';
 import type { LabelledHole } from '../../bench/hole-labels.ts';
@@ -19,12 +18,10 @@ interface FingeringEditorProps extends Pick<PanelProps, 'onSelect' | 'onEdit'> {
   row: ChartRow;
   holes: readonly LabelledHole[];
   readOnly: boolean;
-  /** Buttons that make the note heard. */
-  children: ReactNode;
 }
 
 /** All that a fingering holds, below its row in the chart. */
-export function FingeringEditor({ row, holes, readOnly, onSelect, onEdit, children }: FingeringEditorProps) {
+export function FingeringEditor({ row, holes, readOnly, onSelect, onEdit }: FingeringEditorProps) {
   const { fingering } = row;
   const { id } = fingering;
   const edit = (label: string, change: (before: Fingering) => Fingering, mergeKey?: string) =>
@@ -91,7 +88,6 @@ export function FingeringEditor({ row, holes, readOnly, onSelect, onEdit, childr
           onChange={(half) => edit('half covering', (before) => ({ ...before, half }), 'half')}
         />
         <div className="ml-auto flex flex-wrap gap-2">
-          {children}
           {!readOnly && (
             <>
               <Button

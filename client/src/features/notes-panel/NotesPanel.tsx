@@ -54,9 +54,7 @@ export function NotesPanel({ sound, ...props }: NotesPanelProps) {
                     readOnly={readOnly !== null}
                     onSelect={onSelect}
                     onEdit={onEdit}
-                  >
-                    {sound}
-                  </FingeringEditor>
+                  />
                 </div>
               </div>
             )}
@@ -69,7 +67,9 @@ export function NotesPanel({ sound, ...props }: NotesPanelProps) {
         readOnly={readOnly}
         onSelect={onSelect}
         onEdit={onEdit}
-      />
+      >
+        {sound}
+      </ChartFoot>
       <ScaleForm pitch={document.pitch} readOnly={readOnly} onEdit={onEdit} />
     </section>
   );
