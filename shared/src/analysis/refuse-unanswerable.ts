@@ -17,11 +17,21 @@ const HOLE_KEYS: Record<string, string> = {
   fraction: 'diameterMm',
 };
 
+/** Below this a hole is a pinprick whose air sticks to its wall, mm. */
+const NARROWEST_HOLE_MM = 0.1;
+
 /** Throws `EngineInputError`, under the document's own field, for the first hole that no formula answers for. */
 export function refuseUnanswerableHoles(document: DesignDocument, design: DesignColumn): void {
   design.column.holes.forEach((hole, index) => {
     const source = design.holes[index];
     const place = document.holes.findIndex((other) => other.id === source?.id);
+    if (source !== undefined && source.diameterMm < NARROWEST_HOLE_MM) {
+      throw new EngineInputError(
+        `holes.${place}.diameterMm`,
+        source.diameterMm,
+        `A hole of ${source.diameterMm} mm is too narrow for the formulas. Make it ${NARROWEST_HOLE_MM} mm or more.`,
+      );
+    }
     for (const state of [{ kind: 'open' }, { kind: 'closed' }] as const) {
       answering(`holes.${place}`, HOLE_KEYS, () => holeShape(hole, state));
     }

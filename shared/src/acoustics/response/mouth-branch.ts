@@ -27,12 +27,22 @@ export interface MouthOpening {
   kind: 'side' | 'end';
 }
 
-interface Embouchure {
+/** An embouchure hole; from the bore outwards its parts stand in the cells one by one, for the count of turns. */
+export interface Embouchure {
   shape: HoleShape;
   chimney: Slice[];
   cavity: Slice[];
-  cavityTwoPort: number;
   lip: number;
+  /** Address of half the series reactance. */
+  series: number;
+  /** Address of the admittance of stopper cavity and node together. */
+  side: number;
+  /** Address of the inner reactance. */
+  inner: number;
+  /** Address of the chimney, outlet first. */
+  chimneyTwoPort: number;
+  /** Address of the outlet's impedance. */
+  outlet: number;
 }
 
 /** The mouth end as a two-port from its outlet to the bore. */
@@ -118,7 +128,11 @@ function planEmbouchure(
       const from = cavity[i - 1];
       return from === undefined ? [] : plan.slices(from, to);
     }),
-    cavityTwoPort: plan.take(TWO_PORT_CELLS),
+    series: plan.take(1),
+    side: plan.take(2),
+    inner: plan.take(1),
+    chimneyTwoPort: plan.take(TWO_PORT_CELLS),
+    outlet: plan.take(2),
     lip: (lipLength(lips) * end.scale) / (Math.PI * radius * radius),
   };
 }
@@ -156,36 +170,43 @@ function appendScaled(cells: Cells, at: number, z0: number): void {
   appendSeries(cells, at, cell(end, 0) * z0, cell(end, 1) * z0);
 }
 
-// From the lips inwards: outlet, chimney turned round, inner length, node, then the cavity beside the bore.
-function tuneEmbouchure(cells: Cells, branch: MouthBranch, embouchure: Embouchure, outside: number): void {
+// Its parts, then the two-port from the lips inwards: outlet, chimney, inner length, cavity and node, half series length.
+function tuneEmbouchure(cells: Cells, branch: MouthBranch, parts: Embouchure, outside: number): void {
   const { twoPort, medium } = branch;
-  const { shape, cavityTwoPort } = embouchure;
+  const { shape, chimneyTwoPort, outlet } = parts;
   const reactance = cell(cells, medium) * cell(cells, medium + 1);
+  cells[parts.series] = reactance * shape.halfSeries;
+  cells[parts.inner] = reactance * shape.inner;
+  tuneSide(cells, branch, parts);
+  writeIdentity(cells, chimneyTwoPort);
+  appendSlices(cells, chimneyTwoPort, parts.chimney);
+  reverseTwoPort(cells, chimneyTwoPort);
   const k = cell(cells, outside);
   const outer = k * cell(cells, outside + 1);
-  writeIdentity(cells, cavityTwoPort);
-  appendSlices(cells, cavityTwoPort, embouchure.chimney);
-  reverseTwoPort(cells, cavityTwoPort);
-  selfRadiation(k * shape.outerRadius, end, 0);
   const body = outer / (4 * Math.PI * shape.outerRadius);
-  appendSeries(cells, twoPort, -body * cell(end, 1), outer * embouchure.lip + body * cell(end, 0));
-  appendTwoPort(cells, twoPort, cavityTwoPort);
-  appendSeries(cells, twoPort, 0, reactance * shape.inner);
-  const volume = NODE_COMPLIANCE_RATIO * Math.PI * shape.innerRadius ** 3;
-  appendShunt(cells, twoPort, 0, (k * volume) / cell(cells, medium + 1));
-  writeIdentity(cells, cavityTwoPort);
-  appendSeries(cells, cavityTwoPort, 0, reactance * shape.halfSeries);
-  appendSlices(cells, cavityTwoPort, embouchure.cavity);
-  appendClosedEnd(cells, twoPort, cavityTwoPort);
-  appendSeries(cells, twoPort, 0, reactance * shape.halfSeries);
+  selfRadiation(k * shape.outerRadius, end, 0);
+  cells[outlet] = -body * cell(end, 1);
+  cells[outlet + 1] = outer * parts.lip + body * cell(end, 0);
+  appendSeries(cells, twoPort, cell(cells, outlet), cell(cells, outlet + 1));
+  appendTwoPort(cells, twoPort, chimneyTwoPort);
+  appendSeries(cells, twoPort, 0, cell(cells, parts.inner));
+  appendShunt(cells, twoPort, cell(cells, parts.side), cell(cells, parts.side + 1));
+  appendSeries(cells, twoPort, 0, cell(cells, parts.series));
 }
 
-// Shunts a two-port with another one whose far end is shut: Y = C/A.
-function appendClosedEnd(cells: Cells, at: number, closed: number): void {
-  const ar = cell(cells, closed);
-  const ai = cell(cells, closed + 1);
-  const cr = cell(cells, closed + 4);
-  const ci = cell(cells, closed + 5);
+// Admittance beside the bore: the stopper's cavity, shut at its far end, and the node's compliance.
+function tuneSide(cells: Cells, { medium }: MouthBranch, parts: Embouchure): void {
+  const { chimneyTwoPort: cavity, shape, side } = parts;
+  writeIdentity(cells, cavity);
+  appendSeries(cells, cavity, 0, cell(cells, parts.series));
+  appendSlices(cells, cavity, parts.cavity);
+  const ar = cell(cells, cavity);
+  const ai = cell(cells, cavity + 1);
+  const cr = cell(cells, cavity + 4);
+  const ci = cell(cells, cavity + 5);
   const scale = 1 / (ar * ar + ai * ai);
-  appendShunt(cells, at, (cr * ar + ci * ai) * scale, (ci * ar - cr * ai) * scale);
+  const volume = NODE_COMPLIANCE_RATIO * Math.PI * shape.innerRadius ** 3;
+  const node = (cell(cells, medium) * volume) / cell(cells, medium + 1);
+  cells[side] = (cr * ar + ci * ai) * scale;
+  cells[side + 1] = (ci * ar - cr * ai) * scale + node;
 }

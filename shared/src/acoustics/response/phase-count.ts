@@ -3,6 +3,7 @@ import type { Segment } from './bore-plan.ts';
 import { CHAIN_CELLS, passReactance, passShunt, passTwoPort, startAtFoot } from './chain.ts';
 import type { HoleBranch } from './hole-branch.ts';
 import { nearestTurn } from './phase-track.ts';
+import type { Embouchure } from './mouth-branch.ts';
 import type { FingeringBranches, PreparedColumn } from './prepared-column.ts';
 
 /**
@@ -126,14 +127,35 @@ function roughAngle(y: number, x: number): number {
 }
 
 function passMouth(prepared: PreparedColumn): number {
-  const { cells, mouth, phaseRadius } = prepared;
+  const { cells, mouth, phaseRadius, inputRadius } = prepared;
+  if (mouth.embouchure !== null) {
+    scaleTo(prepared, inputRadius);
+    passEmbouchure(prepared, mouth.embouchure);
+    scaleTo(prepared, phaseRadius);
+    return cell(state, PHASE);
+  }
   scaleTo(prepared, phaseRadius);
   before.set(state);
   passTwoPort(cells, mouth.twoPort, state);
-  const unit = unitImpedance(prepared, phaseRadius);
-  if (mouth.embouchure === null) {
-    turnBy(unit);
-    return cell(state, PHASE);
-  }
-  return nearestTurn(reflectionPhase(state, unit), cell(state, PHASE));
+  turnBy(unitImpedance(prepared, phaseRadius));
+  return cell(state, PHASE);
+}
+
+function passEmbouchure(prepared: PreparedColumn, parts: Embouchure): void {
+  const { cells, plan } = prepared;
+  passSeries(prepared, cell(cells, parts.series));
+  passSide(prepared, cells, parts.side);
+  passSeries(prepared, cell(cells, parts.inner));
+  scaleTo(prepared, parts.shape.innerRadius);
+  passTwoPort(cells, parts.chimneyTwoPort, state);
+  const length = parts.shape.chimney.reduce((sum, piece) => sum + piece.length, 0);
+  const expected = cell(state, PHASE) - 2 * cell(cells, plan.outside) * length;
+  const unit = unitImpedance(prepared, parts.shape.innerRadius);
+  state[PHASE] = nearestTurn(reflectionPhase(state, unit), expected);
+  before.set(state);
+  const resistance = cell(cells, parts.outlet);
+  const reactance = cell(cells, parts.outlet + 1);
+  state[0] = cell(state, 0) + resistance * cell(state, 2) - reactance * cell(state, 3);
+  state[1] = cell(state, 1) + resistance * cell(state, 3) + reactance * cell(state, 2);
+  turnBy(unit);
 }

@@ -1,4 +1,5 @@
 import { cell } from '../complex/cells.ts';
+import { EngineInputError } from '../engine-input-error.ts';
 import { chainImpedance } from './chain.ts';
 import { coupledImpedance } from './input-impedance.ts';
 import { countedPhase } from './phase-count.ts';
@@ -38,6 +39,8 @@ const SETTLED_STEP = 0.8;
 const LEAKING = 0.7;
 /** Hz; nothing in an instrument is narrower. */
 const NARROWEST = 1e-3;
+/** No instrument needs so many; a search that does has lost its way. */
+const MOST_SAMPLES = 20_000;
 /** A fall below the first lets the next grid sample be left out, below the second the next three, rad. */
 const SLOW_FALL = 0.7;
 const VERY_SLOW_FALL = 0.3;
@@ -59,6 +62,7 @@ const CROSS_MODE = 1.84;
  * @param fingerings - branches of each fingering
  * @param search - how far to go
  * @returns for each fingering its track, through the last resonance wanted where there are so many
+ * @throws EngineInputError where the impedance is no number or the phase never settles
  * @source R. M. Foster, Bell System Technical Journal 3 (1924) 259 (reactance theorem)
  */
 export function scanPhases(
@@ -136,6 +140,13 @@ function levelOf(order: number, track: PhaseTrack, maxima: boolean): number {
 function sample({ prepared, fingering, search, track }: Probe, place: number, frequency: number): void {
   const phase = reflectionPhase(prepared, fingering, search.coupling);
   const reflected = reflectedPower(prepared);
+  if (!Number.isFinite(phase) || track.count >= MOST_SAMPLES) {
+    throw new EngineInputError(
+      'bore.stations',
+      frequency,
+      'No resonances can be told apart in so narrow or so uneven a bore. Check the diameters of bore and holes.',
+    );
+  }
   track.insert(place, { frequency, phase, reflected, counted: countedPhase(prepared, fingering) });
 }
 
