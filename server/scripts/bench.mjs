@@ -25,7 +25,7 @@ await runLauncher(async () => {
     };
     const { code } = await run(
       process.execPath,
-      ['--import', 'tsx', inRoot('tests', 'bench', 'run-bench.ts')],
+      ['--expose-gc', '--import', 'tsx', inRoot('tests', 'bench', 'run-bench.ts')],
       {
         cwd: inRoot(),
         env: { ...process.env, ...environment },

@@ -37,7 +37,7 @@ async function measureInBrowser(databaseUrl: string): Promise<Record<string, Fig
 
 const databaseUrl = setting('TEST_DATABASE_URL');
 const figures = {
-  predictions: await measureEngine(),
+  ...(await measureEngine()),
   sheet: await measureSheet(),
   ...(await measureReads(databaseUrl)),
   ...(await measureInBrowser(databaseUrl)),
