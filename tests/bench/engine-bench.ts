@@ -1,5 +1,5 @@
 import { execFileSync } from 'node:child_process';
-import { complex, cosh, divide, multiply, add, sinh, sqrt, type Complex } from 'mathjs';
+import { complex, cosh, divide, multiply, add, sinh, type Complex } from 'mathjs';
 import { designSensitivities } from '#shared/analysis/design-sensitivities.ts';
 import { predictDesign } from '#shared/analysis/predict-design.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
@@ -133,8 +133,7 @@ function plainImpedance(frequency: number): Complex {
   const k = (2 * Math.PI * frequency) / 345;
   let load = complex(0.25 * (k * 6.35e-3) ** 2, 0.61 * k * 6.35e-3);
   for (let segment = 0; segment < 7; segment += 1) {
-    const gamma = sqrt(complex(-k * k, 0.02 * k * k)) as Complex;
-    const argument = multiply(gamma, 0.038) as Complex;
+    const argument = complex(0.02 * k * 0.038, k * 0.038);
     const top = add(multiply(cosh(argument), load), sinh(argument));
     const bottom = add(multiply(sinh(argument), load), cosh(argument));
     load = divide(top, bottom) as Complex;

@@ -16,7 +16,7 @@ const medium = {
 };
 
 /** Largest relative error of the input impedance over all rows; both are over the input's characteristic impedance. */
-function largestError(bore: { x_m: number[]; r_m: number[]; rows: number[][] }): number {
+function largestError(bore: { x_m: number[]; r_m: number[]; rows: (number | null)[][] }): number {
   const plan = new BorePlan(medium, null);
   const segment = plan.segment(bore.x_m.map((position, i) => ({ position, radius: bore.r_m[i]! })));
   const cells = plan.cells();

@@ -54,7 +54,7 @@ function columnOf(bodyName: string, mediumName: string): Column {
 describe('whole instruments against an independent computation from the same rules', () => {
   it.each(cases)('gives impedance and resonances of %s', (name, expected) => {
     const [body, medium, , fingering] = name.split('|') as [string, string, string, string];
-    const states = [...fingering].map((mark): HoleState => ({ kind: mark === 'X' ? 'closed' : 'open' }));
+    const states = Array.from(fingering, (mark): HoleState => ({ kind: mark === 'X' ? 'closed' : 'open' }));
     const { prepared, fingerings } = prepareColumn(columnOf(body, medium), [states]);
     for (const [frequency, re, im] of expected.Z) {
       tuneColumn(prepared, frequency!, false);
