@@ -9,7 +9,7 @@ import { printWhen } from '../../lib/print-when.ts';
 import { classNames } from '../../ui/class-names.ts';
 import { useElementWidth } from '../../ui/use-element-width.ts';
 import { describeDesign, TEMPERAMENT_WORDS } from './design-words.ts';
-import { DesignRowMenu } from './DesignRowMenu.tsx';
+import { DesignRowMenu, type RackRefusals } from './DesignRowMenu.tsx';
 import { RackDrawing } from './RackDrawing.tsx';
 import { RackHead } from './RackHead.tsx';
 import { rackScale, type RackScale } from './rack-scale.ts';
@@ -25,11 +25,6 @@ interface DesignRackProps {
   onChange: (list: ListDesignsQuery) => void;
   /** Why this person may not copy, rename or archive; null when they may. */
   refusals: RackRefusals;
-}
-
-export interface RackRefusals {
-  copy: string | null;
-  edit: string | null;
 }
 
 /** Every design drawn to one scale, feet to the right, with what is known of its pitch. */

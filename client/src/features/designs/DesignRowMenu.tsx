@@ -3,9 +3,14 @@ import { Link } from 'react-router';
 import type { DesignSummary } from '#shared/contract/designs.ts';
 import { Menu, MenuDivider, MenuItem } from '../../ui/Menu.tsx';
 import { Problem } from '../../ui/Problem.tsx';
-import type { RackRefusals } from './DesignRack.tsx';
 import { useArchiveDesign, useCopyDesign, useRenameDesign } from './designs.queries.ts';
 import { NameDialog } from './NameDialog.tsx';
+
+/** Why this person may not copy, rename or archive; null when they may. */
+export interface RackRefusals {
+  copy: string | null;
+  edit: string | null;
+}
 
 interface DesignRowMenuProps {
   design: DesignSummary;
