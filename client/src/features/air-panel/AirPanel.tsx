@@ -21,6 +21,8 @@ interface AirPanelProps extends PanelProps {
   sound?: ReactNode;
 }
 
+/** The drawing is not squeezed below this, px. */
+const LEAST_WIDTH = 300;
 /** So many resonances have a ribbon and a row of pressures. */
 const RIBBONS = 4;
 
@@ -47,7 +49,7 @@ export function AirPanel({ sound, predictionOptions, onChoosePredictionOptions, 
   return (
     <section aria-label="Air column">
       <RibbonShelf {...props} ribbons={ribbons} resonances={resonances} mode={mode} onMode={setChosenMode} />
-      <div className="grid">
+      <div className={classNames('grid', !zone.isWide && 'pb-18')}>
         <div
           className={classNames('z-10 pt-2 pb-6', zone.isBeside && 'col-start-1 row-start-1')}
           style={{ marginInline: zone.x, ...(zone.isBeside ? { width: zone.width } : {}) }}
@@ -91,9 +93,9 @@ const soundingMode = (predicted: FingeringPrediction | null): number => predicte
 /** Where the drawing and the form stand: left of the columns, or above them where the page is narrow. */
 function zoneOf({ layout, measures, widthPx }: BenchGeometry) {
   const { x, width } = measures.leftZone;
-  if (layout === 'wide') return { x, width: 512, isBeside: true };
-  if (layout === 'tablet') return { x, width, isBeside: true };
-  return { x, width: widthPx - 2 * x, isBeside: false };
+  if (layout === 'wide') return { x, width: 512, isBeside: true, isWide: true };
+  if (layout === 'tablet') return { x, width, isBeside: true, isWide: false };
+  return { x, width: Math.max(LEAST_WIDTH, widthPx - 2 * x), isBeside: false, isWide: false };
 }
 
 /** The chosen fingering's, else the lowest note's. */

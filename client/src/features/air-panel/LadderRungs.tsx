@@ -22,6 +22,8 @@ interface LadderRungsProps {
 
 /** A rung is moved from its exact multiple by this share of the spacing per 100 cents. */
 const STRETCH = 0.42;
+/** Narrower than this, the shading speaks for itself, px. */
+const ROOM_FOR_LEAK = 96;
 /** No length is left at so many dB below the strongest. */
 const FAINTEST_DB = 30;
 
@@ -37,14 +39,16 @@ export function LadderRungs(props: LadderRungsProps) {
           <>
             <rect x={x} y={top} width={width} height={cutoffY - top} className="air-leak" />
             <line x1={x} x2={x + width} y1={cutoffY} y2={cutoffY} className="air-cutoff" />
-            <text
-              x={x + width - 6}
-              y={cutoffY - 6}
-              textAnchor="end"
-              className="bench-quiet-label air-haloed is-on-leak"
-            >
-              open holes leak
-            </text>
+            {width > ROOM_FOR_LEAK && (
+              <text
+                x={x + width - 6}
+                y={cutoffY - 6}
+                textAnchor="end"
+                className="bench-quiet-label air-haloed is-on-leak"
+              >
+                open holes leak
+              </text>
+            )}
           </>
         )}
         <path d={`M${x} ${top}V${bottom - 14}M${x + width} ${top}V${bottom - 14}`} className="air-stile" />

@@ -36,7 +36,11 @@ export function PressureTable(props: PressureTableProps) {
     return name === 'positionMm' ? centsOf?.['foot.positionMm'] : undefined;
   };
   return (
-    <div role="table" aria-label="Pressure at the holes" className="relative">
+    <div
+      role="table"
+      aria-label="Pressure at the holes, percent of the most in the bore"
+      className="relative"
+    >
       <Leaders {...props} />
       <div role="row" className="sr-only">
         <span role="columnheader">At</span>
@@ -76,13 +80,16 @@ export function PressureTable(props: PressureTableProps) {
           }}
         />
       )}
+      {ribbons.answer !== null && (
+        <PressureHeading left={lineLeft(geometry)} right={geometry.widthPx - geometry.hangRight} />
+      )}
       {(ribbons.answer ?? []).map((ribbon) => (
         <Row
           key={ribbon.mode}
           {...props}
           height={38}
           isStrong={ribbon.mode === mode}
-          name={`Pressure, resonance ${ribbon.mode}`}
+          name={`Resonance ${ribbon.mode}`}
           cell={(key) => (
             <PressureBar
               share={ribbons.isCurrent ? pressureAt(ribbon.points, placeOf(key)) : null}
@@ -109,15 +116,23 @@ export function PressureTable(props: PressureTableProps) {
           />
         </>
       )}
-      {ribbons.answer !== null && (
-        <p
-          className="text-small text-ink3 absolute"
-          style={{ left: Math.max(8, geometry.labelRight - 116), bottom: -20 }}
-        >
-          Pressure in percent of the most in the bore.
-        </p>
-      )}
     </div>
+  );
+}
+
+const lineLeft = ({ labelRight }: PanelProps['geometry']) => Math.max(8, labelRight - 122);
+
+/** What the bars below are; the rows themselves carry their resonance. */
+function PressureHeading({ left, right }: { left: number; right: number }) {
+  return (
+    <p
+      aria-hidden="true"
+      className="text-label border-hair relative border-t pt-0.5"
+      style={{ marginLeft: left, marginRight: right }}
+    >
+      <b className="font-semibold">Pressure at the hole</b>{' '}
+      <span className="text-small text-ink3">percent of the most in the bore</span>
+    </p>
   );
 }
 
@@ -131,13 +146,13 @@ interface RowProps extends PanelProps {
 
 function Row({ geometry, selection, height, name, unitName = '', isStrong = false, cell }: RowProps) {
   const { columns, labelRight, hangRight } = geometry;
-  const left = Math.max(8, labelRight - 122);
+  const left = lineLeft(geometry);
   return (
     <div role="row" className="relative" style={{ height }}>
       <div
         aria-hidden="true"
         className="border-hair absolute top-0 border-t"
-        style={{ left, width: hangRight - left }}
+        style={{ left, right: geometry.widthPx - hangRight }}
       />
       <div
         role="rowheader"

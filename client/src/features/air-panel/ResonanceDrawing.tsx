@@ -118,7 +118,10 @@ interface FrequencyAxisProps {
 
 function FrequencyAxis({ y, toHz, curveWidth }: FrequencyAxisProps) {
   const inKilo = toHz > 1500;
-  const ticks = scaleLinear([0, toHz], [0, 1]).ticks(5);
+  // The unit stands at the top of the axis, in place of a figure.
+  const ticks = scaleLinear([0, toHz], [0, 1])
+    .ticks(5)
+    .filter((hz) => y(hz) > TOP + 14);
   return (
     <g aria-hidden="true">
       <line x1={AXIS_X} x2={AXIS_X} y1={TOP} y2={BOTTOM} className="air-axis" />

@@ -18,6 +18,8 @@ interface RibbonShelfProps extends PanelProps {
 const TOP = 8;
 const ROW = 27;
 const CHOSEN_ROW = 64;
+/** What the waists and bulges mean is said only where the bore leaves room beside it, px. */
+const ROOM_FOR_LEGEND = 104;
 export const RIBBON_SHELF = 154;
 
 /** The standing wave of each resonance along the bore: fat where the pressure is, waist where it is not. */
@@ -56,6 +58,7 @@ export function RibbonShelf(props: RibbonShelfProps) {
           isChosen={rung.mode === mode}
           y={y}
           reach={height / 2 - (rung.mode === mode ? 5 : 4)}
+          labelX={geometry.measures.leftZone.x}
           from={geometry.x(mouthMm)}
           to={geometry.x(footMm)}
           x={geometry.x}
@@ -83,13 +86,26 @@ interface RibbonRowProps {
   isChosen: boolean;
   y: number;
   reach: number;
+  labelX: number;
   from: number;
   to: number;
   x: (mm: number) => number;
   onChoose: () => void;
 }
 
-function RibbonRow({ rung, ribbon, isCurrent, isChosen, y, reach, from, to, x, onChoose }: RibbonRowProps) {
+function RibbonRow({
+  rung,
+  ribbon,
+  isCurrent,
+  isChosen,
+  y,
+  reach,
+  labelX,
+  from,
+  to,
+  x,
+  onChoose,
+}: RibbonRowProps) {
   const points = ribbon?.points ?? [];
   const shape = area<(typeof points)[number]>()
     .x((point) => x(point.positionMm))
@@ -102,7 +118,6 @@ function RibbonRow({ rung, ribbon, isCurrent, isChosen, y, reach, from, to, x, o
     event.stopPropagation();
     onChoose();
   };
-  const labelX = Math.min(40, Math.max(8, from - 4));
   return (
     <g
       role="button"
@@ -131,20 +146,38 @@ function RibbonRow({ rung, ribbon, isCurrent, isChosen, y, reach, from, to, x, o
             className="air-node"
           />
         ))}
-      <text x={labelX} y={y + (isChosen ? -3 : 5)} className="bench-label air-haloed">
+      <RibbonLabel rung={rung} isChosen={isChosen} x={labelX} y={y} room={from - labelX} />
+    </g>
+  );
+}
+
+interface RibbonLabelProps {
+  rung: LadderRung;
+  isChosen: boolean;
+  x: number;
+  y: number;
+  /** Between the label and the bore, px. */
+  room: number;
+}
+
+function RibbonLabel({ rung, isChosen, x, y, room }: RibbonLabelProps) {
+  const hasLegend = isChosen && room > ROOM_FOR_LEGEND;
+  return (
+    <>
+      <text x={x} y={y + (hasLegend ? -3 : 5)} className="bench-label air-haloed">
         <tspan className="bench-label-strong">{rung.mode}</tspan>
         <tspan dx={8} className={isChosen ? 'bench-label-strong' : undefined}>
           {rung.frequencyHz.toFixed(0)} Hz
         </tspan>
       </text>
-      {isChosen && (
-        <text x={labelX} y={y + 14} className="bench-quiet-label air-haloed">
+      {hasLegend && (
+        <text x={x} y={y + 14} className="bench-quiet-label air-haloed">
           bar: no pressure
-          <tspan x={labelX} dy={15}>
+          <tspan x={x} dy={15}>
             fat: most pressure
           </tspan>
         </text>
       )}
-    </g>
+    </>
   );
 }

@@ -35,7 +35,7 @@ export function BorePanel({ hang, ...props }: BorePanelProps) {
           setChosen(index);
         }}
       />
-      <div className="grid">
+      <div className={classNames('grid', !isWide && 'pb-18')}>
         <div
           className={classNames(
             'z-10 pt-2 pb-6',

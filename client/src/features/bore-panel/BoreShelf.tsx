@@ -33,6 +33,7 @@ export function BoreShelf(props: BoreShelfProps) {
         `${geometry.x(positionMm).toFixed(1)} ${scale.y(diameterMm).toFixed(1)}`,
     )
     .join('L');
+  const times = `${timesWider(scale, geometry.pxPerMm)} times wider`;
   const [left, right] = [
     geometry.x(stations[0]?.positionMm ?? 0),
     geometry.x(stations.at(-1)?.positionMm ?? 0),
@@ -55,11 +56,8 @@ export function BoreShelf(props: BoreShelfProps) {
           isBeside={isBeside}
           y={20}
           title="Bore wall"
-          lines={[
-            'wood above, air below',
-            `${timesWider(scale, geometry.pxPerMm)} times wider`,
-            'than it is long',
-          ]}
+          lines={['wood above, air below', times, 'than it is long']}
+          sentence={`wood above, air below, ${times} than it is long`}
         />
         <SpanLines stations={stations} geometry={geometry} unit={unit} isLabelled={isBeside} />
       </g>

@@ -45,7 +45,7 @@ export function BoreTable({ document, geometry, unit, selection }: PanelProps) {
           <div
             aria-hidden="true"
             className="border-hair absolute top-0 border-t"
-            style={{ left: Math.max(8, labelRight - 116), width: hangRight - Math.max(8, labelRight - 116) }}
+            style={{ left: Math.max(8, labelRight - 116), right: geometry.widthPx - hangRight }}
           />
           <div
             role="rowheader"

@@ -53,9 +53,14 @@ export function MouthForm({ document, unit, sensitivities, selection, readOnly, 
   );
   return (
     <section aria-labelledby="mouth-heading" className="mt-4 min-w-0 flex-1 min-[1280px]:mt-0">
-      <h2 id="mouth-heading" className="text-section font-semibold">
-        {MOUTH_NAMES[mouthEnd.kind]}
-      </h2>
+      <div className="flex items-baseline justify-between gap-2">
+        <h2 id="mouth-heading" className="text-section font-semibold">
+          {MOUTH_NAMES[mouthEnd.kind]}
+        </h2>
+        {sensitivities !== null && selection.fingering !== null && (
+          <span className="text-small text-ink3">cents per 0.1 mm</span>
+        )}
+      </div>
       {mouthEnd.kind === 'window' && <WindowSection window={mouthEnd} unit={unit} />}
       <div className="mt-1 flex flex-col gap-2">
         {MOUTH_FIELDS[mouthEnd.kind].map(field)}
@@ -117,5 +122,5 @@ interface CentsPerTenthProps {
 function CentsPerTenth({ sensitivities, fingering, path }: CentsPerTenthProps) {
   const cents = sensitivities?.fingerings.find(({ id }) => id === fingering)?.centsPerUnit[path];
   if (cents === undefined) return null;
-  return <span className="text-label text-ink3">{formatCents(cents / 10, 2)} cents per 0.1</span>;
+  return <span className="text-label text-ink3">{formatCents(cents / 10, 2)} </span>;
 }

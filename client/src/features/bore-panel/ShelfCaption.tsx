@@ -2,16 +2,19 @@ interface ShelfCaptionProps {
   isBeside: boolean;
   y: number;
   title: string;
+  /** Below the heading, where there is room. */
   lines: readonly string[];
+  /** The same in one line. */
+  sentence: string;
 }
 
 /** A heading of the shelf with its words below it, or in one line where there is no room beside. */
-export function ShelfCaption({ isBeside, y, title, lines }: ShelfCaptionProps) {
+export function ShelfCaption({ isBeside, y, title, lines, sentence }: ShelfCaptionProps) {
   if (!isBeside) {
     return (
       <text x={24} y={y - 5} className="bench-quiet-label bore-haloed">
         <tspan className="bench-label-strong">{title}</tspan>
-        <tspan dx={8}>{lines.join(' ')}</tspan>
+        <tspan dx={8}>{sentence}</tspan>
       </text>
     );
   }

@@ -38,6 +38,7 @@ export function WiderCurves({ document, geometry, selection, isBeside }: WiderCu
         y={170}
         title="Wider here"
         lines={['up is sharper', 'cents, 0.1 mm', 'over 10 mm']}
+        sentence="up is sharper, cents for 0.1 mm over 10 mm"
       />
       <line
         x1={geometry.x(boreEnds(document).mouthMm)}

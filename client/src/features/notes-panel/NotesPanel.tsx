@@ -1,6 +1,7 @@
 import { useMemo, type ReactNode } from 'react';
 import { labelledHoles } from '../../bench/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
+import { classNames } from '../../ui/class-names.ts';
 import { chartRows, type ChartRow } from './chart-rows.ts';
 import { ChartFoot } from './ChartFoot.tsx';
 import { ChartHead } from './ChartHead.tsx';
@@ -27,7 +28,10 @@ export function NotesPanel({ sound, ...props }: NotesPanelProps) {
     if (next !== undefined) onSelect({ fingering: next.fingering.id });
   };
   return (
-    <section aria-label="Notes and fingerings" className="relative">
+    <section
+      aria-label="Notes and fingerings"
+      className={classNames('relative', geometry.layout !== 'wide' && 'pb-18')}
+    >
       <div role="table" aria-label="Fingering chart" className="relative">
         <ChartHead layout={layout} holes={holes} chosenHole={selection.hole} />
         {rows.map((row) => (
