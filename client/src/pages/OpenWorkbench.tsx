@@ -1,10 +1,11 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { useLocation, useNavigate } from 'react-router';
 import type { DesignSummary } from '#shared/contract/designs.ts';
 import { permissionRefusal } from '#shared/rules/permissions.ts';
 import { BenchDefs } from '../bench/BenchDefs.tsx';
 import { WHOLE } from '../bench/bench-view.ts';
 import type { PanelProps } from '../bench/panel-props.ts';
+import { useStable } from '../bench/use-stable.ts';
 import { ConflictDialog } from '../features/draft/ConflictDialog.tsx';
 import { DraftBands } from '../features/draft/DraftBands.tsx';
 import type { DraftOnBench } from '../features/draft/use-draft.ts';
@@ -12,10 +13,12 @@ import { useSuggestionDesk } from '../features/holes/use-suggestion-desk.ts';
 import { InstrumentStrip } from '../features/strip/InstrumentStrip.tsx';
 import { benchCommands } from '../features/workbench/bench-commands.ts';
 import { choosing } from '../features/workbench/choosing.ts';
+import { designFacts } from '../features/workbench/design-facts.ts';
 import { FailureLine } from '../features/workbench/FailureLine.tsx';
 import { SpokenChange } from '../features/workbench/SpokenChange.tsx';
 import { useBenchKeys } from '../features/workbench/use-bench-keys.ts';
 import { useBenchView } from '../features/workbench/use-bench-view.ts';
+import { useHistory } from '../features/workbench/use-history.ts';
 import { usePlacing } from '../features/workbench/use-placing.ts';
 import { useSelection } from '../features/workbench/use-selection.ts';
 import { useZones } from '../features/workbench/use-zones.ts';
@@ -56,10 +59,13 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
     bandCents: workshop.bandCents,
     readOnly: permissionRefusal({ role }, 'edit-design'),
     selection,
-    onSelect: choosing(document, selection, select),
+    onSelect: useStable(choosing(document, selection, select)),
     onEdit: draft.edit,
     geometry: desk.geometry,
   };
+  const { air, pitch } = document;
+  const conditions = useMemo(() => ({ air, pitch }), [air, pitch]);
+  const history = useHistory(draft);
   const suggestion = useSuggestionDesk(bench, isDragging);
   const [best] = suggestion.suggestions ?? [];
   useZones();
@@ -80,14 +86,29 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
   return (
     <>
       <BenchDefs />
-      <WorkbenchHead {...{ design, draft, panel, bench }} onAddHole={placing.start} />
+      <WorkbenchHead
+        {...{ design, panel, unit, conditions, history }}
+        name={document.name}
+        facts={designFacts(document, unit)}
+        bandCents={workshop.bandCents}
+        isWide={desk.geometry.layout === 'wide'}
+        readOnly={bench.readOnly}
+        save={draft.save}
+        onAddHole={useStable(placing.start)}
+      />
       <div
         className="bg-bench border-hair sticky top-0 z-20 border-b outline-offset-[-3px]"
         data-zone="strip"
         tabIndex={-1}
       >
         <div ref={measure} className="relative mx-auto max-w-400">
-          <InstrumentStrip {...bench} desk={desk} placing={placing} onDragging={setDragging} />
+          <InstrumentStrip
+            {...bench}
+            desk={desk}
+            placing={placing}
+            isDragging={isDragging}
+            onDragging={setDragging}
+          />
           {desk.geometry.layout === 'wide' && (
             <ZoomButtons
               isWhole={desk.view.kind === 'whole'}
@@ -118,7 +139,7 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
           onSettle={draft.settle}
         />
       )}
-      <SpokenChange {...bench} />
+      <SpokenChange {...bench} isDragging={isDragging} />
     </>
   );
 }

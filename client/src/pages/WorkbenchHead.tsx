@@ -1,12 +1,13 @@
+import { memo } from 'react';
 import { useLocation } from 'react-router';
 import type { DesignSummary } from '#shared/contract/designs.ts';
+import type { DesignDocument } from '#shared/document/design-document.ts';
+import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { permissionRefusal } from '#shared/rules/permissions.ts';
-import type { PanelProps } from '../bench/panel-props.ts';
 import { SaveNote } from '../features/draft/SaveNote.tsx';
 import type { DraftOnBench } from '../features/draft/use-draft.ts';
 import { Conditions } from '../features/workbench/Conditions.tsx';
-import { designFacts } from '../features/workbench/design-facts.ts';
-import { DesignHeader } from '../features/workbench/DesignHeader.tsx';
+import { DesignHeader, type History } from '../features/workbench/DesignHeader.tsx';
 import { PanelLinks } from '../features/workbench/PanelLinks.tsx';
 import { SheetMenu } from '../features/workbench/SheetMenu.tsx';
 import { unitPreference } from '../lib/preferences.ts';
@@ -16,9 +17,17 @@ import { Button } from '../ui/Button.tsx';
 
 interface WorkbenchHeadProps {
   design: DesignSummary;
-  draft: DraftOnBench;
   panel: WorkbenchPanel;
-  bench: PanelProps;
+  name: string;
+  /** One line about the instrument. */
+  facts: string;
+  conditions: Pick<DesignDocument, 'air' | 'pitch'>;
+  bandCents: readonly number[];
+  unit: LengthUnit;
+  isWide: boolean;
+  readOnly: string | null;
+  save: DraftOnBench['save'];
+  history: History;
   onAddHole: () => void;
 }
 
@@ -29,34 +38,31 @@ const PANEL_WORDS: Record<WorkbenchPanel, string> = {
   air: 'Air',
 };
 
-/** Header, panels and conditions of the design in hand. */
-export function WorkbenchHead({ design, draft, panel, bench, onAddHole }: WorkbenchHeadProps) {
+/** Header, panels and conditions of the design in hand; rests while a hole is dragged. */
+export const WorkbenchHead = memo(function WorkbenchHead(props: WorkbenchHeadProps) {
+  const { design, unit, save, history, readOnly } = props;
   const { search } = useLocation();
-  const { document, unit, geometry } = bench;
-  const isWide = geometry.layout === 'wide';
   const panelTo = (to: WorkbenchPanel) => paths.workbench(design.id, design.revisionNumber, to) + search;
   const links = WORKBENCH_PANELS.map((each) => ({ to: panelTo(each), label: PANEL_WORDS[each] }));
-  const saveNote = <SaveNote save={draft.save} />;
+  const saveNote = <SaveNote save={save} />;
   return (
     <>
       <DesignHeader
-        name={document.name}
+        name={props.name}
         revision={design.revisionNumber}
         state={design.state}
-        facts={designFacts(document, unit)}
-        history={draft}
+        facts={props.facts}
+        history={history}
         saveNote={saveNote}
-        actions={<HeadActions {...{ design, draft, panel, bench, onAddHole }} />}
+        actions={<HeadActions {...props} />}
       />
-      {bench.readOnly !== null && (
-        <p className="bg-sheet px-margin text-data text-ink2 pb-1.5">{bench.readOnly}</p>
-      )}
-      {isWide ? (
+      {readOnly !== null && <p className="bg-sheet px-margin text-data text-ink2 pb-1.5">{readOnly}</p>}
+      {props.isWide ? (
         <div className="bg-sheet border-hair px-margin flex h-10 items-stretch border-b">
           <PanelLinks links={links} atBottom={false} />
           <Conditions
-            document={document}
-            bandCents={bench.bandCents}
+            document={props.conditions}
+            bandCents={props.bandCents}
             unit={unit}
             saveNote={saveNote}
             airTo={panelTo('air')}
@@ -70,23 +76,21 @@ export function WorkbenchHead({ design, draft, panel, bench, onAddHole }: Workbe
       )}
     </>
   );
-}
+});
 
-function HeadActions({ design, draft, panel, bench, onAddHole }: WorkbenchHeadProps) {
+function HeadActions({ design, panel, unit, save, readOnly, onAddHole }: WorkbenchHeadProps) {
   const { role } = useSession();
   const printing = permissionRefusal({ role }, 'print-sheet');
   const unsaved =
-    draft.save.status === 'saved'
-      ? null
-      : 'The sheet is printed from what is saved. Wait until this draft is.';
+    save.status === 'saved' ? null : 'The sheet is printed from what is saved. Wait until this draft is.';
   return (
     <>
       {panel === 'holes' && (
-        <Button disabled={bench.readOnly !== null} onClick={onAddHole}>
+        <Button disabled={readOnly !== null} onClick={onAddHole}>
           Add a hole
         </Button>
       )}
-      <SheetMenu designId={design.id} unit={bench.unit} refusal={printing ?? unsaved} />
+      <SheetMenu designId={design.id} unit={unit} refusal={printing ?? unsaved} />
     </>
   );
 }

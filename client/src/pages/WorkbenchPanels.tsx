@@ -59,7 +59,7 @@ export function WorkbenchPanels({ panel, bench, draft, isDragging, suggestion }:
         />
       );
     case 'holes':
-      return <HolesPanel bench={bench} chart={chart} suggestion={suggestion} />;
+      return <HolesPanel bench={bench} chart={chart} suggestion={suggestion} isDragging={isDragging} />;
   }
 }
 
@@ -77,13 +77,14 @@ interface HolesPanelProps {
   bench: PanelProps;
   chart: ReactNode;
   suggestion: SuggestionDesk;
+  isDragging: boolean;
 }
 
 /** Inspector and ladder at the left, where nothing hangs; plumb lines and sizes under the holes. */
-function HolesPanel({ bench, chart, suggestion }: HolesPanelProps) {
-  const { geometry, prediction, selection } = bench;
+function HolesPanel({ bench, chart, suggestion, isDragging }: HolesPanelProps) {
+  const { document, geometry, prediction, sensitivities, unit, selection, readOnly } = bench;
   const { leftZone } = geometry.measures;
-  const chosen = selection.fingering ?? bench.document.fingerings[0]?.id;
+  const chosen = selection.fingering ?? document.fingerings[0]?.id;
   const predicted = prediction?.fingerings.find(({ id }) => id === chosen) ?? null;
   const inspector = <HoleInspector {...bench} suggestion={suggestion} />;
   const hasLeftZone = leftZone.width > 0;
@@ -104,12 +105,16 @@ function HolesPanel({ bench, chart, suggestion }: HolesPanelProps) {
         <HangZone bench={bench}>
           {chart}
           <div data-zone="table" tabIndex={-1} className="mt-2">
-            <HoleTable {...bench} />
+            <HoleTable
+              {...{ document, geometry, sensitivities, unit, selection, readOnly }}
+              onSelect={bench.onSelect}
+              onEdit={bench.onEdit}
+            />
           </div>
         </HangZone>
         <RegisterChoice {...bench} />
         <div style={{ paddingLeft: Math.max(16, geometry.hangLeft - 112), paddingRight: 16 }}>
-          <NoticeList prediction={prediction} />
+          <NoticeList prediction={prediction} isDragging={isDragging} />
         </div>
       </div>
       {!hasLeftZone && <BottomDrawer label="Hole">{inspector}</BottomDrawer>}

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { classNames } from '../../ui/class-names.ts';
 import { lengthFormat } from '../../ui/length-format.ts';
@@ -6,6 +6,8 @@ import { plainFormat } from '../../ui/number-format.ts';
 import { useNumberEntry } from '../../ui/use-number-entry.ts';
 
 interface FigureCellProps {
+  row: string;
+  hole: string;
   label: string;
   kind: 'length' | 'angle';
   value: number;
@@ -16,17 +18,18 @@ interface FigureCellProps {
   quietText?: string | undefined;
   isChosen: boolean;
   canEdit: boolean;
-  onFocus: () => void;
-  onChange: (value: number) => void;
+  onFocus: (hole: string) => void;
+  onCommit: (row: string, hole: string, value: number) => void;
 }
 
 const FORMATS = { mm: lengthFormat('mm'), inch: lengthFormat('inch') };
 const ANGLE = plainFormat({ suffix: 'deg', step: 1, digits: 0, example: '15 or −30' });
 
 /** A size in the table that is typed over in place; what cannot be taken is said under it. */
-export function FigureCell(props: FigureCellProps) {
-  const { label, kind, value, min, max, unit, isQuiet, isChosen, canEdit, onFocus, onChange } = props;
+export const FigureCell = memo(function FigureCell(props: FigureCellProps) {
+  const { label, kind, value, min, max, unit, isQuiet, isChosen, canEdit } = props;
   const format = kind === 'length' ? FORMATS[unit] : ANGLE;
+  const onChange = (changed: number) => props.onCommit(props.row, props.hole, changed);
   const entry = useNumberEntry({ value, format, min, max, onChange });
   const [isFocused, setFocused] = useState(false);
   const look = classNames(isQuiet ? 'text-ink3' : 'text-ink', isChosen && 'font-bold');
@@ -45,7 +48,7 @@ export function FigureCell(props: FigureCellProps) {
           setFocused(true);
           // What is typed over is the figure, which takes the place of a dash only after this event.
           requestAnimationFrame(() => event.target.select());
-          onFocus();
+          props.onFocus(props.hole);
         }}
         onBlur={() => {
           setFocused(false);
@@ -68,4 +71,4 @@ export function FigureCell(props: FigureCellProps) {
       )}
     </>
   );
-}
+});

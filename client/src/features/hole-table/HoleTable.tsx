@@ -1,68 +1,87 @@
-import { useMemo, useState } from 'react';
+import { memo, useMemo, useState } from 'react';
 import { printLength } from '#shared/lengths/print-length.ts';
 import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
+import { useStable } from '../../bench/use-stable.ts';
 import { Button } from '../../ui/Button.tsx';
 import { tablePlaces, type CellPlace } from './cell-offsets.ts';
 import { FigureCell } from './FigureCell.tsx';
-import { tableRows, type EditableFigure, type TableRow } from './table-rows.ts';
+import { tableRows, type TableRow } from './table-rows.ts';
 
-/** Every size of every hole, each column under its hole. */
-export function HoleTable(props: PanelProps) {
-  const { document, prediction, geometry, unit, selection, sensitivities } = props;
+type HoleTableProps = Omit<PanelProps, 'prediction' | 'bandCents'>;
+
+/**
+ * Every size of every hole, each figure under its hole.
+ *
+ * The cells share the width evenly and their figures are shifted under the columns: a drag then moves figures about
+ * without the table being laid out again.
+ */
+export const HoleTable = memo(function HoleTable(props: HoleTableProps) {
+  const { document, geometry, unit, selection, sensitivities, readOnly, onSelect, onEdit } = props;
   const [chosenAll, setShowsAll] = useState<boolean | null>(null);
   const showsAll = chosenAll ?? geometry.layout === 'wide';
   const holes = useMemo(() => labelledHoles(document), [document]);
-  const notes = useMemo(() => hungNotes(document, prediction), [document, prediction]);
+  const notes = useMemo(() => hungNotes(document, null), [document]);
   const places = tablePlaces(geometry);
   const source = { document, sensitivities, unit, selection, holes, notes };
   const rows = tableRows({ ...source, printLength: (mm) => printLength(mm, unit) });
   const shown = showsAll ? rows : rows.filter((row) => row.isMain);
-  const width = places.right - places.left;
+  const cellWidth = (geometry.widthPx - places.labelWidth) / Math.max(1, places.cells.length);
+  const choose = useStable((hole: string) => onSelect({ hole }));
+  const commit = useStable((rowKey: string, holeId: string, value: number) => {
+    const labelled = holes.find(({ hole }) => hole.id === holeId);
+    const row = rows.find(({ key }) => key === rowKey);
+    if (labelled === undefined || row?.editable === undefined) return;
+    const { edit } = row.editable(labelled);
+    onEdit({
+      label: `${row.label} of ${labelled.title.toLowerCase()}`,
+      change: (before) => edit(before, value),
+    });
+  });
   return (
-    <div style={{ paddingLeft: places.left }}>
+    <div>
       <table
-        className="text-data max-[1279px]:text-[16px]"
-        style={{ width, tableLayout: 'fixed', borderCollapse: 'collapse' }}
+        className="text-data table-fixed border-collapse overflow-hidden max-[1279px]:text-[16px]"
+        style={{ width: geometry.widthPx }}
       >
         <caption className="sr-only">Sizes of the holes</caption>
         <colgroup>
           <col style={{ width: places.labelWidth }} />
-          {places.cells.map(({ key, width: cellWidth }) => (
-            <col key={key} style={{ width: cellWidth }} />
-          ))}
         </colgroup>
-        <thead>
+        <thead className="sr-only">
           <tr>
-            <th scope="col" className="sr-only">
-              Size
-            </th>
+            <th scope="col">Size</th>
             {places.cells.map(({ key }) => (
-              <th key={key} scope="col" className="sr-only">
+              <th key={key} scope="col">
                 {holes.find(({ hole }) => hole.id === key)?.title ?? 'Foot'}
               </th>
             ))}
           </tr>
         </thead>
         <tbody>
-          {shown.map((row) => (
-            <tr
-              key={row.key}
-              className="border-hair border-y"
-              style={{ height: geometry.measures.rowHeight }}
-            >
-              <th scope="row" className="text-label pr-3 text-right font-normal whitespace-nowrap">
-                {row.label} <span className="text-ink3 text-small">{row.unit}</span>
-              </th>
+          {shown.map((row, rowIndex) => (
+            <tr key={row.key} style={{ height: geometry.measures.rowHeight }}>
+              <RowLabel
+                row={row}
+                left={places.left}
+                labelWidth={places.labelWidth}
+                right={places.right}
+                isFirst={rowIndex === 0}
+              />
               {places.cells.map((place, index) => (
                 <TableCell
                   key={place.key}
-                  {...props}
                   row={row}
                   place={place}
+                  shift={place.middle - places.labelWidth - (index + 0.5) * cellWidth}
                   labelled={holes.find(({ hole }) => hole.id === place.key)}
                   next={holes.find(({ hole }) => hole.id === places.cells[index + 1]?.key)}
+                  unit={unit}
+                  isChosen={place.key === selection.hole}
+                  canEdit={readOnly === null}
+                  onFocus={choose}
+                  onCommit={commit}
                 />
               ))}
             </tr>
@@ -70,43 +89,92 @@ export function HoleTable(props: PanelProps) {
         </tbody>
       </table>
       {geometry.layout !== 'wide' && (
-        <Button look="bare" size="small" className="mt-1" onClick={() => setShowsAll(!showsAll)}>
-          {showsAll ? 'Fewer rows' : 'More rows'}
-        </Button>
+        <div style={{ paddingLeft: places.left }}>
+          <Button look="bare" size="small" className="mt-1" onClick={() => setShowsAll(!showsAll)}>
+            {showsAll ? 'Fewer rows' : 'More rows'}
+          </Button>
+        </div>
       )}
     </div>
   );
+});
+
+interface RowLabelProps {
+  row: TableRow;
+  left: number;
+  labelWidth: number;
+  right: number;
+  isFirst: boolean;
 }
 
-interface TableCellProps extends PanelProps {
+function RowLabel({ row, left, labelWidth, right, isFirst }: RowLabelProps) {
+  return (
+    <th scope="row" className="text-label relative p-0 font-normal">
+      <span
+        className={
+          isFirst
+            ? 'border-hair absolute inset-y-0 left-0 border-y'
+            : 'border-hair absolute inset-y-0 left-0 border-b'
+        }
+        style={{ transform: `translateX(${left}px)`, width: right - left }}
+      />
+      <span
+        className="relative block pr-3 text-right whitespace-nowrap"
+        style={{ transform: `translateX(${left}px)`, width: labelWidth }}
+      >
+        {row.label} <span className="text-ink3 text-small">{row.unit}</span>
+      </span>
+    </th>
+  );
+}
+
+interface TableCellProps {
   row: TableRow;
   place: CellPlace;
+  /** From the middle of the cell to where its figure stands, px. */
+  shift: number;
   labelled: LabelledHole | undefined;
   next: LabelledHole | undefined;
+  unit: PanelProps['unit'];
+  isChosen: boolean;
+  canEdit: boolean;
+  onFocus: (hole: string) => void;
+  onCommit: (row: string, hole: string, value: number) => void;
 }
 
 /** Widest that a figure's field gets, px. */
 const FIELD_PX = 74;
 
-function TableCell({ row, place, labelled, next, ...props }: TableCellProps) {
+function TableCell({ row, place, shift, labelled, next, ...props }: TableCellProps) {
   if (row.between !== undefined) {
     const reach = labelled !== undefined && next !== undefined ? row.between(labelled, next) : null;
-    return <BetweenCell place={place} text={reach === null ? null : printLength(reach, props.unit)} />;
+    return (
+      <BetweenCell
+        place={place}
+        shift={shift}
+        text={reach === null ? null : printLength(reach, props.unit)}
+      />
+    );
   }
-  const width = Math.min(FIELD_PX, place.width - 4);
-  const isFoot = labelled === undefined;
+  const width = Math.min(FIELD_PX, place.room - 4);
   return (
     <td className="relative p-0">
       <div
-        className="absolute inset-y-0 flex items-center justify-center"
-        style={{ left: place.middle - width / 2, width }}
+        className="absolute inset-y-0 left-1/2 flex items-center justify-center"
+        style={{ width, transform: `translateX(${shift - width / 2}px)` }}
       >
-        {!isFoot && row.editable !== undefined ? (
-          <EditableCell {...props} row={row} labelled={labelled} figure={row.editable(labelled)} />
+        {labelled !== undefined && row.editable !== undefined ? (
+          <FigureCell
+            {...row.editable(labelled)}
+            row={row.key}
+            hole={labelled.hole.id}
+            label={`${row.label}, ${labelled.title}`}
+            {...props}
+          />
         ) : (
           <PlainFigure
-            text={row.figure?.(place.key) ?? (isFoot ? row.foot : undefined)}
-            isChosen={place.key === props.selection.hole}
+            text={row.figure?.(place.key) ?? (labelled === undefined ? row.foot : undefined)}
+            isChosen={props.isChosen}
           />
         )}
       </div>
@@ -118,44 +186,19 @@ function PlainFigure({ text, isChosen }: { text: string | undefined; isChosen: b
   return <span className={isChosen ? 'font-bold' : undefined}>{text}</span>;
 }
 
-interface EditableCellProps extends PanelProps {
-  row: TableRow;
-  labelled: LabelledHole;
-  figure: EditableFigure;
-}
-
-function EditableCell({ row, labelled, figure, ...props }: EditableCellProps) {
-  const { hole, title } = labelled;
-  return (
-    <FigureCell
-      label={`${row.label}, ${title}`}
-      {...figure}
-      unit={props.unit}
-      isChosen={hole.id === props.selection.hole}
-      canEdit={props.readOnly === null}
-      onFocus={() => props.onSelect({ hole: hole.id })}
-      onChange={(value) =>
-        props.onEdit({
-          label: `${row.label} of ${title.toLowerCase()}`,
-          change: (before) => figure.edit(before, value),
-        })
-      }
-    />
-  );
-}
-
 /** Lines beside a figure are drawn only where this much of each would show, px. */
 const LEAST_LINE_PX = 12;
 
-function BetweenCell({ place, text }: { place: CellPlace; text: string | null }) {
+function BetweenCell({ place, shift, text }: { place: CellPlace; shift: number; text: string | null }) {
   if (text === null || place.between === null) return <td />;
   const line = Math.min(24, ((place.gap ?? 0) - 40) / 2 - 6);
   const rule = line >= LEAST_LINE_PX ? <span className="bg-ink3 h-px" style={{ width: line }} /> : null;
+  const at = shift + place.between - place.middle;
   return (
-    <td className="relative">
+    <td className="relative p-0">
       <span
-        className="absolute inset-y-0 flex -translate-x-1/2 items-center gap-2 whitespace-nowrap"
-        style={{ left: place.between }}
+        className="absolute inset-y-0 left-1/2 flex items-center gap-2 whitespace-nowrap"
+        style={{ transform: `translateX(calc(${at}px - 50%))` }}
       >
         {rule}
         {text}

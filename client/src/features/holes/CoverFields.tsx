@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { memo, useId } from 'react';
 import { COVERS, type ToneHole } from '#shared/document/design-document.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';
 import { changeHole } from '../../bench/hole-edits.ts';
@@ -6,7 +6,9 @@ import { classNames } from '../../ui/class-names.ts';
 import { COVER_WORDS, HAND_WORDS, withCover } from './inspector-fields.ts';
 
 interface CoverFieldsProps {
-  hole: ToneHole;
+  holeId: string;
+  cover: ToneHole['cover'];
+  hand: ToneHole['hand'];
   title: string;
   disabled: boolean;
   onEdit: (edit: DesignEdit) => void;
@@ -16,7 +18,8 @@ const SELECT =
   'border-line bg-sheet rounded-control text-data disabled:border-hair h-8 min-w-0 border px-2 disabled:bg-transparent max-[1279px]:h-12';
 
 /** What covers the hole, and which hand. */
-export function CoverFields({ hole, title, disabled, onEdit }: CoverFieldsProps) {
+export const CoverFields = memo(function CoverFields(props: CoverFieldsProps) {
+  const { holeId, title, disabled, onEdit } = props;
   const id = useId();
   return (
     <div className="border-hair flex items-center gap-2 border-t py-2">
@@ -26,14 +29,14 @@ export function CoverFields({ hole, title, disabled, onEdit }: CoverFieldsProps)
       <select
         id={id}
         disabled={disabled}
-        value={hole.cover}
+        value={props.cover}
         className={classNames(SELECT, 'flex-1')}
         onChange={(event) => {
           const cover = COVERS.find((each) => each === event.currentTarget.value);
           if (cover === undefined) return;
           onEdit({
             label: `Cover of ${title.toLowerCase()}`,
-            change: (before) => withCover(before, hole, cover),
+            change: (before) => withCover(before, holeId, cover),
           });
         }}
       >
@@ -46,13 +49,13 @@ export function CoverFields({ hole, title, disabled, onEdit }: CoverFieldsProps)
       <select
         aria-label="Hand"
         disabled={disabled}
-        value={hole.hand}
+        value={props.hand}
         className={classNames(SELECT, 'w-28')}
         onChange={(event) => {
           const hand = event.currentTarget.value === 'right' ? 'right' : 'left';
           onEdit({
             label: `Hand of ${title.toLowerCase()}`,
-            change: (before) => changeHole(before, hole.id, { hand }),
+            change: (before) => changeHole(before, holeId, { hand }),
           });
         }}
       >
@@ -61,4 +64,4 @@ export function CoverFields({ hole, title, disabled, onEdit }: CoverFieldsProps)
       </select>
     </div>
   );
-}
+});

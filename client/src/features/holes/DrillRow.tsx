@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { nearestDrills, type Drill } from '#shared/lengths/drills.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { drillsFor } from '../../bench/drill-choice.ts';
@@ -15,7 +16,7 @@ interface DrillRowProps {
 }
 
 /** Drills round the present size as circles that grow with them: chosen filled, suggested dashed. */
-export function DrillRow(props: DrillRowProps) {
+export const DrillRow = memo(function DrillRow(props: DrillRowProps) {
   const { diameterMm, suggestedMm, unit, disabled, count, onChoose } = props;
   const drills = drillsRound(props, count);
   const widest = Math.max(...drills.map((drill) => drill.diameterMm));
@@ -48,7 +49,7 @@ export function DrillRow(props: DrillRowProps) {
       })}
     </div>
   );
-}
+});
 
 function DrillCircle({ radius, isOn }: { radius: number; isOn: boolean }) {
   return (

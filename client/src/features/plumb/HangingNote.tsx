@@ -23,7 +23,9 @@ interface HangingNoteProps {
   heldAtCents: number;
   labelBelow: number;
   twoLines: boolean;
-  onChoose: () => void;
+  column: string;
+  fingering: string;
+  onChoose: (column: string, fingering: string) => void;
 }
 
 /** How far above a cross fingering's bob its short thread begins. */
@@ -32,10 +34,11 @@ const CROSS_THREAD = 20;
 /** One bob on its thread, with the note and its cents below. Drawn from the column's pivot. */
 export const HangingNote = memo(function HangingNote(props: HangingNoteProps) {
   const { note, register, cents, isCross, isOld, y } = props;
+  const choose = () => props.onChoose(props.column, props.fingering);
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.key !== 'Enter' && event.key !== ' ') return;
     event.preventDefault();
-    props.onChoose();
+    choose();
   };
   return (
     <g
@@ -43,7 +46,7 @@ export const HangingNote = memo(function HangingNote(props: HangingNoteProps) {
       tabIndex={0}
       aria-label={props.name}
       aria-pressed={props.isChosen}
-      onClick={props.onChoose}
+      onClick={choose}
       onKeyDown={onKeyDown}
       className="cursor-pointer"
     >

@@ -5,11 +5,13 @@ import { hungNotes, type HungNote } from '../../bench/hung-notes.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { spokenHungNote } from '../../bench/spoken-pitch.ts';
+import { useRestingValue } from '../../bench/use-resting-value.ts';
+import { useStable } from '../../bench/use-stable.ts';
 import { FingeringRow } from './FingeringRow.tsx';
 import { HangingNote } from './HangingNote.tsx';
-import { NoticeMark } from './NoticeMark.tsx';
+import { NoticeMarks } from './NoticeMarks.tsx';
 import { crossRowY, plumbRows, type PlumbRows } from './plumb-rows.ts';
-import { bandOf, bobPlace } from './plumb-scale.ts';
+import { bandOf } from './plumb-scale.ts';
 import { PlumbBackdrop, RowLabels, ScaleKey } from './PlumbBackdrop.tsx';
 import { PlumbTable } from './PlumbTable.tsx';
 
@@ -22,14 +24,14 @@ interface PlumbChartProps extends PanelProps {
 }
 
 /** A note and where it hangs in the chart, px from the column's pivot. */
-interface PlacedNote extends HungNote {
+export interface PlacedNote extends HungNote {
   x: number;
   y: number;
 }
 
 /** Every note hung as a bob under its hole: straight down is in tune, left is flat, right is sharp. */
 export function PlumbChart(props: PlumbChartProps) {
-  const { document, prediction, geometry, selection, bandCents, isDragging, isOld } = props;
+  const { document, prediction, geometry, selection, bandCents, isDragging } = props;
   const { measures } = geometry;
   const holes = useMemo(() => labelledHoles(document), [document]);
   const notes = useMemo(() => hungNotes(document, prediction), [document, prediction]);
@@ -37,6 +39,7 @@ export function PlumbChart(props: PlumbChartProps) {
     () => plumbRows(notes, selection.register, measures),
     [notes, selection.register, measures],
   );
+  const choose = useStable((hole: string, fingering: string) => props.onSelect({ hole, fingering }));
   const placed = placeNotes(notes, rows, geometry);
   const chosen = document.fingerings.find((fingering) => fingering.id === selection.fingering) ?? null;
   const shown = props.showsFingering === false ? null : chosen;
@@ -49,7 +52,7 @@ export function PlumbChart(props: PlumbChartProps) {
           <PlumbBackdrop geometry={geometry} rows={rows} bandCents={bandCents} />
           <ScaleKey geometry={geometry} bandCents={bandCents} />
           {placed.map((note) => (
-            <PlacedBob key={note.fingering.id} note={note} chart={props} isOld={isOld} />
+            <PlacedBob key={note.fingering.id} note={note} chart={props} onChoose={choose} />
           ))}
           {geometry.columns.map(({ key, x }) => (
             <circle key={key} cx={x} r={2.6} className="bench-pivot" />
@@ -69,10 +72,8 @@ export function PlumbChart(props: PlumbChartProps) {
           fingering
         </p>
       )}
-      {placed.map((note) => (
-        <NoteNotices key={note.fingering.id} note={note} top={measures.beamY} measures={measures} />
-      ))}
-      <PlumbTable notes={notes} holes={holes} />
+      <NoticeMarks notes={placed} top={measures.beamY} measures={measures} />
+      <PlumbTable notes={useRestingValue(notes, isDragging)} holes={useRestingValue(holes, isDragging)} />
     </section>
   );
 }
@@ -98,14 +99,14 @@ function placeNotes(
 interface PlacedBobProps {
   note: PlacedNote;
   chart: PlumbChartProps;
-  isOld: boolean;
+  onChoose: (column: string, fingering: string) => void;
 }
 
 /** Labels stand in one line where columns leave room for a note and a figure side by side, px. */
 const ONE_LINE_PX = 64;
 
-function PlacedBob({ note, chart, isOld }: PlacedBobProps) {
-  const { geometry, selection, bandCents, onSelect } = chart;
+function PlacedBob({ note, chart, onChoose }: PlacedBobProps) {
+  const { geometry, selection, bandCents, isOld } = chart;
   const { fingering, predicted, column } = note;
   const cents = predicted?.centsFromScale ?? null;
   const { pxPerCent, heldAtCents, labelBelow } = geometry.measures;
@@ -126,7 +127,9 @@ function PlacedBob({ note, chart, isOld }: PlacedBobProps) {
         heldAtCents={heldAtCents}
         labelBelow={labelBelow}
         twoLines={geometry.layout === 'phone' || geometry.columnSpacing < ONE_LINE_PX}
-        onChoose={() => onSelect({ hole: column, fingering: fingering.id })}
+        column={column}
+        fingering={fingering.id}
+        onChoose={onChoose}
       />
     </g>
   );
@@ -146,26 +149,4 @@ function CrossPictures({ placed, holes, spacing }: CrossPicturesProps) {
         <FingeringDots fingering={fingering} holes={holes} width={Math.min(72, spacing - 8)} />
       </g>
     ));
-}
-
-interface NoteNoticesProps {
-  note: PlacedNote;
-  top: number;
-  measures: PanelProps['geometry']['measures'];
-}
-
-function NoteNotices({ note, top, measures }: NoteNoticesProps) {
-  const { predicted } = note;
-  if (predicted === null || predicted.notices.length === 0) return null;
-  // On the side that the bob does not hang to.
-  const side = bobPlace(predicted.centsFromScale ?? 0, measures).dx > 0 ? -1 : 1;
-  return (
-    <NoticeMark
-      about={spokenHungNote(note)}
-      notices={predicted.notices}
-      accuracyCents={predicted.accuracyCents}
-      x={note.x + side * 20}
-      y={top + note.y}
-    />
-  );
 }

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { formatCents } from '#shared/music/cents.ts';
 import { spokenNote } from '#shared/music/note-name.ts';
 import type { LabelledHole } from '../../bench/hole-labels.ts';
@@ -9,7 +10,7 @@ interface PlumbTableProps {
 }
 
 /** The figures of the plumb lines as a table, for those who hear the page. */
-export function PlumbTable({ notes, holes }: PlumbTableProps) {
+export const PlumbTable = memo(function PlumbTable({ notes, holes }: PlumbTableProps) {
   const under = (column: string) => holes.find(({ hole }) => hole.id === column)?.title ?? 'foot';
   return (
     <table className="sr-only">
@@ -38,7 +39,7 @@ export function PlumbTable({ notes, holes }: PlumbTableProps) {
       </tbody>
     </table>
   );
-}
+});
 
 function figure(value: number | null | undefined, print: (value: number) => string): string {
   return value === null || value === undefined ? 'no steady note' : print(value);

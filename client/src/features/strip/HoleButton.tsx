@@ -1,23 +1,25 @@
-import type { PointerEvent } from 'react';
+import { memo, type PointerEvent } from 'react';
+import type { ToneHole } from '#shared/document/design-document.ts';
 import { planHole } from '../../bench/body-paths.ts';
 import type { BenchFrame } from '../../bench/bench-geometry.ts';
 import type { BodyShape } from '../../bench/drawn-body.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+
+export interface HoleHandlers {
+  onPointerDown: (event: PointerEvent<HTMLElement>) => void;
+  onPointerMove: (event: PointerEvent<HTMLElement>) => void;
+  onPointerUp: () => void;
+  onPointerCancel: () => void;
+}
 
 interface HoleButtonProps {
   frame: BenchFrame;
   shape: BodyShape;
-  labelled: LabelledHole;
+  hole: ToneHole;
   name: string;
   isChosen: boolean;
   canEdit: boolean;
-  drag: {
-    onPointerDown: (event: PointerEvent<HTMLElement>, labelled: LabelledHole) => void;
-    onPointerMove: (event: PointerEvent<HTMLElement>) => void;
-    onPointerUp: () => void;
-    onPointerCancel: () => void;
-  };
-  onChoose: () => void;
+  handlers: HoleHandlers;
+  onChoose: (hole: string) => void;
 }
 
 /** Least side of a hole's button, px: a fingertip's worth. */
@@ -26,17 +28,8 @@ const LEAST_PX = 44;
 const EDGE_PX = 9;
 
 /** The control behind a drawn hole: choose, drag, and by its keys move and widen. */
-export function HoleButton({
-  frame,
-  shape,
-  labelled,
-  name,
-  isChosen,
-  canEdit,
-  drag,
-  onChoose,
-}: HoleButtonProps) {
-  const { hole } = labelled;
+export const HoleButton = memo(function HoleButton(props: HoleButtonProps) {
+  const { frame, shape, hole, name, isChosen, canEdit, handlers, onChoose } = props;
   const { cx, cy, rx } = planHole(shape, hole, {
     x: frame.x,
     across: frame.acrossPxPerMm,
@@ -48,12 +41,8 @@ export function HoleButton({
       type="button"
       aria-label={name}
       aria-pressed={isChosen}
-      data-hole={hole.id}
-      onClick={onChoose}
-      onPointerDown={(event) => drag.onPointerDown(event, labelled)}
-      onPointerMove={drag.onPointerMove}
-      onPointerUp={drag.onPointerUp}
-      onPointerCancel={drag.onPointerCancel}
+      onClick={() => onChoose(hole.id)}
+      {...handlers}
       className="rounded-disc absolute top-0 left-0 touch-none select-none"
       style={{
         width: side,
@@ -63,4 +52,4 @@ export function HoleButton({
       }}
     />
   );
-}
+});

@@ -23,6 +23,7 @@ interface InstrumentStripProps extends PanelProps {
     isPlacing: boolean;
     moveSpot: (positionMm: number | null) => void;
   };
+  isDragging: boolean;
   onDragging: (isDragging: boolean) => void;
 }
 

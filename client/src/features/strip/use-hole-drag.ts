@@ -1,11 +1,14 @@
-import { useRef, type PointerEvent } from 'react';
+import { useMemo, useRef, type PointerEvent } from 'react';
 import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
+import { woodBetweenMm } from '#shared/document/document-faults.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import type { BenchFrame } from '../../bench/bench-geometry.ts';
 import { snapToDrill } from '../../bench/drill-choice.ts';
 import { changeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
 import type { LabelledHole } from '../../bench/hole-labels.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';
+import { useStable } from '../../bench/use-stable.ts';
+import type { HoleHandlers } from './HoleButton.tsx';
 
 interface HoleDragOptions {
   document: DesignDocument;
@@ -37,13 +40,14 @@ const CLICK_PX = 3;
 let dragCount = 0;
 
 /** Drags a hole along the instrument, or by its edge for its diameter. One drag is one undo step. */
-export function useHoleDrag(options: HoleDragOptions) {
+export function useHoleDrag(options: HoleDragOptions): HoleHandlers {
   const drag = useRef<Drag | null>(null);
 
-  const onPointerDown = (event: PointerEvent<HTMLElement>, labelled: LabelledHole) => {
-    if (event.button !== 0) return;
+  const onPointerDown = useStable((event: PointerEvent<HTMLElement>) => {
     const at = placeInStrip(event);
-    const { hole, title } = nearestHole(options, at.x) ?? labelled;
+    const nearest = nearestHole(options, at.x);
+    if (event.button !== 0 || nearest === undefined) return;
+    const { hole, title } = nearest;
     options.onChoose(hole.id);
     if (!options.canEdit) return;
     event.currentTarget.setPointerCapture(event.pointerId);
@@ -61,9 +65,9 @@ export function useHoleDrag(options: HoleDragOptions) {
       mergeKey: `drag-${dragCount}`,
       isMoving: false,
     };
-  };
+  });
 
-  const onPointerMove = (event: PointerEvent<HTMLElement>) => {
+  const onPointerMove = useStable((event: PointerEvent<HTMLElement>) => {
     const current = drag.current;
     if (current === null) return;
     const at = placeInStrip(event);
@@ -74,14 +78,17 @@ export function useHoleDrag(options: HoleDragOptions) {
     }
     const edit = current.mode === 'move' ? moved(current, at.x, options) : resized(current, at, options);
     if (edit !== null) options.onEdit(edit);
-  };
+  });
 
-  const onPointerEnd = () => {
+  const onPointerUp = useStable(() => {
     if (drag.current?.isMoving === true) options.onDragging(false);
     drag.current = null;
-  };
+  });
 
-  return { onPointerDown, onPointerMove, onPointerUp: onPointerEnd, onPointerCancel: onPointerEnd };
+  return useMemo(
+    () => ({ onPointerDown, onPointerMove, onPointerUp, onPointerCancel: onPointerUp }),
+    [onPointerDown, onPointerMove, onPointerUp],
+  );
 }
 
 interface StripPoint {
@@ -109,10 +116,16 @@ function grabsEdge(reach: number, hole: ToneHole, frame: BenchFrame, pointerType
   return pointerType === 'touch' ? reach > Math.max(20, radius + 6) : reach > Math.max(6, radius * 0.75);
 }
 
+/** A drag stops where two holes would run into each other, and goes on beyond. */
+function runsIntoAnother(document: DesignDocument, hole: ToneHole): boolean {
+  return document.holes.some((other) => other.id !== hole.id && woodBetweenMm(document, hole, other) <= 0);
+}
+
 function moved(drag: Drag, x: number, { document, frame }: HoleDragOptions): DesignEdit | null {
   const positionMm = snapPosition(document, frame.mm(x - drag.offsetX));
   const present = document.holes.find((hole) => hole.id === drag.hole.id);
   if (present === undefined || present.positionMm === positionMm) return null;
+  if (runsIntoAnother(document, { ...present, positionMm })) return null;
   return {
     label: `Move ${drag.title.toLowerCase()}`,
     change: (before) => changeHole(before, drag.hole.id, { positionMm }),
@@ -127,6 +140,7 @@ function resized(drag: Drag, at: StripPoint, { document, frame, unit }: HoleDrag
   const wanted = drag.hole.diameterMm + (2 * (reach - drag.startReach)) / frame.pxPerMm;
   const diameterMm = snapToDrill(Math.max(0.5, wanted), unit, widestHoleMm(document, present.positionMm));
   if (present.diameterMm === diameterMm) return null;
+  if (diameterMm > present.diameterMm && runsIntoAnother(document, { ...present, diameterMm })) return null;
   return {
     label: `Drill size of ${drag.title.toLowerCase()}`,
     change: (before) => changeHole(before, drag.hole.id, { diameterMm }),

@@ -5,7 +5,7 @@ import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { Segment } from '../../ui/Segment.tsx';
 
 interface ConditionsProps {
-  document: DesignDocument;
+  document: Pick<DesignDocument, 'air' | 'pitch'>;
   bandCents: readonly number[];
   unit: LengthUnit;
   saveNote: ReactNode;

@@ -1,13 +1,29 @@
+import { memo } from 'react';
 import type { DesignPrediction } from '#shared/analysis/prediction.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
+import { useRestingValue } from '../../bench/use-resting-value.ts';
+
+interface NoticeListProps {
+  prediction: DesignPrediction | null;
+  isDragging: boolean;
+}
 
 interface Grouped {
   message: string;
   notes: string[];
 }
 
-/** What has to be known about the figures, each sentence once with the notes it is about. */
-export function NoticeList({ prediction }: { prediction: DesignPrediction | null }) {
+/**
+ * What has to be known about the figures, each sentence once with the notes it is about.
+ *
+ * It rests while a hole is dragged: the marks beside the bobs follow, the sentences come when the hand is still.
+ */
+export function NoticeList({ isDragging, ...props }: NoticeListProps) {
+  const prediction = useRestingValue(props.prediction, isDragging);
+  return <Sentences prediction={prediction} />;
+}
+
+const Sentences = memo(function Sentences({ prediction }: Pick<NoticeListProps, 'prediction'>) {
   const groups = prediction === null ? [] : grouped(prediction);
   if (groups.length === 0) return null;
   return (
@@ -29,7 +45,7 @@ export function NoticeList({ prediction }: { prediction: DesignPrediction | null
       </ul>
     </section>
   );
-}
+});
 
 function grouped(prediction: DesignPrediction): Grouped[] {
   const groups = new Map<string, string[]>();

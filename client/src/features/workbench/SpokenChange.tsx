@@ -6,10 +6,13 @@ import { leadingNote } from '../../bench/hole-sensitivity.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { spokenHungNote } from '../../bench/spoken-pitch.ts';
+import { useRestingValue } from '../../bench/use-resting-value.ts';
 import { useSpokenChange } from './use-spoken-change.ts';
 
 /** Says politely what became of the chosen hole: "Hole 4, 78.2 from foot, 7.0 mm. G 5 0.1 cents flat." */
-export function SpokenChange({ document, prediction, selection, unit }: PanelProps) {
+export function SpokenChange({ selection, unit, ...props }: PanelProps & { isDragging: boolean }) {
+  const document = useRestingValue(props.document, props.isDragging);
+  const prediction = useRestingValue(props.prediction, props.isDragging);
   const sentence = useMemo(() => {
     const chosen = labelledHoles(document).find(({ hole }) => hole.id === selection.hole);
     if (chosen === undefined) return '';
