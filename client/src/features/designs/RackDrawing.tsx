@@ -123,28 +123,45 @@ interface SmallPlumbLinesProps {
 
 /** Register 1 only: in a rack it is the shape of the row that counts, the figures stand at the right. */
 function SmallPlumbLines({ outline, plumb, x, fromY }: SmallPlumbLinesProps) {
+  const columns = hungColumns(outline, plumb, x);
+  return columns.map(({ key, holeX, columnX, cents }) => (
+    <g key={key}>
+      <path d={`M${holeX} ${fromY + 1}L${columnX} ${fromY + 6}`} className="bench-leader" opacity="0.6" />
+      <line x1={columnX} y1={fromY + 6} x2={columnX} y2={fromY + 28} className="bench-true" />
+      {cents.map((each, index) => {
+        const bob = columnX + Math.max(-HELD_PX, Math.min(HELD_PX, each * PX_PER_CENT));
+        return (
+          <g key={index}>
+            <line
+              x1={columnX}
+              y1={fromY + 6}
+              x2={bob}
+              y2={fromY + 24}
+              className="bench-thread is-register1"
+            />
+            <circle cx={bob} cy={fromY + 24} r="3.8" className="bench-bob1" />
+          </g>
+        );
+      })}
+    </g>
+  ));
+}
+
+/** One column a hole: whatever vents there hangs from it, cross-fingerings too. */
+function hungColumns(outline: Outline, plumb: Plumb, x: (mm: number) => number) {
   const places = new Map(outline.holes.map((hole) => [hole.id, hole.positionMm]));
-  const hung = plumb
-    .map(({ ventHole, cents }, index) => ({
-      key: index,
-      holeX: x(ventHole === null ? outline.footMm : (places.get(ventHole) ?? outline.footMm)),
-      cents,
-    }))
+  const byHole = new Map<string, number[]>();
+  for (const { ventHole, cents } of plumb) {
+    const key = ventHole ?? 'foot';
+    byHole.set(key, [...(byHole.get(key) ?? []), cents]);
+  }
+  const hung = [...byHole]
+    .map(([key, cents]) => ({ key, holeX: x(places.get(key) ?? outline.footMm), cents }))
     .sort((a, b) => a.holeX - b.holeX);
-  const columns = spreadColumns(
+  const bounds = { spacing: BOB_SPACING, left: 6, right: x(outline.footMm) };
+  const spread = spreadColumns(
     hung.map(({ holeX }) => holeX),
-    { spacing: BOB_SPACING, left: 6, right: x(outline.footMm) },
+    bounds,
   );
-  return hung.map(({ key, holeX, cents }, index) => {
-    const column = columns[index] ?? holeX;
-    const bob = column + Math.max(-HELD_PX, Math.min(HELD_PX, cents * PX_PER_CENT));
-    return (
-      <g key={key}>
-        <path d={`M${holeX} ${fromY + 1}L${column} ${fromY + 6}`} className="bench-leader" opacity="0.6" />
-        <line x1={column} y1={fromY + 6} x2={column} y2={fromY + 28} className="bench-true" />
-        <line x1={column} y1={fromY + 6} x2={bob} y2={fromY + 24} className="bench-thread is-register1" />
-        <circle cx={bob} cy={fromY + 24} r="3.8" className="bench-bob1" />
-      </g>
-    );
-  });
+  return hung.map((column, index) => ({ ...column, columnX: spread[index] ?? column.holeX }));
 }
