@@ -1,6 +1,8 @@
 import { useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
+import type { Role } from '#shared/contract/session.ts';
 import { permissionRefusal } from '#shared/rules/permissions.ts';
 import { MemberTable } from '../features/workshop/MemberTable.tsx';
+import { RoleTable } from '../features/workshop/RoleTable.tsx';
 import { membersQuery } from '../features/workshop/workshop.queries.ts';
 import { printWhen } from '../lib/print-when.ts';
 import { useSession } from '../lib/session.ts';
@@ -17,23 +19,30 @@ export const workshopMembersLoader = (queryClient: QueryClient) =>
   );
 
 export function WorkshopMembersPage() {
-  const refusal = permissionRefusal(useSession(), 'see-members');
-  if (refusal === null) return <Members />;
+  const { role } = useSession();
+  const refusal = permissionRefusal({ role }, 'see-members');
+  if (refusal === null) return <Members ownRole={role} />;
   return (
     <WorkshopFrame title="Members and roles">
-      <Refusal>{refusal}</Refusal>
+      <div className="grid gap-8">
+        <Refusal>{refusal}</Refusal>
+        <RoleTable ownRole={role} />
+      </div>
     </WorkshopFrame>
   );
 }
 
-function Members() {
+function Members({ ownRole }: { ownRole: Role }) {
   const { items } = useSuspenseQuery(membersQuery).data;
   return (
     <WorkshopFrame
       title="Members and roles"
       beside={items.length === 1 ? '1 person' : `${items.length} people`}
     >
-      <MemberTable members={items} printWhen={printWhen} />
+      <div className="grid gap-10">
+        <MemberTable members={items} printWhen={printWhen} />
+        <RoleTable ownRole={ownRole} />
+      </div>
     </WorkshopFrame>
   );
 }

@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import type { membersSchema } from '#shared/contract/session.ts';
 import { PersonMark } from '../../ui/PersonMark.tsx';
+import { ROLE_WORDS } from './role-words.ts';
 
 type Members = z.infer<typeof membersSchema>['items'];
 
@@ -9,14 +10,6 @@ interface MemberTableProps {
   /** "today 11:32" */
   printWhen: (at: string) => string;
 }
-
-const ROLE_WORDS: Record<Members[number]['role'], string> = {
-  owner: 'Owner',
-  mentor: 'Mentor',
-  maker: 'Maker',
-  apprentice: 'Apprentice',
-  visitor: 'Visitor',
-};
 
 export function MemberTable({ members, printWhen }: MemberTableProps) {
   return (
