@@ -29,8 +29,8 @@ export function useSession(): Session {
   return data;
 }
 
-/** After signing in or out: nothing that the last person saw may be left behind. */
-export function startSession(queryClient: QueryClient, session: Session | null): void {
+/** After signing in: nothing that the last person saw may be left behind. */
+export function startSession(queryClient: QueryClient, session: Session): void {
   queryClient.clear();
   queryClient.setQueryData(sessionQuery.queryKey, session);
 }

@@ -6,6 +6,7 @@ import { useSession } from '../lib/session.ts';
 import { paths } from '../paths.ts';
 import { KeyboardHelp } from '../ui/KeyboardHelp.tsx';
 import { PersonMenu } from '../ui/PersonMenu.tsx';
+import { Problem } from '../ui/Problem.tsx';
 import { TopBar } from '../ui/TopBar.tsx';
 import { TopBarProvider } from '../ui/TopBarFill.tsx';
 
@@ -45,6 +46,7 @@ export function AppFrame() {
           />
         }
       />
+      <Problem error={signOut.error} />
       <main id="page" ref={main} tabIndex={-1} aria-busy={isWaiting} className="outline-none">
         <Outlet />
       </main>

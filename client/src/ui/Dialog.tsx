@@ -9,6 +9,8 @@ interface DialogProps {
   onOpenChange: (open: boolean) => void;
   /** False for what has to be answered before work goes on. */
   dismissible?: boolean;
+  /** A cross at the corner, for what has no verbs of its own. */
+  hasClose?: boolean;
   width?: 'narrow' | 'wide';
   children: ReactNode;
 }
@@ -20,6 +22,7 @@ export function Dialog({
   open,
   onOpenChange,
   dismissible = true,
+  hasClose = false,
   width = 'narrow',
   children,
 }: DialogProps) {
@@ -42,6 +45,23 @@ export function Dialog({
             <Radix.Description className="text-ink2 mt-1">{description}</Radix.Description>
           )}
           <div className="mt-4">{children}</div>
+          {hasClose && (
+            <Radix.Close
+              aria-label="Close"
+              className="rounded-control text-ink2 hover:text-ink absolute top-3.5 right-3.5 flex size-11 items-center justify-center"
+            >
+              <svg
+                width="14"
+                height="14"
+                viewBox="0 0 14 14"
+                aria-hidden="true"
+                stroke="currentColor"
+                strokeWidth="1.8"
+              >
+                <path d="M1 1l12 12M13 1L1 13" />
+              </svg>
+            </Radix.Close>
+          )}
         </Radix.Content>
       </Radix.Portal>
     </Radix.Root>

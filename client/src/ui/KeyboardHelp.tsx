@@ -22,7 +22,7 @@ const GROUPS: readonly { title: string; keys: readonly (readonly [string, string
   {
     title: 'In a field with a figure',
     keys: [
-      ['↑ ↓', 'one step; with Shift ten'],
+      ['↑, ↓', 'one step; with Shift ten'],
       ['Enter', 'keep it'],
       ['Esc', 'put it back'],
     ],
@@ -30,15 +30,18 @@ const GROUPS: readonly { title: string; keys: readonly (readonly [string, string
   {
     title: 'At the workbench',
     keys: [
-      ['1 … 9', 'choose a hole; two figures within 0.6 s for 10 and up'],
-      ['0   W   H', 'foot, mouth end, thumb hole'],
-      ['← →', 'next hole toward the window, toward the foot'],
-      ['Alt ← →', 'move the hole one step; with Shift five'],
-      ['Alt ↑ ↓', 'next wider, next narrower drill; with Shift 0.1 mm'],
-      ['N   Shift N', 'next, previous note'],
+      ['1 to 9', 'choose a hole; two figures within 0.6 s for 10 and up'],
+      ['0, W, H', 'foot, mouth end, thumb hole'],
+      ['←, →', 'next hole toward the window, toward the foot'],
+      ['Alt ←, Alt →', 'move the hole one step; with Shift five'],
+      ['Alt ↑, Alt ↓', 'next wider, next narrower drill; with Shift 0.1 mm'],
+      ['N, Shift N', 'next, previous note'],
       ['R', 'show register 1, 2, 3, all'],
-      ['[   ]', 'panel to the left, to the right'],
-      ['Ctrl Z   Ctrl Shift Z', 'undo, redo'],
+      ['T', 'try the suggestion; Enter keeps it, Esc puts it back'],
+      ['+, −', 'nearer, farther'],
+      ['Delete', 'take the hole away'],
+      ['[, ]', 'panel to the left, to the right'],
+      ['Ctrl Z, Ctrl Shift Z', 'undo, redo'],
       ['F6', 'move between strip, left zone, columns, table'],
     ],
   },
@@ -64,6 +67,7 @@ export function KeyboardHelp() {
     <Dialog
       title="Keys"
       width="wide"
+      hasClose
       description={
         singleKeys === 'on'
           ? 'Single keys rest while a field is being typed in. They can be turned off in Account. On a Mac, Alt is Option and Ctrl is Command.'

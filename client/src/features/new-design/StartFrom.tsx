@@ -86,7 +86,7 @@ function BoreQuestion({ answers, onChange, unit }: Pick<StartFromProps, 'answers
         <Button
           look="bare"
           size="small"
-          className="mt-1 px-0"
+          className="mt-1 -ml-3"
           onClick={() => onChange({ ...answers, boreMm: null })}
         >
           Take the usual one
