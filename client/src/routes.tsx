@@ -1,7 +1,6 @@
 import type { QueryClient } from '@tanstack/react-query';
 import { createBrowserRouter, Outlet, redirect, type RouteObject } from 'react-router';
 import { signedInLoader } from './lib/signed-in-loader.ts';
-import { AppFrame } from './pages/AppFrame.tsx';
 import { NotFoundPage } from './pages/NotFoundPage.tsx';
 import { PlainFrame } from './pages/PlainFrame.tsx';
 import { RouteError } from './pages/RouteError.tsx';
@@ -22,8 +21,9 @@ export function createRouter(queryClient: QueryClient) {
         { path: paths.home(), loader: () => redirect(paths.today()) },
         ...openRoutes(),
         {
-          element: <AppFrame />,
           loader: signedInLoader(queryClient),
+          // Apart, so that the sign-in need not fetch what stands round the pages behind it.
+          lazy: async () => ({ Component: (await import('./pages/AppFrame.tsx')).AppFrame }),
           shouldRevalidate: () => false,
           children: [
             { element: <Outlet />, errorElement: <RouteError />, children: signedInRoutes(queryClient) },

@@ -1,7 +1,7 @@
-import { useForm } from 'react-hook-form';
+import { useState, type SyntheticEvent } from 'react';
 import { renameDesignRequest } from '#shared/contract/designs.ts';
+import { plainWords } from '#shared/document/plain-words.ts';
 import { problemFields } from '../../lib/api-problem.ts';
-import { zodResolver } from '../../lib/zod-resolver.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Dialog, DialogActions } from '../../ui/Dialog.tsx';
 import { Field } from '../../ui/Field.tsx';
@@ -37,19 +37,24 @@ type NameFormProps = Pick<NameDialogProps, 'verb' | 'name' | 'mutation' | 'onNam
 };
 
 function NameForm({ verb, name, mutation, onName, onCancel }: NameFormProps) {
-  const { register, handleSubmit, formState } = useForm<{ name: string }>({
-    resolver: zodResolver(renameDesignRequest),
-    defaultValues: { name },
-  });
+  const [typed, setTyped] = useState(name);
+  const [complaint, setComplaint] = useState<string | undefined>();
   const refused = problemFields(mutation.error).name;
+  const handleSubmit = (event: SyntheticEvent) => {
+    event.preventDefault();
+    const reading = renameDesignRequest.safeParse({ name: typed }, { error: plainWords });
+    setComplaint(reading.error?.issues[0]?.message);
+    if (reading.success) onName(reading.data.name);
+  };
   return (
-    <form noValidate onSubmit={(event) => void handleSubmit((values) => onName(values.name.trim()))(event)}>
+    <form noValidate onSubmit={handleSubmit}>
       <Field
         label="Name"
         autoComplete="off"
-        {...register('name')}
+        value={typed}
+        onChange={(event) => setTyped(event.currentTarget.value)}
         onFocus={(event) => event.currentTarget.select()}
-        error={formState.errors.name?.message ?? refused}
+        error={complaint ?? refused}
       />
       <div className="mt-3">
         <Problem error={refused === undefined ? mutation.error : null} />

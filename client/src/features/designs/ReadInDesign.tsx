@@ -4,7 +4,7 @@ import { problemSentence } from '../../lib/api-problem.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Dialog, DialogActions } from '../../ui/Dialog.tsx';
 import { useCreateDesign } from './designs.queries.ts';
-import { readDesignFile, type FileComplaint } from './read-design-file.ts';
+import type { FileComplaint } from './read-design-file.ts';
 
 interface ReadInDesignProps {
   onCreated: (design: DesignSummary) => void;
@@ -21,6 +21,8 @@ export function ReadInDesign({ onCreated }: ReadInDesignProps) {
     // The same file may be chosen again once it is mended.
     event.currentTarget.value = '';
     if (file === undefined) return;
+    // Fetched now, because few visits to the rack read anything in.
+    const { readDesignFile } = await import('./read-design-file.ts');
     const reading = await readDesignFile(file);
     if (reading.status === 'refused') {
       setRefused({ fileName: file.name, complaints: reading.complaints });

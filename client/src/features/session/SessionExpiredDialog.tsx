@@ -1,5 +1,4 @@
-import { useEffect, useState } from 'react';
-import { useForm } from 'react-hook-form';
+import { useEffect, useState, type SyntheticEvent } from 'react';
 import { onSessionExpired } from '../../lib/api-client.ts';
 import { useSession } from '../../lib/session.ts';
 import { Button } from '../../ui/Button.tsx';
@@ -40,21 +39,26 @@ export function SessionExpiredDialog({ onGiveUp }: SessionExpiredDialogProps) {
   );
 }
 
+/** One field: a form library would only make the first load of every page longer. */
 function PasswordForm({ email, onAnswer }: { email: string; onAnswer: Answer }) {
-  const { register, handleSubmit, formState } = useForm({ defaultValues: { password: '' } });
+  const [password, setPassword] = useState('');
+  const [isMissing, setMissing] = useState(false);
   const signIn = useSignInAgain();
-  const handleSignIn = handleSubmit(({ password }) =>
-    signIn.mutate({ email, password }, { onSuccess: () => onAnswer('signed-in') }),
-  );
+  const handleSubmit = (event: SyntheticEvent) => {
+    event.preventDefault();
+    setMissing(password === '');
+    if (password !== '') signIn.mutate({ email, password }, { onSuccess: () => onAnswer('signed-in') });
+  };
   return (
-    <form noValidate onSubmit={(event) => void handleSignIn(event)} className="grid gap-4">
-      <input type="hidden" autoComplete="username" value={email} readOnly />
+    <form noValidate onSubmit={handleSubmit} className="grid gap-4">
+      <input type="text" autoComplete="username" value={email} readOnly hidden />
       <Field
         label="Password"
         type="password"
         autoComplete="current-password"
-        {...register('password', { required: 'Type the password.' })}
-        error={formState.errors.password?.message}
+        value={password}
+        onChange={(event) => setPassword(event.currentTarget.value)}
+        error={isMissing && password === '' ? 'Type the password.' : undefined}
       />
       <Problem error={signIn.error} />
       <DialogActions>
