@@ -63,8 +63,8 @@ function WindowPlan({ window, outsideMm, place }: WindowPlanProps) {
 /** Staple and blades; the seat is at the bore's own beginning. */
 function ReedPlan({ headMm, boreMm, place }: { headMm: number; boreMm: number; place: Place }) {
   const y = place.axisY;
-  const staple = Math.max(1.5, (boreMm * place.across) / 2);
-  const blade = staple * 1.5;
+  const staple = Math.max(1.5, boreMm * place.across * 0.28);
+  const blade = staple * 1.4;
   const seat = place.x(0);
   const tip = place.x(headMm);
   const waist = tip + (seat - tip) * 0.55;

@@ -40,7 +40,7 @@ export interface BenchMeasures {
 const desk: BenchMeasures = {
   marginLeft: 37,
   marginRight: 56,
-  tubePx: 86,
+  tubePx: 80,
   mostPxPerMm: 6,
   stripHeight: 218,
   hasSection: true,
@@ -70,7 +70,7 @@ const tablet: BenchMeasures = {
   ...desk,
   marginLeft: 24,
   marginRight: 24,
-  tubePx: 62,
+  tubePx: 58,
   stripHeight: 182,
   planY: 56,
   sectionY: 121,
@@ -103,6 +103,8 @@ const standing: BenchMeasures = {
   columnsFrom: 160,
   columnsFromWithoutLadder: 160,
   columnReach: 28,
+  rowY: [62, 142, 222],
+  rowStep: 80,
   leftZone: { x: 24, width: 0 },
 };
 

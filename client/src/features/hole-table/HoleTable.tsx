@@ -5,9 +5,14 @@ import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import { Button } from '../../ui/Button.tsx';
+import { classNames } from '../../ui/class-names.ts';
 import { tablePlaces, type CellPlace } from './cell-offsets.ts';
 import { FigureCell } from './FigureCell.tsx';
 import { tableRows, type TableRow } from './table-rows.ts';
+
+/** With less room than this at the left, labels stand over their figures, px. */
+const LEAST_LABEL_PX = 70;
+const STACKED_LABEL_PX = 16;
 
 type HoleTableProps = Omit<PanelProps, 'prediction' | 'bandCents'>;
 
@@ -27,6 +32,7 @@ export const HoleTable = memo(function HoleTable(props: HoleTableProps) {
   const source = { document, sensitivities, unit, selection, holes, notes };
   const rows = tableRows({ ...source, printLength: (mm) => printLength(mm, unit) });
   const shown = showsAll ? rows : rows.filter((row) => row.isMain);
+  const isStacked = places.labelWidth < LEAST_LABEL_PX;
   const cellWidth = (geometry.widthPx - places.labelWidth) / Math.max(1, places.cells.length);
   const choose = useStable((hole: string) => onSelect({ hole }));
   const commit = useStable((rowKey: string, holeId: string, value: number) => {
@@ -61,13 +67,17 @@ export const HoleTable = memo(function HoleTable(props: HoleTableProps) {
         </thead>
         <tbody>
           {shown.map((row, rowIndex) => (
-            <tr key={row.key} style={{ height: geometry.measures.rowHeight }}>
+            <tr
+              key={row.key}
+              style={{ height: geometry.measures.rowHeight + (isStacked ? STACKED_LABEL_PX : 0) }}
+            >
               <RowLabel
                 row={row}
                 left={places.left}
                 labelWidth={places.labelWidth}
                 right={places.right}
                 isFirst={rowIndex === 0}
+                isStacked={isStacked}
               />
               {places.cells.map((place, index) => (
                 <TableCell
@@ -80,6 +90,7 @@ export const HoleTable = memo(function HoleTable(props: HoleTableProps) {
                   unit={unit}
                   isChosen={place.key === selection.hole}
                   canEdit={readOnly === null}
+                  top={isStacked ? STACKED_LABEL_PX : 0}
                   onFocus={choose}
                   onCommit={commit}
                 />
@@ -105,9 +116,11 @@ interface RowLabelProps {
   labelWidth: number;
   right: number;
   isFirst: boolean;
+  /** No room at the left: the label stands over its figures. */
+  isStacked: boolean;
 }
 
-function RowLabel({ row, left, labelWidth, right, isFirst }: RowLabelProps) {
+function RowLabel({ row, left, labelWidth, right, isFirst, isStacked }: RowLabelProps) {
   return (
     <th scope="row" className="text-label relative p-0 font-normal">
       <span
@@ -119,8 +132,11 @@ function RowLabel({ row, left, labelWidth, right, isFirst }: RowLabelProps) {
         style={{ transform: `translateX(${left}px)`, width: right - left }}
       />
       <span
-        className="relative block pr-3 text-right whitespace-nowrap"
-        style={{ transform: `translateX(${left}px)`, width: labelWidth }}
+        className={classNames(
+          'whitespace-nowrap',
+          isStacked ? 'absolute top-0.5 left-2 text-left' : 'relative block pr-3 text-right',
+        )}
+        style={isStacked ? undefined : { transform: `translateX(${left}px)`, width: labelWidth }}
       >
         {row.label} <span className="text-ink3 text-small">{row.unit}</span>
       </span>
@@ -138,6 +154,8 @@ interface TableCellProps {
   unit: PanelProps['unit'];
   isChosen: boolean;
   canEdit: boolean;
+  /** Room for a label over the figure, px. */
+  top: number;
   onFocus: (hole: string) => void;
   onCommit: (row: string, hole: string, value: number) => void;
 }
@@ -145,13 +163,14 @@ interface TableCellProps {
 /** Widest that a figure's field gets, px. */
 const FIELD_PX = 74;
 
-function TableCell({ row, place, shift, labelled, next, ...props }: TableCellProps) {
+function TableCell({ row, place, shift, labelled, next, top, ...props }: TableCellProps) {
   if (row.between !== undefined) {
     const reach = labelled !== undefined && next !== undefined ? row.between(labelled, next) : null;
     return (
       <BetweenCell
         place={place}
         shift={shift}
+        top={top}
         text={reach === null ? null : printLength(reach, props.unit)}
       />
     );
@@ -160,8 +179,8 @@ function TableCell({ row, place, shift, labelled, next, ...props }: TableCellPro
   return (
     <td className="relative p-0">
       <div
-        className="absolute inset-y-0 left-1/2 flex items-center justify-center"
-        style={{ width, transform: `translateX(${shift - width / 2}px)` }}
+        className="absolute bottom-0 left-1/2 flex items-center justify-center"
+        style={{ top, width, transform: `translateX(${shift - width / 2}px)` }}
       >
         {labelled !== undefined && row.editable !== undefined ? (
           <FigureCell
@@ -189,7 +208,14 @@ function PlainFigure({ text, isChosen }: { text: string | undefined; isChosen: b
 /** Lines beside a figure are drawn only where this much of each would show, px. */
 const LEAST_LINE_PX = 12;
 
-function BetweenCell({ place, shift, text }: { place: CellPlace; shift: number; text: string | null }) {
+interface BetweenCellProps {
+  place: CellPlace;
+  shift: number;
+  top: number;
+  text: string | null;
+}
+
+function BetweenCell({ place, shift, top, text }: BetweenCellProps) {
   if (text === null || place.between === null) return <td />;
   const line = Math.min(24, ((place.gap ?? 0) - 40) / 2 - 6);
   const rule = line >= LEAST_LINE_PX ? <span className="bg-ink3 h-px" style={{ width: line }} /> : null;
@@ -197,8 +223,8 @@ function BetweenCell({ place, shift, text }: { place: CellPlace; shift: number; 
   return (
     <td className="relative p-0">
       <span
-        className="absolute inset-y-0 left-1/2 flex items-center gap-2 whitespace-nowrap"
-        style={{ transform: `translateX(calc(${at}px - 50%))` }}
+        className="absolute bottom-0 left-1/2 flex items-center gap-2 whitespace-nowrap"
+        style={{ top, transform: `translateX(calc(${at}px - 50%))` }}
       >
         {rule}
         {text}

@@ -23,8 +23,8 @@ export const CoverFields = memo(function CoverFields(props: CoverFieldsProps) {
   const id = useId();
   return (
     <div className="border-hair flex items-center gap-2 border-t py-2">
-      <label htmlFor={id} className="w-19 shrink-0">
-        Covered by
+      <label htmlFor={id} className="w-14 shrink-0">
+        Cover
       </label>
       <select
         id={id}
@@ -50,7 +50,7 @@ export const CoverFields = memo(function CoverFields(props: CoverFieldsProps) {
         aria-label="Hand"
         disabled={disabled}
         value={props.hand}
-        className={classNames(SELECT, 'w-28')}
+        className={classNames(SELECT, 'w-26')}
         onChange={(event) => {
           const hand = event.currentTarget.value === 'right' ? 'right' : 'left';
           onEdit({

@@ -138,12 +138,15 @@ function RungDrawing({ placed }: { placed: PlacedRung }) {
   );
 }
 
-/** The words keep clear of each other where resonances crowd. */
+/** The words keep clear of each other where resonances crowd, in the order in which these lie. */
 function spreadText(rungs: readonly PlacedRung[]): number[] {
-  const ys: number[] = [];
-  for (const { y } of rungs) {
-    const below = ys.at(-1);
-    ys.push(below === undefined ? y : Math.min(y, below - TEXT_PX));
+  const ys = rungs.map(({ y }) => y);
+  const upwards = [...ys.keys()].sort((a, b) => (ys[b] ?? 0) - (ys[a] ?? 0));
+  let free = Infinity;
+  for (const index of upwards) {
+    const y = Math.min(ys[index] ?? 0, free);
+    ys[index] = y;
+    free = y - TEXT_PX;
   }
   return ys;
 }

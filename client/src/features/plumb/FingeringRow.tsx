@@ -1,8 +1,9 @@
 import type { Fingering } from '#shared/document/design-document.ts';
-import type { BenchGeometry } from '../../bench/bench-geometry.ts';
+import type { BenchColumn, BenchGeometry } from '../../bench/bench-geometry.ts';
 import { FingeringCircle } from '../../bench/FingeringCircle.tsx';
 import { holeMark } from '../../bench/fingering-marks.ts';
 import type { LabelledHole } from '../../bench/hole-labels.ts';
+import { leaderLanes } from '../../bench/leader-lanes.ts';
 import { classNames } from '../../ui/class-names.ts';
 
 interface FingeringRowProps {
@@ -18,20 +19,45 @@ export function FingeringRow({ geometry, holes, fingering, chosenKey }: Fingerin
   const { fingeringY, beamY } = measures;
   const hasCircles = fingering !== null && beamY > 40;
   const radius = measures.spacing > 75 ? 10 : 9;
-  const from = hasCircles ? fingeringY + radius + 2 : 0;
-  return columns.map(({ key, holeX, x }) => {
+  const lanes = leaderLanes(columns, geometry.hangLeft);
+  return columns.map((column, index) => {
+    const { key } = column;
+    const lane = lanes[index] ?? null;
     const hole = holes.find((labelled) => labelled.hole.id === key)?.hole;
-    const start = hole === undefined ? Math.max(from, beamY - 20) : from;
+    const hasCircle = hasCircles && hole !== undefined;
+    const start = hole === undefined ? Math.max(0, beamY - 20) : hasCircle ? fingeringY + radius + 2 : 0;
     return (
       <g key={key}>
         <path
-          d={`M${holeX} ${start}V${beamY - 16}L${x} ${beamY - 3}V${beamY}`}
+          d={
+            lane === null ? slanted(column, start, beamY) : inLane(column, lane, { start, beamY, hasCircle })
+          }
           className={classNames('bench-leader', key === chosenKey && 'is-chosen')}
         />
-        {hole !== undefined && hasCircles && (
-          <FingeringCircle x={holeX} y={fingeringY} radius={radius} mark={holeMark(fingering, hole)} />
+        {hasCircle && (
+          <FingeringCircle
+            x={lane === null ? column.holeX : column.x}
+            y={fingeringY}
+            radius={radius}
+            mark={holeMark(fingering, hole)}
+          />
         )}
       </g>
     );
   });
+}
+
+const slanted = ({ holeX, x }: BenchColumn, start: number, beamY: number) =>
+  `M${holeX} ${start}V${beamY - 16}L${x} ${beamY - 3}V${beamY}`;
+
+interface LaneEnds {
+  start: number;
+  beamY: number;
+  hasCircle: boolean;
+}
+
+/** Along the strip to the column, then down; a circle on the way is left out. */
+function inLane({ holeX, x }: BenchColumn, lane: number, { start, beamY, hasCircle }: LaneEnds): string {
+  const across = `M${holeX} 0V${lane}H${x}`;
+  return hasCircle ? `${across}M${x} ${start}V${beamY}` : `${across}V${beamY}`;
 }

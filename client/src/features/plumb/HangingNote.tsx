@@ -60,7 +60,7 @@ export const HangingNote = memo(function HangingNote(props: HangingNoteProps) {
           pointerEvents="none"
         >
           <Bob register={register} small={isCross} hollow={isOld} />
-          {props.isChosen && <circle r={12} className="bench-chosen-ring" strokeWidth={1.6} />}
+          {props.isChosen && <circle r={11.5} className="bench-chosen-note" />}
         </g>
       )}
       {cents === null && <title>{note}</title>}

@@ -10,7 +10,7 @@ import { useStable } from '../../bench/use-stable.ts';
 import { FingeringRow } from './FingeringRow.tsx';
 import { HangingNote } from './HangingNote.tsx';
 import { NoticeMarks } from './NoticeMarks.tsx';
-import { crossRowY, plumbRows, type PlumbRows } from './plumb-rows.ts';
+import { hasTwoLines, plumbRows, type PlumbRows } from './plumb-rows.ts';
 import { bandOf } from './plumb-scale.ts';
 import { PlumbBackdrop, RowLabels, ScaleKey } from './PlumbBackdrop.tsx';
 import { PlumbTable } from './PlumbTable.tsx';
@@ -36,8 +36,8 @@ export function PlumbChart(props: PlumbChartProps) {
   const holes = useMemo(() => labelledHoles(document), [document]);
   const notes = useMemo(() => hungNotes(document, prediction), [document, prediction]);
   const rows = useMemo(
-    () => plumbRows(notes, selection.register, measures),
-    [notes, selection.register, measures],
+    () => plumbRows(notes, selection.register, geometry),
+    [notes, selection.register, geometry],
   );
   const choose = useStable((hole: string, fingering: string) => props.onSelect({ hole, fingering }));
   const placed = placeNotes(notes, rows, geometry);
@@ -92,7 +92,7 @@ function placeNotes(
     if (rows.crossY === null) return [];
     const index = crosses.get(note.column) ?? 0;
     crosses.set(note.column, index + 1);
-    return [{ ...note, x: column.x, y: crossRowY(rows.crossY, index) }];
+    return [{ ...note, x: column.x, y: rows.crossY + index * rows.crossStep }];
   });
 }
 
@@ -101,9 +101,6 @@ interface PlacedBobProps {
   chart: PlumbChartProps;
   onChoose: (column: string, fingering: string) => void;
 }
-
-/** Labels stand in one line where columns leave room for a note and a figure side by side, px. */
-const ONE_LINE_PX = 64;
 
 function PlacedBob({ note, chart, onChoose }: PlacedBobProps) {
   const { geometry, selection, bandCents, isOld } = chart;
@@ -126,7 +123,7 @@ function PlacedBob({ note, chart, onChoose }: PlacedBobProps) {
         pxPerCent={pxPerCent}
         heldAtCents={heldAtCents}
         labelBelow={labelBelow}
-        twoLines={geometry.layout === 'phone' || geometry.columnSpacing < ONE_LINE_PX}
+        twoLines={hasTwoLines(geometry)}
         column={column}
         fingering={fingering.id}
         onChoose={onChoose}

@@ -1,3 +1,4 @@
+import type { BenchGeometry } from '../../bench/bench-geometry.ts';
 import type { BenchMeasures } from '../../bench/bench-layout.ts';
 import type { HungNote } from '../../bench/hung-notes.ts';
 import type { Selection } from '../../bench/panel-props.ts';
@@ -12,6 +13,8 @@ export interface PlumbRows {
   registers: PlumbRow[];
   /** First row of cross and half fingerings, or null where there are none. */
   crossY: number | null;
+  /** From one row of cross fingerings to the next. */
+  crossStep: number;
   /** Where bands and verticals end, below the beam. */
   bandEnd: number;
   /** Where labels end, below the beam. */
@@ -23,32 +26,55 @@ const CROSS_BELOW = 60;
 const CROSS_STEP = 54;
 /** Room that picture and label of a cross fingering take below its bob. */
 const CROSS_LABEL = 44;
+/** A second line of a label. */
+const SECOND_LINE = 16;
+/** Labels stand in one line where columns leave room for a note and a figure side by side, px. */
+const ONE_LINE_PX = 64;
+
+export const hasTwoLines = ({ layout, columnSpacing }: Pick<BenchGeometry, 'columnSpacing' | 'layout'>) =>
+  layout === 'phone' || columnSpacing < ONE_LINE_PX;
 
 /** Rows of the chart: a register each, those that are shown, then cross and half fingerings. */
 export function plumbRows(
   notes: readonly HungNote[],
   shown: Selection['register'],
-  measures: BenchMeasures,
+  geometry: Pick<BenchGeometry, 'measures' | 'columnSpacing' | 'layout'>,
 ): PlumbRows {
-  const present = [...new Set(notes.map((note) => note.fingering.register))].sort((a, b) => a - b);
-  const chosen = shown === 'all' || !present.includes(shown) ? present : [shown];
+  const { measures } = geometry;
+  const secondLine = hasTwoLines(geometry) && measures.rowStep > 0 ? SECOND_LINE : 0;
+  const registers = registerRows(notes, shown, measures);
   const [firstY = 0] = measures.rowY;
-  // One register at a time where rows would not fit one below another.
-  const registers = (measures.rowStep === 0 ? chosen.slice(0, 1) : chosen).map((register, index) => ({
-    register,
-    y: firstY + index * measures.rowStep,
-  }));
   const last = registers.at(-1)?.y ?? firstY;
   const stacked = mostCrosses(notes, new Set(registers.map((row) => row.register)));
   if (stacked === 0 || measures.rowStep === 0) {
-    return { registers, crossY: null, bandEnd: last + 30, end: last + measures.labelBelow + 22 };
+    return {
+      registers,
+      crossY: null,
+      crossStep: CROSS_STEP,
+      bandEnd: last + 30,
+      end: last + measures.labelBelow + 22 + secondLine,
+    };
   }
-  const crossY = last + CROSS_BELOW;
-  const lastCross = crossY + (stacked - 1) * CROSS_STEP;
-  return { registers, crossY, bandEnd: crossY + 12, end: lastCross + CROSS_LABEL };
+  const crossY = last + CROSS_BELOW + secondLine;
+  const crossStep = CROSS_STEP + secondLine;
+  const lastCross = crossY + (stacked - 1) * crossStep;
+  return { registers, crossY, crossStep, bandEnd: crossY + 12, end: lastCross + CROSS_LABEL + secondLine };
 }
 
-export const crossRowY = (crossY: number, index: number): number => crossY + index * CROSS_STEP;
+/** One register at a time where rows would not fit one below another. */
+function registerRows(
+  notes: readonly HungNote[],
+  shown: Selection['register'],
+  { rowY, rowStep }: BenchMeasures,
+): PlumbRow[] {
+  const present = [...new Set(notes.map((note) => note.fingering.register))].sort((a, b) => a - b);
+  const chosen = shown === 'all' || !present.includes(shown) ? present : [shown];
+  const [firstY = 0] = rowY;
+  return (rowStep === 0 ? chosen.slice(0, 1) : chosen).map((register, index) => ({
+    register,
+    y: firstY + index * rowStep,
+  }));
+}
 
 function mostCrosses(notes: readonly HungNote[], registers: ReadonlySet<number>): number {
   const counts = new Map<string, number>();

@@ -44,6 +44,7 @@ export const BodyDrawing = memo(function BodyDrawing({ frame, shape, unit }: Bod
       </g>
       {frame.headHidden && <BrokenHead frame={frame} />}
       {measures.hasSection && <BoreFigures frame={frame} shape={shape} unit={unit} />}
+      <StretchNote frame={frame} />
       <SteelRule
         zeroX={footX}
         leftX={Math.max(frame.x(body.headMm), frame.headHidden ? frame.viewLeft : -Infinity)}
@@ -118,6 +119,18 @@ function BrokenHead({ frame }: { frame: BenchFrame }) {
       />
       <path d={`M${viewLeft} ${top}${edge}`} className="bench-edge" />
     </>
+  );
+}
+
+/** Zoomed in, the strip is too low for the tube's full width at the scale of its length: the drawing says by how much. */
+function StretchNote({ frame }: { frame: BenchFrame }) {
+  const times = frame.pxPerMm / frame.acrossPxPerMm;
+  if (times < 1.05) return null;
+  const y = frame.measures.sectionY + 4.5;
+  return (
+    <text x={frame.viewLeft + 14} y={y} className="bench-quiet-label bench-haloed">
+      drawn {times.toFixed(1)} times longer than wide
+    </text>
   );
 }
 

@@ -122,7 +122,7 @@ function EmbouchureSection({ embouchure, shape, place }: EmbouchureSectionProps)
 }
 
 function ReedSection({ shape, body, place }: MouthSectionProps) {
-  const half = Math.max(1.5, (diameterAt(shape.bore.stations, 0) * place.across) / 2);
+  const half = Math.max(1.5, diameterAt(shape.bore.stations, 0) * place.across * 0.28);
   const seat = place.x(0);
   const tip = place.x(body.headMm);
   const waist = tip + (seat - tip) * 0.55;

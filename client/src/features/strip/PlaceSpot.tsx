@@ -38,7 +38,7 @@ export function PlaceSpot({
   const x = Math.min(frame.viewRight - 80, Math.max(frame.viewLeft + 80, frame.x(positionMm)));
   return (
     <div
-      className="absolute top-0 left-0 -translate-x-1/2"
+      className="absolute top-0 left-0"
       style={{ transform: `translate(calc(${x}px - 50%), ${frame.measures.planY + 24}px)` }}
     >
       <Button ref={button} size="small" onClick={onPlace} onKeyDown={onKeyDown}>

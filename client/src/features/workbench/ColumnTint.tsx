@@ -1,4 +1,5 @@
 import { columnOf, type BenchGeometry } from '../../bench/bench-geometry.ts';
+import { leaderLanes } from '../../bench/leader-lanes.ts';
 
 interface ColumnTintProps {
   geometry: BenchGeometry;
@@ -11,7 +12,11 @@ export function ColumnTint({ geometry, chosen }: ColumnTintProps) {
   if (column === undefined) return null;
   const half = geometry.measures.columnReach - 3;
   const { beamY } = geometry.measures;
-  const { holeX, x } = column;
+  const lanes = leaderLanes(geometry.columns, geometry.hangLeft);
+  const isInLane = lanes[geometry.columns.indexOf(column)] !== null;
+  const { x } = column;
+  // Where the leader runs along the strip, the column is lit by itself.
+  const holeX = isInLane ? x : column.holeX;
   const bend = Math.max(0, beamY - 20);
   return (
     <svg
