@@ -30,7 +30,11 @@ export function ladderOf(
   }));
 }
 
-/** How far a resonance stands out: |Z|/Z0 or its inverse; never below the smallest number there is. */
+/** Where nothing takes power a resonance has no end to its height; rounding hides all beyond this. */
+const HIGHEST = 1e15;
+
+/** How far a resonance stands out: |Z|/Z0 or its inverse, from 1e-15 to 1e15. */
 export function resonanceHeight({ magnitude }: Resonance, maxima: boolean): number {
-  return Math.max(maxima ? magnitude : 1 / magnitude, Number.MIN_VALUE);
+  const height = Math.abs(maxima ? magnitude : 1 / magnitude);
+  return Math.min(Math.max(height, 1 / HIGHEST), HIGHEST);
 }
