@@ -108,6 +108,7 @@ function predict({ file, modes, impedance }: Command): unknown {
 function problemOf(error: unknown): unknown {
   if (error instanceof CommandFault) return error.problem();
   if (error instanceof EngineInputError) {
+    if (error.field === 'range') return new CommandFault('--impedance', error.message).problem();
     return new CommandFault('document', error.message, [
       { path: error.field, message: error.message },
     ]).problem();
