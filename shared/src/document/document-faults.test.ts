@@ -30,6 +30,18 @@ const whistle = (): DesignDocument =>
     fingerings: [{ id: 'f-d5', note: 'D5', register: 1, covered: ['h1', 'h2'] }],
   });
 
+const embouchure = (): DesignDocument['mouthEnd'] => ({
+  kind: 'embouchure',
+  lengthMm: 10.5,
+  widthMm: 12.5,
+  chimneyMm: 4.2,
+  undercut: null,
+  lipCover: 0.35,
+  lipAngleDeg: 90,
+  stopperMm: 16,
+  correctionScale: 1,
+});
+
 type Change = (document: DesignDocument) => void;
 const faultsAfter = (change: Change) => {
   const document = whistle();
@@ -94,8 +106,27 @@ describe('what is wrong is named by field, with what would do', () => {
     [
       'a hole outside the bore',
       (d) => void (d.holes[1]!.positionMm = 270),
-      'holes.1.positionMm: Hole 2 lies outside the bore. Place it between -4.2 and 265.0 from the mouth end.',
+      'holes.1.positionMm: Hole 2 lies outside the bore. Place it between 4.3 and 260.7 from the mouth end.',
     ],
+    [
+      'a hole over the edge of the foot',
+      (d) => void (d.holes[1]!.positionMm = 263),
+      'holes.1.positionMm: Hole 2 lies outside the bore. Place it between 4.3 and 260.7 from the mouth end.',
+    ],
+    [
+      'a hole under the window',
+      (d) => void (d.holes[0]!.positionMm = -1.5),
+      'holes.0.positionMm: Hole 1 lies outside the bore. Place it between 3.5 and 261.5 from the mouth end.',
+    ],
+    ...[-40, -10, 0, 8].map((positionMm): [string, Change, string] => [
+      `a hole ${positionMm} from an embouchure hole, before it or in it`,
+      (d) => {
+        d.mouthEnd = embouchure();
+        for (const profile of [d.bore, d.outside]) profile.stations[0]!.positionMm = -60;
+        d.holes[0]!.positionMm = positionMm;
+      },
+      'holes.0.positionMm: Hole 1 lies outside the bore. Place it between 8.8 and 261.5 from the mouth end.',
+    ]),
     [
       'a hole wider than the bore',
       (d) => void (d.holes[0]!.diameterMm = 13),

@@ -119,8 +119,23 @@ function holeName(hole: ToneHole, index: number): string {
   return `Hole ${hole.name === '' ? String(index + 1) : hole.name}`;
 }
 
+/**
+ * Between which places the centre of a hole leaves the hole whole, mm, on a tenth.
+ *
+ * What lies before the mouth's own opening is no part of the sounding column: a hole there would be worked out as if it were.
+ */
+function holePlaces(document: DesignDocument, hole: ToneHole): { leastMm: number; mostMm: number } {
+  const { mouthEnd } = document;
+  const openingEndMm = mouthEnd.kind === 'embouchure' ? mouthEnd.lengthMm / 2 : 0;
+  const halfMm = hole.diameterMm / 2;
+  return {
+    leastMm: Math.ceil((openingEndMm + halfMm) * 10 - 1e-6) / 10,
+    mostMm: Math.floor((boreEnds(document).footMm - halfMm) * 10 + 1e-6) / 10,
+  };
+}
+
 function holeFaults(document: DesignDocument, hole: ToneHole, index: number): DocumentFault[] {
-  const { mouthMm, footMm } = boreEnds(document);
+  const { leastMm, mostMm } = holePlaces(document, hole);
   const path = (...keys: (string | number)[]) => ['holes', index, ...keys];
   const name = holeName(hole, index);
   if (document.holes.findIndex((other) => other.id === hole.id) < index) {
@@ -128,11 +143,11 @@ function holeFaults(document: DesignDocument, hole: ToneHole, index: number): Do
       { path: path('id'), message: `${name} has the same id as another hole. Give it one of its own.` },
     ];
   }
-  if (hole.positionMm <= mouthMm || hole.positionMm >= footMm) {
+  if (hole.positionMm < leastMm || hole.positionMm > mostMm) {
     return [
       {
         path: path('positionMm'),
-        message: `${name} lies outside the bore. Place it between ${mm(mouthMm)} and ${mm(footMm)} from the mouth end.`,
+        message: `${name} lies outside the bore. Place it between ${mm(leastMm)} and ${mm(mostMm)} from the mouth end.`,
       },
     ];
   }
