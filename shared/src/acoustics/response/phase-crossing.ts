@@ -3,7 +3,7 @@ import type { PhaseTrack } from './phase-track.ts';
 
 /** Relative to the frequency; far below anything that can be heard or measured. */
 const TOLERANCE = 1e-9;
-/** Once two steps in a row multiply to less than this, Hz², the next one would be below 1e-6 Hz. */
+/** Once two interpolated steps in a row multiply to less than this, Hz², the next one would be below 1e-6 Hz. */
 const CLOSE = 1e-4;
 const MOST_STEPS = 60;
 const POINTS = 5;
@@ -33,7 +33,7 @@ export function phaseCrossing(
   let lowPhase = cell(track.phases, place - 1);
   let highPhase = cell(track.phases, place);
   let known = neighbours(track, place, level);
-  let at = guess(known, low, high);
+  let { at } = guess(known, low, high);
   let step = high - low;
   for (let i = 0; i < MOST_STEPS; i += 1) {
     const share = (at - low) / (high - low);
@@ -48,10 +48,12 @@ export function phaseCrossing(
     }
     known = remember(known, at, phase - level);
     const next = guess(known, low, high);
-    const moved = Math.abs(next - at);
-    const closeEnough = moved * step < CLOSE || moved < TOLERANCE * at || high - low < TOLERANCE * high;
+    const moved = Math.abs(next.at - at);
+    // Halving gains one bit a step: two small steps of it promise nothing about the next.
+    const promising = next.interpolated && moved * step < CLOSE;
+    const closeEnough = promising || moved < TOLERANCE * at || high - low < TOLERANCE * high;
     step = moved;
-    at = next;
+    at = next.at;
     if (closeEnough) break;
   }
   return at;
@@ -83,7 +85,7 @@ function remember(known: number, x: number, y: number): number {
 }
 
 // Neville's inverse interpolation at phase 0, inside (low, high), else the middle.
-function guess(known: number, low: number, high: number): number {
+function guess(known: number, low: number, high: number): { at: number; interpolated: boolean } {
   let sum = 0;
   for (let i = 0; i < known; i += 1) {
     let weight = cell(xs, i);
@@ -92,5 +94,6 @@ function guess(known: number, low: number, high: number): number {
     }
     sum += weight;
   }
-  return sum >= low && sum <= high ? sum : (low + high) / 2;
+  const interpolated = sum >= low && sum <= high;
+  return { at: interpolated ? sum : (low + high) / 2, interpolated };
 }

@@ -58,10 +58,13 @@ function crossings(probe: Probe): Resonance[] {
   return found;
 }
 
-// The next level under a phase: whole turns for maxima, odd halves of one for minima.
+// The next level strictly under a phase: whole turns for maxima, odd halves of one for minima. Where a sample lies on a level
+// the division alone may round to either side of it, and the same resonance would be found twice or not at all.
 function levelBelow(phase: number, maxima: boolean): number {
-  const offset = maxima ? 0 : Math.PI;
-  return offset + 2 * Math.PI * (Math.ceil((phase - offset) / (2 * Math.PI)) - 1);
+  const level = (turns: number) => (maxima ? 0 : Math.PI) + 2 * Math.PI * turns;
+  const turns = Math.ceil((phase - level(0)) / (2 * Math.PI)) - 1;
+  if (level(turns) >= phase) return level(turns - 1);
+  return level(turns + 1) < phase ? level(turns + 1) : level(turns);
 }
 
 // The impedance at the root: its imaginary part is 0 there, and a step short of it only the real one is right.
