@@ -8,7 +8,7 @@ import { ensureChromium, ensureMariadb } from './lib/debian.mjs';
 import { startThrowAwayMariadb } from './lib/mariadb.mjs';
 import { ensurePackages } from './lib/packages.mjs';
 import { inRoot } from './lib/paths.mjs';
-import { stopChild } from './lib/processes.mjs';
+import { stopGroup } from './lib/processes.mjs';
 import { guardChildren } from './lib/guard.mjs';
 import { runLauncher } from './lib/refusal.mjs';
 import { orderlyShutdown } from './lib/shutdown.mjs';
@@ -59,10 +59,12 @@ async function runLayer(layer, { rest, environment, shutdown, reports }) {
       cwd: inRoot(),
       env: { ...process.env, ...environment, NODE_ENV: 'test' },
       stdio: ['ignore', 'inherit', 'inherit'],
+      // A group of its own, workers included, so that all of it can be ended.
+      detached: true,
     },
   );
   const disarm = guardChildren([child.pid], [reports]);
-  await shutdown.add(() => stopChild(child));
+  await shutdown.add(() => stopGroup(child));
   const [code] = await once(child, 'exit');
   disarm();
   return countReport(report, code ?? 1);

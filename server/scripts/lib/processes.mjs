@@ -62,6 +62,21 @@ export async function stopChild(child, { signal = 'SIGTERM', patienceMs = 15_000
   clearTimeout(timer);
 }
 
+/** The same for a child that leads a group of its own, and for all that it started: a busy one heeds no polite request. */
+export async function stopGroup(leader, { patienceMs = 5_000 } = {}) {
+  const signalAll = (signal) => {
+    try {
+      process.kill(-leader.pid, signal);
+    } catch (error) {
+      // All of them have ended already.
+      if (error.code !== 'ESRCH') throw error;
+    }
+  };
+  signalAll('SIGTERM');
+  await until(() => !isAlive(leader), { timeoutMs: patienceMs });
+  signalAll('SIGKILL');
+}
+
 /** The command line of a running process, or null when there is none (or it is a zombie). */
 export function commandLineOf(pid) {
   try {
