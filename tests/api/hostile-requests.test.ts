@@ -102,6 +102,21 @@ describe('a document that cannot be read', () => {
     },
   );
 
+  it.each([String.raw`"a\ud800"`, String.raw`"\udfffa"`])(
+    'refuses half a character in a name: %s',
+    async (json) => {
+      expectProblem(await postRaw(withValue('name', json)), 400, 'bad-request');
+      await expectNothingKept();
+    },
+  );
+
+  it.each(['\ud83c\udfb6', String.raw`C:\ud800`])('keeps %s in a name, which is whole', async (name) => {
+    const elsewhere = await signInAs(server, await buildPerson(server, { role: 'maker' }));
+    const answer = await elsewhere.post('/api/designs').send({ document: { ...whistleDocument(), name } });
+    expect(answer.status).toBe(201);
+    expect(answer.body).toMatchObject({ name });
+  });
+
   it('refuses bytes that are not UTF-8', async () => {
     const body = Buffer.concat([Buffer.from('{"document":"'), Buffer.from([0xff, 0xfe]), Buffer.from('"}')]);
     const answer = await agent

@@ -4,6 +4,12 @@ import { badRequest, HttpError } from './http-error.ts';
 /** Largest body of a request, bytes; a design document with every count at its limit has about 60 kB. */
 const LARGEST_BODY = 1_000_000;
 
+/**
+ * Half of a surrogate pair as `JSON.stringify` writes it, which escapes no whole pair. JSON can say it, UTF-8 and the database
+ * cannot. An even number of backslashes before it is text that only looks so.
+ */
+const HALF_CHARACTER = /(?<!\\)(?:\\\\)*\\ud[89a-f][0-9a-f]{2}/;
+
 const tooLarge = () =>
   new HttpError(413, 'too-large', 'Too large', {
     detail:
@@ -21,16 +27,21 @@ const wrongType = () =>
  * `express.json()` reads a body that it has refused to its end before it answers: 100 MB would come in whole. Here
  * the answer goes out as soon as the limit is passed.
  *
- * @throws HttpError 413, 415, or 400 for what is not JSON
+ * @throws HttpError 413, 415, or 400 for what is not JSON or holds half a character
  */
 export async function readJsonBody(req: IncomingMessage): Promise<unknown> {
   refuseHeaders(req);
   const text = decode(await collect(req));
+  let body: unknown;
   try {
-    return JSON.parse(text);
+    body = JSON.parse(text);
   } catch {
     throw badRequest('The body of the request is not JSON. Nothing was kept.');
   }
+  if (HALF_CHARACTER.test(JSON.stringify(body))) {
+    throw badRequest('A text holds half a character. Type it again. Nothing was kept.');
+  }
+  return body;
 }
 
 function refuseHeaders({ headers }: IncomingMessage): void {
