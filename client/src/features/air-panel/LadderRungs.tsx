@@ -1,6 +1,7 @@
 import type { KeyboardEvent } from 'react';
 import type { FingeringPrediction, LadderRung } from '#shared/analysis/prediction.ts';
 import { formatCents } from '#shared/music/cents.ts';
+import { spreadColumns } from '../../bench/spread-columns.ts';
 import { classNames } from '../../ui/class-names.ts';
 
 interface LadderRungsProps {
@@ -22,6 +23,10 @@ interface LadderRungsProps {
 
 /** A rung is moved from its exact multiple by this share of the spacing per 100 cents. */
 const STRETCH = 0.42;
+/** Rungs further from their multiple are not stretched. */
+const MOST_STRETCHED_CENTS = 110;
+/** Two lines of words, px. */
+const WORDS_HEIGHT = 33;
 /** Narrower than this, the shading speaks for itself, px. */
 const ROOM_FOR_LEAK = 96;
 /** No length is left at so many dB below the strongest. */
@@ -32,6 +37,13 @@ export function LadderRungs(props: LadderRungsProps) {
   const { predicted, x, width, top, bottom, cutoffY, ghosts, y } = props;
   const first = predicted.ladder.find(({ mode }) => mode === 1)?.frequencyHz ?? 0;
   const spacing = y(0) - y(first);
+  const rungs = predicted.ladder
+    .map((rung) => ({ rung, y: rungPlace(rung, spacing, y) }))
+    .sort((a, b) => a.y - b.y);
+  const wordsY = spreadColumns(
+    rungs.map((rung) => rung.y),
+    { spacing: WORDS_HEIGHT, left: top + 10, right: bottom },
+  );
   return (
     <>
       <g aria-hidden="true">
@@ -63,27 +75,40 @@ export function LadderRungs(props: LadderRungsProps) {
           />
         ))}
       </g>
-      {predicted.ladder.map((rung) => (
+      {rungs.map(({ rung, y: rungY }, index) => (
         <Rung
           key={rung.mode}
           {...props}
           rung={rung}
-          rungY={exactY(rung) - (STRETCH * spacing * rung.centsFromMultiple) / 100}
+          rungY={rungY}
+          wordsY={wordsY[index] ?? rungY}
           isChosen={rung.mode === props.mode}
           isSounding={rung.mode === predicted.mode}
         />
       ))}
     </>
   );
+}
 
-  function exactY(rung: LadderRung): number {
-    return y(rung.frequencyHz / 2 ** (rung.centsFromMultiple / 1200));
-  }
+/**
+ * Stretched about its exact multiple, so that a few cents can be seen; a rung that is further out than the stretch can show
+ * stands at its own frequency.
+ */
+function rungPlace(
+  { frequencyHz, centsFromMultiple }: LadderRung,
+  spacing: number,
+  y: (hz: number) => number,
+): number {
+  if (Math.abs(centsFromMultiple) > MOST_STRETCHED_CENTS) return y(frequencyHz);
+  const exact = y(frequencyHz / 2 ** (centsFromMultiple / 1200));
+  return exact - (STRETCH * spacing * centsFromMultiple) / 100;
 }
 
 interface RungProps extends LadderRungsProps {
   rung: LadderRung;
   rungY: number;
+  /** Its words stand here, clear of the neighbours'. */
+  wordsY: number;
   isChosen: boolean;
   isSounding: boolean;
 }
@@ -91,6 +116,7 @@ interface RungProps extends LadderRungsProps {
 function Rung({
   rung,
   rungY,
+  wordsY,
   isChosen,
   isSounding,
   x,
@@ -142,7 +168,7 @@ function Rung({
         {...{ rung, isSounding, cents, decibels }}
         wide={widthHz(frequencyHz)}
         x={x + width + 14}
-        y={rungY - 1}
+        y={wordsY - 1}
       />
     </g>
   );

@@ -147,6 +147,7 @@ interface RowProps extends PanelProps {
 function Row({ geometry, selection, height, name, unitName = '', isStrong = false, cell }: RowProps) {
   const { columns, labelRight, hangRight } = geometry;
   const left = lineLeft(geometry);
+  const width = Math.min(80, geometry.columnSpacing);
   return (
     <div role="row" className="relative" style={{ height }}>
       <div
@@ -170,10 +171,10 @@ function Row({ geometry, selection, height, name, unitName = '', isStrong = fals
           key={key}
           role="cell"
           className={classNames(
-            'text-data absolute w-20 text-center',
+            'text-data absolute text-center',
             (isStrong || key === selection.hole) && 'font-bold',
           )}
-          style={{ left: x - 40, lineHeight: `${height}px` }}
+          style={{ left: x - width / 2, width, lineHeight: `${height}px` }}
         >
           {cell(key)}
         </div>
@@ -187,7 +188,13 @@ function PressureBar({ share, isChosen }: { share: number | null; isChosen: bool
   const width = share * BAR;
   return (
     <span className={classNames('block leading-none', !isChosen && 'text-ink3')}>
-      <svg width={BAR} height={8} aria-hidden="true" className="mx-auto mt-1.5 mb-1 block">
+      <svg
+        viewBox={`0 0 ${BAR} 8`}
+        height={8}
+        preserveAspectRatio="none"
+        aria-hidden="true"
+        className="mx-auto mt-1.5 mb-1 block w-full max-w-13"
+      >
         <rect width={BAR} height={8} className="air-bar-room" />
         <rect
           x={(BAR - width) / 2}

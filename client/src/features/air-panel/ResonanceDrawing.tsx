@@ -136,9 +136,11 @@ function FrequencyAxis({ y, toHz, curveWidth }: FrequencyAxisProps) {
       <text x={AXIS_X} y={BOTTOM + 20} className="bench-quiet-label">
         plays
       </text>
-      <text x={AXIS_X + curveWidth} y={BOTTOM + 20} textAnchor="end" className="bench-quiet-label">
-        resists
-      </text>
+      {curveWidth > 90 && (
+        <text x={AXIS_X + curveWidth} y={BOTTOM + 20} textAnchor="end" className="bench-quiet-label">
+          resists
+        </text>
+      )}
       <text x={AXIS_X + curveWidth / 2} y={BOTTOM + 36} textAnchor="middle" className="bench-quiet-label">
         input impedance, dB
       </text>

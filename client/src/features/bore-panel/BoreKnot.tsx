@@ -7,8 +7,6 @@ interface BoreKnotProps {
   y: number;
   size: number;
   name: string;
-  /** The width, on a chip beside the chosen knot. */
-  figure: string;
   isChosen: boolean;
   readOnly: boolean;
   onChoose: () => void;
@@ -98,15 +96,6 @@ export function BoreKnot(props: BoreKnotProps) {
         rx={2}
         className={isChosen ? 'bore-knot is-chosen' : 'bore-knot'}
       />
-      {isChosen && (
-        <g aria-hidden="true">
-          <line x1={x} x2={x} y1={0} y2={y - size / 2} className="bench-drop is-chosen" />
-          <rect x={x - 92} y={y - 10} width={76} height={20} rx={3} className="bench-chip" />
-          <text x={x - 54} y={y + 4.5} textAnchor="middle" className="bench-chip-figure">
-            Ø {props.figure}
-          </text>
-        </g>
-      )}
     </g>
   );
 }

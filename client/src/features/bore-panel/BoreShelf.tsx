@@ -3,6 +3,7 @@ import { printLength } from '#shared/lengths/print-length.ts';
 import { fromFootMm } from '#shared/document/profile.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { BoreKnot } from './BoreKnot.tsx';
+import { KnotReading } from './KnotReading.tsx';
 import { moveStation } from './bore-edits.ts';
 import { ShelfCaption } from './ShelfCaption.tsx';
 import { SHELF, shelfScale, timesWider, type ShelfScale } from './shelf-scale.ts';
@@ -38,6 +39,7 @@ export function BoreShelf(props: BoreShelfProps) {
     geometry.x(stations[0]?.positionMm ?? 0),
     geometry.x(stations.at(-1)?.positionMm ?? 0),
   ];
+  const chosenStation = chosen === null ? undefined : stations[chosen];
   const isBeside = left >= ROOM_FOR_CAPTIONS;
   return (
     <svg
@@ -70,7 +72,6 @@ export function BoreShelf(props: BoreShelfProps) {
           y={scale.y(station.diameterMm)}
           size={stations.length > MANY_STATIONS && index !== chosen ? 5 : 11}
           name={`Station ${index + 1}, ${printLength(fromFootMm(document, station.positionMm), unit)} from foot, ${printLength(station.diameterMm, unit, 2)} wide`}
-          figure={printLength(station.diameterMm, unit, unit === 'mm' ? 2 : 3)}
           isChosen={index === chosen}
           readOnly={readOnly !== null}
           onChoose={() => onChoose(index)}
@@ -86,6 +87,13 @@ export function BoreShelf(props: BoreShelfProps) {
           }
         />
       ))}
+      {chosenStation !== undefined && (
+        <KnotReading
+          x={geometry.x(chosenStation.positionMm)}
+          y={scale.y(chosenStation.diameterMm)}
+          figure={printLength(chosenStation.diameterMm, unit, unit === 'mm' ? 2 : 3)}
+        />
+      )}
       <WiderCurves {...props} isBeside={isBeside} />
     </svg>
   );

@@ -27,6 +27,7 @@ const ROWS: readonly Row[] = [
 export function BoreTable({ document, geometry, unit, selection }: PanelProps) {
   const { columns, labelRight, hangRight, measures } = geometry;
   const holes = labelledHoles(document);
+  const cell = Math.min(80, geometry.columnSpacing);
   const titleOf = (key: string) => holes.find(({ hole }) => hole.id === key)?.title ?? 'Foot';
   const placeOf = (key: string) =>
     document.holes.find(({ id }) => id === key)?.positionMm ?? boreEnds(document).footMm;
@@ -61,11 +62,8 @@ export function BoreTable({ document, geometry, unit, selection }: PanelProps) {
             <div
               key={key}
               role="cell"
-              className={classNames(
-                'text-data absolute w-20 text-center',
-                key === selection.hole && 'font-bold',
-              )}
-              style={{ left: x - 40, lineHeight: `${measures.rowHeight}px` }}
+              className={classNames('text-data absolute text-center', key === selection.hole && 'font-bold')}
+              style={{ left: x - cell / 2, width: cell, lineHeight: `${measures.rowHeight}px` }}
             >
               {printLength(at(document, placeOf(key)), unit, unit === 'mm' ? digits : 3)}
             </div>

@@ -53,12 +53,12 @@ export function MouthForm({ document, unit, sensitivities, selection, readOnly, 
   );
   return (
     <section aria-labelledby="mouth-heading" className="mt-4 min-w-0 flex-1 min-[1280px]:mt-0">
-      <div className="flex items-baseline justify-between gap-2">
+      <div>
         <h2 id="mouth-heading" className="text-section font-semibold">
           {MOUTH_NAMES[mouthEnd.kind]}
         </h2>
         {sensitivities !== null && selection.fingering !== null && (
-          <span className="text-small text-ink3">cents per 0.1 mm</span>
+          <p className="text-small text-ink3 text-right">cents per 0.1 mm</p>
         )}
       </div>
       {mouthEnd.kind === 'window' && <WindowSection window={mouthEnd} unit={unit} />}

@@ -32,7 +32,7 @@ export function WiderCurves({ document, geometry, selection, isBeside }: WiderCu
   const full = most > 0.5 ? Math.ceil(most) : Math.ceil(most * 10) / 10;
   const y = (cents: number) => SHELF.curveY - (cents / full) * SHELF.curveReach;
   return (
-    <g role="img" aria-label={spoken(curves, shown)}>
+    <g role="img" aria-label={spoken(curves, shown, boreEnds(document).footMm)}>
       <ShelfCaption
         isBeside={isBeside}
         y={170}
@@ -64,7 +64,7 @@ export function WiderCurves({ document, geometry, selection, isBeside }: WiderCu
           return fingering === undefined ? null : (
             <Curve
               key={curve.fingering}
-              labelShare={isBeside ? 0.08 : 0.35}
+              isBeside={isBeside}
               curve={curve}
               fingering={fingering}
               place={index}
@@ -78,30 +78,35 @@ export function WiderCurves({ document, geometry, selection, isBeside }: WiderCu
   );
 }
 
+/** Names stand near the left end of their curves, above the first and below the second; or in a row at the foot of the shelf. */
+const NAME_IN = 96;
+const NAME_WIDTH = 64;
+
 interface CurveProps {
   curve: WiderHere;
   fingering: Fingering;
-  /** Which of the two curves this is: names stand above the first and below the second. */
+  /** Which of the two curves this is. */
   place: number;
-  /** How far along the curve its name stands. */
-  labelShare: number;
+  isBeside: boolean;
   x: (mm: number) => number;
   y: (cents: number) => number;
 }
 
 /** Register 2 is dashed and ringed as everywhere, so that the hue is not alone. */
-function Curve({ curve, fingering, place, labelShare, x, y }: CurveProps) {
+function Curve({ curve, fingering, place, isBeside, x, y }: CurveProps) {
   const points = curve.points.map(({ positionMm, cents }) => [x(positionMm), y(cents)] as [number, number]);
   const path = line()(points) ?? '';
   const [first, last] = [points[0], points.at(-1)];
-  const label = points[Math.round(points.length * labelShare)] ?? [0, 0];
   const look = `is-register${Math.min(fingering.register, 3)}`;
   if (first === undefined || last === undefined) return null;
+  const label = isBeside
+    ? { x: first[0] + NAME_IN, y: SHELF.curveY + (place === 0 ? -31 : 32) }
+    : { x: 30 + place * NAME_WIDTH, y: SHELF.height - 9 };
   return (
     <>
       <path d={`${path}L${last[0]} ${y(0)}L${first[0]} ${y(0)}Z`} className={`bore-area ${look}`} />
       <path d={path} className={`bore-curve ${look}`} />
-      <g transform={`translate(${label[0]} ${place === 0 ? SHELF.curveY - 31 : SHELF.curveY + 32})`}>
+      <g transform={`translate(${label.x} ${label.y})`}>
         <Bob register={fingering.register} scale={0.6} />
         <text x={10} y={4.5} className="bench-label bench-label-strong bore-haloed">
           <NoteSpan note={fingering.note} />
@@ -126,14 +131,15 @@ function shownFingerings(document: DesignDocument, chosen: string | null): Finge
   return other === undefined ? [main] : [main, other].sort((a, b) => a.register - b.register);
 }
 
-function spoken(curves: readonly WiderHere[], shown: readonly Fingering[]): string {
+function spoken(curves: readonly WiderHere[], shown: readonly Fingering[], footMm: number): string {
+  const from = ({ positionMm }: { positionMm: number }) => (footMm - positionMm).toFixed(0);
   const sentences = curves.flatMap(({ fingering, points }) => {
     const note = shown.find(({ id }) => id === fingering)?.note;
     if (note === undefined || points.length === 0) return [];
     const sharpest = points.reduce((best, point) => (point.cents > best.cents ? point : best));
     const flattest = points.reduce((best, point) => (point.cents < best.cents ? point : best));
     return [
-      `${note} is sharpened most by a wider bore ${sharpest.positionMm.toFixed(0)} mm from the mouth end, flattened most at ${flattest.positionMm.toFixed(0)} mm.`,
+      `${note} is sharpened most by a wider bore ${from(sharpest)} mm from the foot, flattened most at ${from(flattest)} mm.`,
     ];
   });
   return sentences.length === 0 ? 'What a wider bore does to the chosen note' : sentences.join(' ');
