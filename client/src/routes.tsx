@@ -5,6 +5,7 @@ import { NotFoundPage } from './pages/NotFoundPage.tsx';
 import { PlainFrame } from './pages/PlainFrame.tsx';
 import { RouteError } from './pages/RouteError.tsx';
 import { paths, patterns } from './paths.ts';
+import { fetchMenuParts } from './ui/Menu.tsx';
 
 /** Every screen, fetched when it is first opened. */
 export function createRouter(queryClient: QueryClient) {
@@ -89,6 +90,7 @@ function designRoutes(queryClient: QueryClient): RouteObject[] {
         const [{ WorkbenchPage }, { workbenchLoader }] = await Promise.all([
           import('./pages/WorkbenchPage.tsx'),
           import('./pages/design-gate.ts'),
+          fetchMenuParts(),
         ]);
         return { Component: WorkbenchPage, loader: workbenchLoader(queryClient) };
       },

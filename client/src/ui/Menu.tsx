@@ -1,92 +1,83 @@
-import { DropdownMenu } from 'radix-ui';
-import type { ReactNode } from 'react';
+import { Slot } from 'radix-ui';
+import { useState, type KeyboardEvent } from 'react';
+import { NoLineError } from '../lib/api-problem.ts';
+import type { MenuChoiceProps, MenuItemProps, MenuProps } from './menu-parts.tsx';
 import { classNames } from './class-names.ts';
+import { Problem } from './Problem.tsx';
 
-interface MenuProps {
-  /** The button that opens it. */
-  trigger: ReactNode;
-  align?: 'start' | 'end';
-  children: ReactNode;
+type Parts = typeof import('./menu-parts.tsx');
+
+let parts: Parts | null = null;
+
+/**
+ * Fetches what menus are made of: a seventh of the first load, and few first visits open one. The workbench fetches it with
+ * itself, so that a menu there opens without a line, too.
+ */
+export async function fetchMenuParts(): Promise<Parts> {
+  parts ??= await import('./menu-parts.tsx');
+  return parts;
+}
+
+function fetchedParts(): Parts {
+  if (parts === null) throw new Error('A row of a menu stands outside its Menu.');
+  return parts;
 }
 
 /** A list of verbs or places under a button. */
-export function Menu({ trigger, align = 'end', children }: MenuProps) {
+export function Menu(props: MenuProps) {
+  const [isFetched, setFetched] = useState(parts !== null);
+  const [opensAtOnce, setOpensAtOnce] = useState(false);
+  const [failure, setFailure] = useState<unknown>(null);
+  if (isFetched) {
+    const { OpenableMenu } = fetchedParts();
+    return <OpenableMenu {...props} defaultOpen={opensAtOnce} />;
+  }
+  const open = () => {
+    setFailure(null);
+    fetchMenuParts().then(
+      () => {
+        setOpensAtOnce(true);
+        setFetched(true);
+      },
+      (cause: unknown) => setFailure(new NoLineError(cause)),
+    );
+  };
   return (
-    <DropdownMenu.Root>
-      <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content
-          align={align}
-          sideOffset={6}
-          collisionPadding={8}
-          className="rounded-control border-hair bg-sheet text-ink shadow-pop z-50 max-h-(--radix-dropdown-menu-content-available-height) min-w-56 overflow-y-auto border py-1"
-        >
-          {children}
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
-    </DropdownMenu.Root>
+    <span className="relative inline-flex">
+      <Slot.Root
+        aria-haspopup="menu"
+        aria-expanded={false}
+        onClick={open}
+        onKeyDown={(event: KeyboardEvent) => {
+          if (event.key === 'ArrowDown') open();
+        }}
+      >
+        {props.trigger}
+      </Slot.Root>
+      <span
+        className={classNames(
+          'bg-sheet absolute top-full z-30 w-72',
+          props.align === 'start' ? 'left-2' : 'right-0',
+        )}
+      >
+        <Problem error={failure} />
+      </span>
+    </span>
   );
 }
 
-const ITEM =
-  'flex w-full cursor-pointer items-center gap-3 px-4 text-left text-body text-ink no-underline outline-none data-disabled:cursor-default data-disabled:text-ink3 data-highlighted:bg-mark-soft target';
-
-interface MenuItemProps {
-  onSelect?: (() => void) | undefined;
-  disabled?: boolean;
-  look?: 'plain' | 'stop';
-  /** Hands the row to the child, for links. */
-  asChild?: boolean;
-  children: ReactNode;
-}
-
-export function MenuItem({
-  onSelect,
-  disabled = false,
-  look = 'plain',
-  asChild = false,
-  children,
-}: MenuItemProps) {
-  return (
-    <DropdownMenu.Item
-      asChild={asChild}
-      disabled={disabled}
-      {...(onSelect === undefined ? {} : { onSelect })}
-      className={classNames(ITEM, look === 'stop' && 'text-stop')}
-    >
-      {children}
-    </DropdownMenu.Item>
-  );
-}
-
-interface MenuChoiceProps {
-  label: string;
-  value: string;
-  options: readonly { value: string; label: string }[];
-  onChange: (value: string) => void;
+export function MenuItem(props: MenuItemProps) {
+  const { MenuItem: Item } = fetchedParts();
+  return <Item {...props} />;
 }
 
 /** One of a few, chosen inside a menu. */
-export function MenuChoice({ label, value, options, onChange }: MenuChoiceProps) {
-  return (
-    <DropdownMenu.RadioGroup value={value} onValueChange={onChange} aria-label={label}>
-      <DropdownMenu.Label className="text-label text-ink3 px-4 pt-2 pb-1">{label}</DropdownMenu.Label>
-      {options.map((option) => (
-        <DropdownMenu.RadioItem key={option.value} value={option.value} className={ITEM}>
-          <span
-            aria-hidden="true"
-            className={classNames(
-              'rounded-disc border-ink2 inline-block size-3 shrink-0 border-[1.5px]',
-              option.value === value && 'bg-ink2',
-            )}
-          />
-          {option.label}
-        </DropdownMenu.RadioItem>
-      ))}
-    </DropdownMenu.RadioGroup>
-  );
+export function MenuChoice(props: MenuChoiceProps) {
+  const { MenuChoice: Choice } = fetchedParts();
+  return <Choice {...props} />;
 }
 
 export function MenuDivider() {
-  return <DropdownMenu.Separator className="border-hair my-1 border-t" />;
+  const { MenuDivider: Divider } = fetchedParts();
+  return <Divider />;
 }

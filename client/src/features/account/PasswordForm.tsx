@@ -32,7 +32,7 @@ export function PasswordForm({ email }: { email: string }) {
       onSubmit={(event) => void handleSubmit((values) => change.mutate(values))(event)}
       className="grid justify-items-start gap-4"
     >
-      <input type="text" autoComplete="username" value={email} readOnly hidden />
+      <input type="text" name="username" autoComplete="username" value={email} readOnly hidden />
       <Field
         className="w-full max-w-105"
         label="Password now"

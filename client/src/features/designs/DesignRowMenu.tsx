@@ -1,16 +1,28 @@
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import { Link } from 'react-router';
 import type { DesignSummary } from '#shared/contract/designs.ts';
 import { Menu, MenuDivider, MenuItem } from '../../ui/Menu.tsx';
 import { Problem } from '../../ui/Problem.tsx';
 import { useArchiveDesign, useCopyDesign, useRenameDesign } from './designs.queries.ts';
-import { NameDialog } from './NameDialog.tsx';
 
 /** Why this person may not copy, rename or archive; null when they may. */
 export interface RackRefusals {
   copy: string | null;
   edit: string | null;
 }
+
+/** Fetched when something is first named. */
+const NameDialog = lazy(async () => ({ default: (await import('./NameDialog.tsx')).NameDialog }));
+
+const NAMINGS = {
+  copy: ({ name }: DesignSummary) => ({
+    title: 'Copy this design',
+    description: `A draft of your own that begins as ${name}.`,
+    verb: 'Copy',
+    name: `${name}, copy`,
+  }),
+  rename: ({ name }: DesignSummary) => ({ title: 'Rename this design', verb: 'Rename', name }),
+};
 
 interface DesignRowMenuProps {
   design: DesignSummary;
@@ -20,11 +32,13 @@ interface DesignRowMenuProps {
 
 /** What can be done with a design from the rack. Putting it away is undone by taking it back, so it is not asked about. */
 export function DesignRowMenu({ design, to, refusals }: DesignRowMenuProps) {
-  const [naming, setNaming] = useState<'copy' | 'rename' | null>(null);
+  const [naming, setNaming] = useState<keyof typeof NAMINGS | null>(null);
   const copy = useCopyDesign();
   const rename = useRenameDesign();
   const archive = useArchiveDesign();
+  const mutation = naming === 'copy' ? copy : rename;
   const close = () => setNaming(null);
+  const handleName = (name: string) => mutation.mutate({ id: design.id, name }, { onSuccess: close });
   const trigger = (
     <button
       type="button"
@@ -58,26 +72,14 @@ export function DesignRowMenu({ design, to, refusals }: DesignRowMenuProps) {
         </MenuItem>
         <MenuReasons refusals={refusals} />
       </Menu>
-      <Problem error={archive.error} />
-      <NameDialog
-        title="Copy this design"
-        description={`A draft of your own that begins as ${design.name}.`}
-        verb="Copy"
-        name={`${design.name}, copy`}
-        open={naming === 'copy'}
-        mutation={copy}
-        onClose={close}
-        onName={(name) => copy.mutate({ id: design.id, name }, { onSuccess: close })}
-      />
-      <NameDialog
-        title="Rename this design"
-        verb="Rename"
-        name={design.name}
-        open={naming === 'rename'}
-        mutation={rename}
-        onClose={close}
-        onName={(name) => rename.mutate({ id: design.id, name }, { onSuccess: close })}
-      />
+      <div className="bg-sheet absolute top-full right-0 z-10 w-72">
+        <Problem error={archive.error} />
+      </div>
+      {naming !== null && (
+        <Suspense fallback={null}>
+          <NameDialog {...NAMINGS[naming](design)} mutation={mutation} onClose={close} onName={handleName} />
+        </Suspense>
+      )}
     </>
   );
 }

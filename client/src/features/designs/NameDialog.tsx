@@ -13,20 +13,19 @@ interface NameDialogProps {
   verb: string;
   /** What stands in the field at first. */
   name: string;
-  open: boolean;
   mutation: { isPending: boolean; error: unknown; reset: () => void };
   onClose: () => void;
   onName: (name: string) => void;
 }
 
-export function NameDialog({ title, description, open, mutation, onClose, ...form }: NameDialogProps) {
+export function NameDialog({ title, description, mutation, onClose, ...form }: NameDialogProps) {
   const handleOpen = (isOpen: boolean) => {
     if (isOpen) return;
     mutation.reset();
     onClose();
   };
   return (
-    <Dialog title={title} description={description} open={open} onOpenChange={handleOpen}>
+    <Dialog title={title} description={description} open onOpenChange={handleOpen}>
       <NameForm {...form} mutation={mutation} onCancel={() => handleOpen(false)} />
     </Dialog>
   );

@@ -1,10 +1,12 @@
-import { useRef, useState, type ChangeEvent } from 'react';
+import { lazy, Suspense, useRef, useState, type ChangeEvent } from 'react';
 import type { DesignSummary } from '#shared/contract/designs.ts';
 import { problemSentence } from '../../lib/api-problem.ts';
 import { Button } from '../../ui/Button.tsx';
-import { Dialog, DialogActions } from '../../ui/Dialog.tsx';
 import { useCreateDesign } from './designs.queries.ts';
 import type { FileComplaint } from './read-design-file.ts';
+
+/** Fetched when a file was refused. */
+const FileComplaints = lazy(async () => ({ default: (await import('./FileComplaints.tsx')).FileComplaints }));
 
 interface ReadInDesignProps {
   onCreated: (design: DesignSummary) => void;
@@ -49,37 +51,11 @@ export function ReadInDesign({ onCreated }: ReadInDesignProps) {
         className="hidden"
         onChange={(event) => void handleFile(event)}
       />
-      <Dialog
-        title="This file was not read in"
-        description={`Nothing was made of ${refused?.fileName ?? 'it'}. Mend what stands here, then read it in again.`}
-        open={refused !== null}
-        onOpenChange={() => setRefused(null)}
-        width="wide"
-      >
-        <Complaints complaints={refused?.complaints ?? []} />
-        <DialogActions>
-          <Button look="go" onClick={() => setRefused(null)}>
-            Close
-          </Button>
-        </DialogActions>
-      </Dialog>
+      {refused !== null && (
+        <Suspense fallback={null}>
+          <FileComplaints {...refused} onClose={() => setRefused(null)} />
+        </Suspense>
+      )}
     </>
-  );
-}
-
-/** Beyond this many the rest follows from the first ones. */
-const SHOWN = 20;
-
-function Complaints({ complaints }: { complaints: readonly FileComplaint[] }) {
-  return (
-    <ul className="border-hair border-t">
-      {complaints.slice(0, SHOWN).map(({ place, message }) => (
-        <li key={place + message} className="border-hair border-b py-2">
-          {place !== '' && <span className="text-data text-ink3 block">{place}</span>}
-          {message}
-        </li>
-      ))}
-      {complaints.length > SHOWN && <li className="text-ink2 py-2">And {complaints.length - SHOWN} more.</li>}
-    </ul>
   );
 }

@@ -51,10 +51,11 @@ function PasswordForm({ email, onAnswer }: { email: string; onAnswer: Answer }) 
   };
   return (
     <form noValidate onSubmit={handleSubmit} className="grid gap-4">
-      <input type="text" autoComplete="username" value={email} readOnly hidden />
+      <input type="text" name="username" autoComplete="username" value={email} readOnly hidden />
       <Field
         label="Password"
         type="password"
+        name="password"
         autoComplete="current-password"
         value={password}
         onChange={(event) => setPassword(event.currentTarget.value)}

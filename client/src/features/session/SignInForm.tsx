@@ -1,48 +1,55 @@
-import { useForm } from 'react-hook-form';
-import type { z } from 'zod';
+import { useRef, useState, type SyntheticEvent } from 'react';
 import { signInRequest } from '#shared/contract/session.ts';
 import { isStatus } from '../../lib/api-client.ts';
-import { zodResolver } from '../../lib/zod-resolver.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Field } from '../../ui/Field.tsx';
 import { Problem } from '../../ui/Problem.tsx';
 import { useSignIn } from './session.queries.ts';
 
-type Values = z.input<typeof signInRequest>;
-
+/** Two fields, by hand: the first page of all fetches no form library. */
 export function SignInForm({ onSignedIn }: { onSignedIn: () => void }) {
-  const { register, handleSubmit, formState, setFocus, resetField } = useForm<Values>({
-    resolver: zodResolver(signInRequest),
-    defaultValues: { email: '', password: '' },
-  });
+  const [values, setValues] = useState({ email: '', password: '' });
+  const [wasSent, setSent] = useState(false);
+  const password = useRef<HTMLInputElement>(null);
   const signIn = useSignIn();
+  const reading = signInRequest.safeParse({ ...values, email: values.email.trim() });
+  const complaintAbout = (name: 'email' | 'password') =>
+    wasSent ? reading.error?.issues.find((issue) => issue.path[0] === name)?.message : undefined;
 
-  const handleSignIn = handleSubmit((values) =>
-    signIn.mutate(values, {
+  const handleSubmit = (event: SyntheticEvent) => {
+    event.preventDefault();
+    setSent(!reading.success);
+    if (!reading.success) return;
+    signIn.mutate(reading.data, {
       onSuccess: onSignedIn,
       onError: (error) => {
         if (!isStatus(error, 401)) return;
-        resetField('password');
-        setFocus('password');
+        setValues((current) => ({ ...current, password: '' }));
+        password.current?.focus();
       },
-    }),
-  );
+    });
+  };
 
   return (
-    <form noValidate onSubmit={(event) => void handleSignIn(event)} className="grid gap-4.5">
+    <form noValidate onSubmit={handleSubmit} className="grid gap-4.5">
       <Field
         label="Email"
         type="email"
+        name="email"
         autoComplete="username"
-        {...register('email')}
-        error={formState.errors.email?.message}
+        value={values.email}
+        onChange={(event) => setValues({ ...values, email: event.currentTarget.value })}
+        error={complaintAbout('email')}
       />
       <Field
+        ref={password}
         label="Password"
         type="password"
+        name="password"
         autoComplete="current-password"
-        {...register('password')}
-        error={formState.errors.password?.message}
+        value={values.password}
+        onChange={(event) => setValues({ ...values, password: event.currentTarget.value })}
+        error={complaintAbout('password')}
       />
       <Problem error={signIn.error} />
       <Button type="submit" look="go" size="big" disabled={signIn.isPending} className="mt-1.5 w-full">
