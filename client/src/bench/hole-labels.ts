@@ -37,7 +37,7 @@ function labelOf(hole: ToneHole, next: (kind: string) => number): { label: strin
   const count = next(lettered?.letter ?? 'finger');
   const own = hole.name.length <= SHORT_NAME ? hole.name : '';
   if (lettered !== undefined) {
-    const which = own === '' && count > 1 ? String(count) : own;
+    const which = own === '' && count > 1 ? String(count) : own.replace(lettered.letter, '');
     return {
       label: own === '' ? `${lettered.letter}${which}` : own,
       title: `${lettered.title} ${which}`.trim(),
@@ -45,4 +45,9 @@ function labelOf(hole: ToneHole, next: (kind: string) => number): { label: strin
   }
   const label = own === '' ? String(count) : own;
   return { label, title: `Hole ${hole.name === '' ? label : hole.name}` };
+}
+
+/** A title inside a sentence: "hole 4", "thumb hole"; a maker's own name keeps its letters. */
+export function titleInSentence(title: string): string {
+  return title.charAt(0).toLowerCase() + title.slice(1);
 }

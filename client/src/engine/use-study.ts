@@ -43,9 +43,12 @@ export function useStudy<Kind extends StudyKind>(
         kind: Kind,
         ask: Studies[Kind]['ask'],
       ) => Promise<Studies[Kind]['answer'] | null>;
-      study(kind, ask).then((answer) => {
-        if (isWanted) setAnswered({ ask, answer });
-      }, reportError);
+      study(kind, ask).then(
+        (answer) => {
+          if (isWanted) setAnswered({ ask, answer });
+        },
+        (error: unknown) => reportError(error),
+      );
     }, ASK_AFTER_MS);
     return () => {
       isWanted = false;

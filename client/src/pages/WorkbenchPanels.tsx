@@ -104,6 +104,7 @@ function HolesPanel({ bench, chart, suggestion, isDragging }: HolesPanelProps) {
       <div className="col-start-1 row-start-1 min-w-0">
         <HangZone bench={bench}>
           {chart}
+          <RegisterChoice {...bench} />
           <div data-zone="table" tabIndex={-1} className="mt-2">
             <HoleTable
               {...{ document, geometry, sensitivities, unit, selection, readOnly }}
@@ -112,7 +113,6 @@ function HolesPanel({ bench, chart, suggestion, isDragging }: HolesPanelProps) {
             />
           </div>
         </HangZone>
-        <RegisterChoice {...bench} />
         <div style={{ paddingLeft: Math.max(16, geometry.hangLeft - 112), paddingRight: 16 }}>
           <NoticeList prediction={prediction} isDragging={isDragging} />
         </div>

@@ -1,6 +1,6 @@
 // @vitest-environment jsdom
 import { cleanup, render, screen } from '@testing-library/react';
-import userEvent from '@testing-library/user-event';
+import { userEvent } from '@testing-library/user-event';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { whistleDocument } from '../../../../tests/support/whistle-document.ts';
@@ -27,6 +27,7 @@ function show() {
   return onSettle;
 }
 
+const user = userEvent.setup({ delay: null });
 afterEach(cleanup);
 
 describe('two drafts of one design', () => {
@@ -52,10 +53,8 @@ describe('two drafts of one design', () => {
     ).toHaveProperty('checked', true);
     const use = screen.getByRole('button', { name: 'Use what is chosen' });
     expect(use).toHaveProperty('disabled', true);
-    await userEvent.click(
-      screen.getByRole('radio', { name: 'Hole 4 diameter: that of Bryn Askell, 6.8 mm' }),
-    );
-    await userEvent.click(use);
+    await user.click(screen.getByRole('radio', { name: 'Hole 4 diameter: that of Bryn Askell, 6.8 mm' }));
+    await user.click(use);
     expect(onSettle).toHaveBeenCalledWith(
       withHoles({ h1: 6.8, h2: 8.2, h4: 6.8 }),
       'Merged with the draft of Bryn Askell',
@@ -67,7 +66,7 @@ describe('two drafts of one design', () => {
     ['Take all of theirs', theirs],
   ])('%s', async (name, document) => {
     const onSettle = show();
-    await userEvent.click(screen.getByRole('button', { name }));
+    await user.click(screen.getByRole('button', { name }));
     expect(onSettle.mock.calls[0]?.[0]).toEqual(document);
   });
 });

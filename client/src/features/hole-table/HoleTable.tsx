@@ -1,6 +1,6 @@
 import { memo, useMemo, useState } from 'react';
 import { printLength } from '#shared/lengths/print-length.ts';
-import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
+import { titleInSentence, labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';
@@ -41,7 +41,7 @@ export const HoleTable = memo(function HoleTable(props: HoleTableProps) {
     if (labelled === undefined || row?.editable === undefined) return;
     const { edit } = row.editable(labelled);
     onEdit({
-      label: `${row.label} of ${labelled.title.toLowerCase()}`,
+      label: `${row.label} of ${titleInSentence(labelled.title)}`,
       change: (before) => edit(before, value),
     });
   });

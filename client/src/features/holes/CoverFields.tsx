@@ -1,3 +1,4 @@
+import { titleInSentence } from '../../bench/hole-labels.ts';
 import { memo, useId } from 'react';
 import { COVERS, type ToneHole } from '#shared/document/design-document.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';
@@ -35,7 +36,7 @@ export const CoverFields = memo(function CoverFields(props: CoverFieldsProps) {
           const cover = COVERS.find((each) => each === event.currentTarget.value);
           if (cover === undefined) return;
           onEdit({
-            label: `Cover of ${title.toLowerCase()}`,
+            label: `Cover of ${titleInSentence(title)}`,
             change: (before) => withCover(before, holeId, cover),
           });
         }}
@@ -54,7 +55,7 @@ export const CoverFields = memo(function CoverFields(props: CoverFieldsProps) {
         onChange={(event) => {
           const hand = event.currentTarget.value === 'right' ? 'right' : 'left';
           onEdit({
-            label: `Hand of ${title.toLowerCase()}`,
+            label: `Hand of ${titleInSentence(title)}`,
             change: (before) => changeHole(before, holeId, { hand }),
           });
         }}

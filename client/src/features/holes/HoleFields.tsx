@@ -2,24 +2,16 @@ import type { ToneHole } from '#shared/document/design-document.ts';
 import { chimneyMm, fromFootMm } from '#shared/document/profile.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { removeHole, widestHoleMm } from '../../bench/hole-edits.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import { titleInSentence } from '../../bench/hole-labels.ts';
 import { centsPerStep, SENSITIVITY_STEP } from '../../bench/hole-sensitivity.ts';
-import type { PanelProps } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import { Button } from '../../ui/Button.tsx';
 import { CoverFields } from './CoverFields.tsx';
 import { DrillRow } from './DrillRow.tsx';
+import type { HoleFieldsProps } from './hole-fields-props.ts';
 import { HoleSuggestion } from './HoleSuggestion.tsx';
 import { footRange, SIZE_WORDS, withSize, type HoleSize } from './inspector-fields.ts';
 import { SizeField } from './SizeField.tsx';
-import type { SuggestionDesk } from './use-suggestion-desk.ts';
-
-export interface HoleFieldsProps extends PanelProps {
-  chosen: LabelledHole;
-  /** The fingering whose cents stand beside the sizes. */
-  leading: string | undefined;
-  suggestion: SuggestionDesk;
-}
 
 /** Steppers for every size of a hole, the drills, what covers it, and the suggestion. */
 export function HoleFields({ chosen, leading, suggestion, ...props }: HoleFieldsProps) {
@@ -30,7 +22,7 @@ export function HoleFields({ chosen, leading, suggestion, ...props }: HoleFields
   const widestMm = widestHoleMm(document, hole.positionMm);
   const resize = useStable((size: HoleSize, value: number | null) =>
     onEdit({
-      label: `${SIZE_WORDS[size]} of ${title.toLowerCase()}`,
+      label: `${SIZE_WORDS[size]} of ${titleInSentence(title)}`,
       change: (before) => withSize(before, hole.id, size, value),
     }),
   );
@@ -91,7 +83,7 @@ export function HoleFields({ chosen, leading, suggestion, ...props }: HoleFields
           className="-ml-3"
           onClick={() => {
             onEdit({
-              label: `Take away ${title.toLowerCase()}`,
+              label: `Take away ${titleInSentence(title)}`,
               change: (before) => removeHole(before, hole.id),
             });
             onSelect({ hole: null });

@@ -1,3 +1,4 @@
+import { titleInSentence } from '../../bench/hole-labels.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
@@ -92,7 +93,7 @@ function EffectWords({ suggestion, ...props }: SuggestionWordsProps & { suggesti
 }
 
 function sentence({ kind, mm }: Suggestion, { holeTitle, presentMm, unit, mouthWord }: SuggestionWordsProps) {
-  const hole = holeTitle.toLowerCase();
+  const hole = titleInSentence(holeTitle);
   if (kind === 'move') {
     const way = mm > 0 ? 'footward' : `toward the ${mouthWord}`;
     return `Move ${hole} ${printLength(Math.abs(mm), unit)} ${unit} ${way}`;

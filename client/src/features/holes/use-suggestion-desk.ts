@@ -1,6 +1,6 @@
 import { useMemo, useState } from 'react';
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { titleInSentence, labelledHoles } from '../../bench/hole-labels.ts';
 import { leadingNote } from '../../bench/hole-sensitivity.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
@@ -46,7 +46,7 @@ export function useSuggestionDesk(props: PanelProps, isDragging: boolean): Sugge
       tried !== null && (tried.after === null || tried.after === document) && tried.before !== document,
     tryOut: (suggestion) => {
       const after = suggestion.change(document);
-      onEdit({ label: `Try ${titleOf(suggestion.hole).toLowerCase()}`, change: () => after });
+      onEdit({ label: `Try ${titleInSentence(titleOf(suggestion.hole))}`, change: () => after });
       setTried({ before: document, after });
     },
     putBack: () => {

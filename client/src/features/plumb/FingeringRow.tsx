@@ -20,6 +20,8 @@ export function FingeringRow({ geometry, holes, fingering, chosenKey }: Fingerin
   const hasCircles = fingering !== null && beamY > 40;
   const radius = measures.spacing > 75 ? 10 : 9;
   const lanes = leaderLanes(columns, geometry.hangLeft);
+  // Where some leaders run along the strip, all circles stand over their columns, or they would run together.
+  const isOverColumns = lanes.some((lane) => lane !== null);
   return columns.map((column, index) => {
     const { key } = column;
     const lane = lanes[index] ?? null;
@@ -30,13 +32,15 @@ export function FingeringRow({ geometry, holes, fingering, chosenKey }: Fingerin
       <g key={key}>
         <path
           d={
-            lane === null ? slanted(column, start, beamY) : inLane(column, lane, { start, beamY, hasCircle })
+            isOverColumns
+              ? overColumn(column, lane, { start, beamY, hasCircle })
+              : slanted(column, start, beamY)
           }
           className={classNames('bench-leader', key === chosenKey && 'is-chosen')}
         />
         {hasCircle && (
           <FingeringCircle
-            x={lane === null ? column.holeX : column.x}
+            x={isOverColumns ? column.x : column.holeX}
             y={fingeringY}
             radius={radius}
             mark={holeMark(fingering, hole)}
@@ -56,8 +60,12 @@ interface LaneEnds {
   hasCircle: boolean;
 }
 
-/** Along the strip to the column, then down; a circle on the way is left out. */
-function inLane({ holeX, x }: BenchColumn, lane: number, { start, beamY, hasCircle }: LaneEnds): string {
-  const across = `M${holeX} 0V${lane}H${x}`;
+/** Along the strip, or slanting at once, to the column, then down; a circle on the way is left out. */
+function overColumn(
+  { holeX, x }: BenchColumn,
+  lane: number | null,
+  { start, beamY, hasCircle }: LaneEnds,
+): string {
+  const across = lane === null ? `M${holeX} 0L${x} 11` : `M${holeX} 0V${lane}H${x}`;
   return hasCircle ? `${across}M${x} ${start}V${beamY}` : `${across}V${beamY}`;
 }

@@ -45,15 +45,17 @@ export const BodyDrawing = memo(function BodyDrawing({ frame, shape, unit }: Bod
       {frame.headHidden && <BrokenHead frame={frame} />}
       {measures.hasSection && <BoreFigures frame={frame} shape={shape} unit={unit} />}
       <StretchNote frame={frame} />
-      <SteelRule
-        zeroX={footX}
-        leftX={Math.max(frame.x(body.headMm), frame.headHidden ? frame.viewLeft : -Infinity)}
-        y={measures.ruleY}
-        height={measures.ruleHeight}
-        pxPerMm={frame.pxPerMm}
-        unit={unit}
-        seen={[frame.viewLeft - 1, frame.viewRight + 1]}
-      />
+      <g clipPath="url(#bench-view)">
+        <SteelRule
+          zeroX={footX}
+          leftX={Math.max(frame.x(body.headMm), frame.headHidden ? frame.viewLeft : -Infinity)}
+          y={measures.ruleY}
+          height={measures.ruleHeight}
+          pxPerMm={frame.pxPerMm}
+          unit={unit}
+          seen={[frame.viewLeft - 1, frame.viewRight + 1]}
+        />
+      </g>
     </>
   );
 });

@@ -29,7 +29,7 @@ interface InstrumentStripProps extends PanelProps {
 
 /** The instrument across the top of the bench, to scale: plan, section and rule, its holes in hand. */
 export function InstrumentStrip(props: InstrumentStripProps) {
-  const { document, geometry, unit, selection, readOnly, onEdit, desk, placing } = props;
+  const { document, geometry, unit, selection, readOnly, onSelect, onEdit, desk, placing } = props;
   const { frame } = geometry;
   const strip = useRef<HTMLDivElement>(null);
   const { bore, outside, mouthEnd, foot } = document;
@@ -37,8 +37,11 @@ export function InstrumentStrip(props: InstrumentStripProps) {
   const holes = useMemo(() => labelledHoles(document), [document]);
   const canEdit = readOnly === null;
   const placeHole = (positionMm: number) => {
-    onEdit({ label: 'Add a hole', change: (before) => addHole(before, positionMm, usualDiameter(props)) });
+    const place = (before: PanelProps['document']) => addHole(before, positionMm, usualDiameter(props));
+    const added = place(document).holes.find(({ id }) => !document.holes.some((hole) => hole.id === id));
+    onEdit({ label: 'Add a hole', change: place });
     placing.moveSpot(null);
+    if (added !== undefined) onSelect({ hole: added.id, fingering: selection.fingering });
   };
   const touchAt = (x: number) => {
     const positionMm = snapPosition(document, frame.mm(x));

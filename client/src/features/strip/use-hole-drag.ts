@@ -5,7 +5,7 @@ import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import type { BenchFrame } from '../../bench/bench-geometry.ts';
 import { snapToDrill } from '../../bench/drill-choice.ts';
 import { changeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import { titleInSentence, type LabelledHole } from '../../bench/hole-labels.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import type { HoleHandlers } from './HoleButton.tsx';
@@ -127,7 +127,7 @@ function moved(drag: Drag, x: number, { document, frame }: HoleDragOptions): Des
   if (present === undefined || present.positionMm === positionMm) return null;
   if (runsIntoAnother(document, { ...present, positionMm })) return null;
   return {
-    label: `Move ${drag.title.toLowerCase()}`,
+    label: `Move ${titleInSentence(drag.title)}`,
     change: (before) => changeHole(before, drag.hole.id, { positionMm }),
     mergeKey: drag.mergeKey,
   };
@@ -142,7 +142,7 @@ function resized(drag: Drag, at: StripPoint, { document, frame, unit }: HoleDrag
   if (present.diameterMm === diameterMm) return null;
   if (diameterMm > present.diameterMm && runsIntoAnother(document, { ...present, diameterMm })) return null;
   return {
-    label: `Drill size of ${drag.title.toLowerCase()}`,
+    label: `Drill size of ${titleInSentence(drag.title)}`,
     change: (before) => changeHole(before, drag.hole.id, { diameterMm }),
     mergeKey: drag.mergeKey,
   };

@@ -38,7 +38,7 @@ export function DesignHeader({
     <>
       <TopBarFill>
         <div className="flex min-w-0 items-baseline gap-x-3.5 max-[699px]:flex-col">
-          <p className="text-title max-[699px]:text-section truncate font-semibold">{name}</p>
+          <h1 className="text-title max-[699px]:text-section truncate font-semibold">{name}</h1>
           <StateTag state={state}>{`rev ${revision}`}</StateTag>
         </div>
         <span className="text-data ml-auto shrink-0 max-[699px]:hidden">{saveNote}</span>

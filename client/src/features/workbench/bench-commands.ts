@@ -2,7 +2,7 @@ import type { DesignDocument, ToneHole } from '#shared/document/design-document.
 import { nearestDrills } from '#shared/lengths/drills.ts';
 import { drillsFor } from '../../bench/drill-choice.ts';
 import { changeHole, removeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { titleInSentence, labelledHoles } from '../../bench/hole-labels.ts';
 import { SENSITIVITY_STEP } from '../../bench/hole-sensitivity.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import type { BenchCommands } from './use-bench-keys.ts';
@@ -56,7 +56,7 @@ function holeCommands(props: PanelProps): Pick<Commands, 'nudge' | 'changeDrill'
     return { nudge: nothing, changeDrill: nothing, removeHole: nothing };
   }
   const { hole } = chosen;
-  const title = chosen.title.toLowerCase();
+  const title = titleInSentence(chosen.title);
   return {
     nudge: (steps) =>
       onEdit({
