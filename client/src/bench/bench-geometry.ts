@@ -44,6 +44,8 @@ export interface BenchGeometry extends BenchFrame {
   labelRight: number;
   hangLeft: number;
   hangRight: number;
+  /** Holes left of this stand over row labels or the left zone: their leaders run along the strip. */
+  lanesLeft: number;
   /** True when the columns leave room for the ladder beside the inspector. */
   ladderFits: boolean;
 }
@@ -99,10 +101,14 @@ export function benchGeometry(document: DesignDocument, frame: BenchFrame): Benc
     columnSpacing: leastGap(columns, measures.spacing),
     labelRight: firstX - measures.labelGap,
     hangLeft: firstX - measures.columnReach,
+    lanesLeft: Math.min(firstX - measures.columnReach, firstX - measures.labelGap + LABEL_CLEARANCE_PX),
     hangRight,
     ladderFits,
   };
 }
+
+/** From the row labels to the edge of a fingering circle's place, px. */
+const LABEL_CLEARANCE_PX = 16;
 
 interface ColumnRoom {
   left: number;

@@ -1,4 +1,4 @@
-import { DatabaseError, ConnectionError } from 'sequelize';
+import { BaseError, DatabaseError, ConnectionError } from 'sequelize';
 import type { ErrorRequestHandler } from 'express';
 import type { Logger } from 'pino';
 import { HttpError, badRequest } from './http-error.ts';
@@ -12,7 +12,7 @@ export function errorHandler(log: Logger): ErrorRequestHandler {
     const requestId = requestIdOf(res);
     const answer = meaning(error);
     if (answer.status >= 500)
-      log.error({ err: error, requestId, method: req.method, url: req.path }, 'failed');
+      log.error({ err: loggable(error), requestId, method: req.method, url: req.path }, 'failed');
     if (res.headersSent) {
       // A stream broke midway: an ended connection is the only way left to say so.
       next(error);
@@ -21,6 +21,12 @@ export function errorHandler(log: Logger): ErrorRequestHandler {
     sendProblem(res, answer, requestId);
     cutOffUnread(req);
   };
+}
+
+/** A database error carries its statement and every value in it, documents and password hashes too: none of that is logged. */
+function loggable(error: unknown): unknown {
+  if (!(error instanceof BaseError)) return error;
+  return { type: error.name, message: error.message, stack: error.stack };
 }
 
 function meaning(error: unknown): HttpError {

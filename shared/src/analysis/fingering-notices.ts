@@ -56,7 +56,7 @@ function speechNotices(facts: FingeringFacts): Notice[] {
   if (stronger !== null) {
     notices.push({
       code: 'register-slips',
-      message: `Rung ${playing.order} is weaker than rung ${stronger.order} at ${stronger.frequency.toFixed(0)} Hz. The note would not hold and slips there; a vent that weakens rung ${stronger.order} would keep it.`,
+      message: `Rung ${playing.order} is much weaker than rung ${stronger.order} at ${stronger.frequency.toFixed(0)} Hz. It may need firmer blowing, or slip there; a vent that weakens rung ${stronger.order} helps it to speak.`,
     });
   }
   return notices;
