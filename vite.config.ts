@@ -25,6 +25,7 @@ export default defineConfig({
       {
         test: {
           name: 'unit',
+          testTimeout: 30_000,
           root: here('.'),
           include: [
             'shared/src/**/*.test.ts',
