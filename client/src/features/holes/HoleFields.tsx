@@ -29,8 +29,10 @@ export function HoleFields({ chosen, leading, suggestion, ...props }: HoleFields
   const chooseDrill = useStable((diameterMm: number) => resize('diameterMm', diameterMm));
   const size = { unit, isWide, disabled, onResize: resize };
   const beside = (dimension: HoleSize) => centsFigure({ chosen, leading, ...props }, dimension);
+  const isStanding = props.geometry.layout === 'standing';
   return (
-    <div>
+    // The drawer of a standing tablet is wide and low: sizes stand in two columns there.
+    <div className={isStanding ? 'grid grid-cols-2 items-start gap-x-6' : undefined}>
       {isWide && (
         <p className="text-small text-ink3 pb-1 text-right">cents per {SENSITIVITY_STEP[unit].label}</p>
       )}

@@ -19,7 +19,7 @@ export function FingeringRow({ geometry, holes, fingering, chosenKey }: Fingerin
   const { fingeringY, beamY } = measures;
   const hasCircles = fingering !== null && beamY > 40;
   const radius = measures.spacing > 75 ? 10 : 9;
-  const lanes = leaderLanes(columns, geometry.hangLeft);
+  const lanes = leaderLanes(columns, geometry.lanesLeft);
   // Where some leaders run along the strip, all circles stand over their columns, or they would run together.
   const isOverColumns = lanes.some((lane) => lane !== null);
   return columns.map((column, index) => {

@@ -12,7 +12,7 @@ export function ColumnTint({ geometry, chosen }: ColumnTintProps) {
   if (column === undefined) return null;
   const half = geometry.measures.columnReach - 3;
   const { beamY } = geometry.measures;
-  const lanes = leaderLanes(geometry.columns, geometry.hangLeft);
+  const lanes = leaderLanes(geometry.columns, geometry.lanesLeft);
   const isInLane = lanes[geometry.columns.indexOf(column)] !== null;
   const { x } = column;
   // Where the leader runs along the strip, the column is lit by itself.
