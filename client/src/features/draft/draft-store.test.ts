@@ -121,6 +121,25 @@ describe('an open draft', () => {
     expect(opened(store).history.past).toHaveLength(2);
   });
 
+  it('makes one step of a drag in which the hand rested, and a new one of the next drag', async () => {
+    const store = openWindow();
+    await store.open();
+    const drag = (name: string) => store.edit({ ...rename(name), mergeKey: 'name' });
+    store.holdRun();
+    drag('a');
+    await settleDown();
+    drag('ab');
+    store.releaseRun();
+    expect(opened(store).history.past).toHaveLength(1);
+    await settleDown();
+    store.holdRun();
+    drag('abc');
+    expect(opened(store).history.past).toHaveLength(2);
+    store.undo();
+    store.undo();
+    expect(nameIn(store)).toBe('stored');
+  });
+
   it('comes back after a reload with its undo steps', async () => {
     const before = openWindow();
     await before.open();

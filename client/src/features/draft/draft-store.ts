@@ -49,6 +49,7 @@ export class DraftStore {
   private keptOnDevice = true;
   private sealTimer: ReturnType<typeof setTimeout> | undefined;
   private copyTimer: ReturnType<typeof setTimeout> | undefined;
+  private runIsHeld = false;
   private closed = false;
 
   constructor(private readonly deps: DraftStoreDeps) {
@@ -76,11 +77,19 @@ export class DraftStore {
   edit = (edit: DesignEdit): void => {
     if (this.history === null || this.isInConflict()) return;
     this.become(withEdit(this.history, edit));
-    clearTimeout(this.sealTimer);
-    this.sealTimer = setTimeout(() => {
-      if (this.history !== null) this.history = sealed(this.history);
-    }, SEAL_AFTER_MS);
+    this.sealAfterPause();
   };
+
+  /** While a pointer is down a run goes on, however long the hand rests: one drag is one step. */
+  holdRun(): void {
+    this.runIsHeld = true;
+    clearTimeout(this.sealTimer);
+  }
+
+  releaseRun(): void {
+    this.runIsHeld = false;
+    this.sealAfterPause();
+  }
 
   undo = (): void => {
     if (this.history !== null && !this.isInConflict()) this.become(undone(this.history));
@@ -142,6 +151,14 @@ export class DraftStore {
     clearTimeout(this.copyTimer);
     this.saver?.close();
     this.predictor.close();
+  }
+
+  private sealAfterPause(): void {
+    clearTimeout(this.sealTimer);
+    if (this.runIsHeld || this.closed) return;
+    this.sealTimer = setTimeout(() => {
+      if (this.history !== null) this.history = sealed(this.history);
+    }, SEAL_AFTER_MS);
   }
 
   private isInConflict(): boolean {

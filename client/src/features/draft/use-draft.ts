@@ -124,6 +124,10 @@ function watchPage(store: DraftStore): () => void {
   const watch = new AbortController();
   const { signal } = watch;
   window.addEventListener('online', () => void store.lineBack(), { signal });
+  // Captured, so that no handler on the way can keep the end of a drag from the store.
+  window.addEventListener('pointerdown', () => store.holdRun(), { signal, capture: true });
+  window.addEventListener('pointerup', () => store.releaseRun(), { signal, capture: true });
+  window.addEventListener('pointercancel', () => store.releaseRun(), { signal, capture: true });
   window.addEventListener('pagehide', () => store.leave(), { signal });
   document.addEventListener(
     'visibilitychange',
