@@ -18,7 +18,21 @@ interface SessionExpiredDialogProps {
 export function SessionExpiredDialog({ onGiveUp }: SessionExpiredDialogProps) {
   const { person, workshop } = useSession();
   const [answer, setAnswer] = useState<{ give: Answer } | null>(null);
-  useEffect(() => onSessionExpired(() => new Promise((give) => setAnswer({ give }))), []);
+  useEffect(() => {
+    let waiting: Answer | null = null;
+    const stopAsking = onSessionExpired(
+      () =>
+        new Promise((give) => {
+          waiting = give;
+          setAnswer({ give });
+        }),
+    );
+    return () => {
+      stopAsking();
+      // Whoever waits must not wait for a dialog that is gone.
+      waiting?.('given-up');
+    };
+  }, []);
 
   const handleAnswer: Answer = (given) => {
     answer?.give(given);
