@@ -32,7 +32,7 @@ export function TodayPage() {
       {drafts.length === 0 ? <NothingWaits /> : <OnTheBench drafts={drafts} />}
       {found.total > drafts.length && (
         <p className="mt-4">
-          <Link to={`${paths.designs()}?mine=true`} className="text-link">
+          <Link to={`${paths.designs()}?mine=true`} className="text-link target inline-flex items-center">
             Show all {found.total} of mine
           </Link>
         </p>

@@ -30,7 +30,7 @@ export function PersonMenu({ personName, workshopName, isSigningOut, onSignOut, 
     <>
       <Link
         to={paths.workshopPath}
-        className="text-ink2 hover:text-ink max-tablet:hidden max-w-60 truncate no-underline hover:underline"
+        className="text-ink2 hover:text-ink target max-tablet:hidden max-w-60 content-center truncate no-underline hover:underline"
       >
         {workshopName}
       </Link>

@@ -33,7 +33,7 @@ export function Segment<Value extends string>({
           disabled={disabled}
           onClick={() => onChange(option.value)}
           className={classNames(
-            'px-3 first:rounded-l-[3px] last:rounded-r-[3px] max-[1100px]:min-h-12 pointer-coarse:min-h-12',
+            'min-w-12 px-3 first:rounded-l-[3px] last:rounded-r-[3px] max-[1100px]:min-h-12 pointer-coarse:min-h-12',
             'not-first:border-line not-first:border-l focus-visible:relative',
             size === 'small' ? 'min-h-6' : 'min-h-10',
             option.value === value ? 'bg-ink text-paper font-semibold' : 'text-ink2 hover:text-ink',

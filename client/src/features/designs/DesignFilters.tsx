@@ -72,7 +72,7 @@ function Filter({ list, change, isOn, label, count }: FilterProps) {
       <Link
         to={{ search: writeListAddress(changeList(list, change)).toString() }}
         aria-current={isOn ? 'true' : undefined}
-        className="target flex items-center text-[14.5px] no-underline"
+        className="target flex min-w-11 items-center text-[14.5px] no-underline"
       >
         <span
           className={classNames(

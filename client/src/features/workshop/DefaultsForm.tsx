@@ -59,7 +59,7 @@ export function DefaultsForm({ workshop }: { workshop: Workshop }) {
       </div>
       <fieldset className="m-0 border-0 p-0">
         <legend className="mb-1 font-semibold">In tune within</legend>
-        <div className="tablet:grid-cols-3 grid gap-4">
+        <div className="desk:grid-cols-3 grid gap-4">
           {(['Register 1', 'Register 2', 'Register 3 and up'] as const).map((label, index) => (
             <Figure
               key={label}
