@@ -44,24 +44,26 @@ export function HoleFields({ chosen, leading, suggestion, ...props }: HoleFields
         {...footRange(document)}
         cents={beside('positionMm')}
       />
-      <SizeField
-        {...size}
-        size="diameterMm"
-        label="Diameter"
-        value={hole.diameterMm}
-        min={0.5}
-        max={widestMm}
-        cents={beside('diameterMm')}
-      />
-      <DrillRow
-        diameterMm={hole.diameterMm}
-        widestMm={widestMm}
-        unit={unit}
-        suggestedMm={suggestion.suggestions?.find(({ kind }) => kind === 'drill')?.mm ?? null}
-        disabled={disabled}
-        count={isWide ? 6 : 5}
-        onChoose={chooseDrill}
-      />
+      <div>
+        <SizeField
+          {...size}
+          size="diameterMm"
+          label="Diameter"
+          value={hole.diameterMm}
+          min={0.5}
+          max={widestMm}
+          cents={beside('diameterMm')}
+        />
+        <DrillRow
+          diameterMm={hole.diameterMm}
+          widestMm={widestMm}
+          unit={unit}
+          suggestedMm={suggestion.suggestions?.find(({ kind }) => kind === 'drill')?.mm ?? null}
+          disabled={disabled}
+          count={isWide ? 6 : 5}
+          onChoose={chooseDrill}
+        />
+      </div>
       <WallFields
         size={size}
         hole={hole}
