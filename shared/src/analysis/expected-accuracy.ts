@@ -18,14 +18,14 @@ const PAD_CENTS = 3;
 /** Real walls, finger pads and edges, which nothing here was held against, cents; common practice. */
 const LOSSES_CENTS = 1;
 
-/** What a mouth end adds before it is calibrated on a measured set of notes, and after, cents. */
-const MOUTH_ENDS: Record<MouthEndKind, { before: number; after: number }> = {
-  'ideal-open': { before: 0, after: 0 },
-  'ideal-closed': { before: 0, after: 0 },
-  window: { before: 8, after: 1 },
-  embouchure: { before: 20, after: 2 },
-  rim: { before: 25, after: 3 },
-  reed: { before: 30, after: 5 },
+/** What a mouth end adds before it is calibrated on a measured set of notes, cents; common practice. */
+const UNCALIBRATED_MOUTH_ENDS: Record<MouthEndKind, number> = {
+  'ideal-open': 0,
+  'ideal-closed': 0,
+  window: 8,
+  embouchure: 20,
+  rim: 25,
+  reed: 30,
 };
 
 export interface AccuracyQuestion {
@@ -39,8 +39,8 @@ export interface AccuracyQuestion {
 /** What a note's figure rests on, and how far each part may be off, ± cents. */
 export function accuracyParts(question: AccuracyQuestion): AccuracyPart[] {
   const { document, design, states, register, unusualUndercuts } = question;
-  const calibrated = document.mouthEnd.correctionScale !== 1;
-  const mouth = MOUTH_ENDS[document.mouthEnd.kind][calibrated ? 'after' : 'before'];
+  // A correction scale that was typed is no calibration: only a measured set of notes would narrow this.
+  const mouth = UNCALIBRATED_MOUTH_ENDS[document.mouthEnd.kind];
   const undercuts = design.holes.filter((hole) => hole.undercut !== null);
   const undercut = undercuts.some((hole) => unusualUndercuts.has(hole.id))
     ? UNUSUAL_UNDERCUT_CENTS
@@ -54,7 +54,7 @@ export function accuracyParts(question: AccuracyQuestion): AccuracyPart[] {
       ? { part: 'half-covered', cents: HALF_COVERED_CENTS }
       : null,
     padOpen ? { part: 'pad', cents: PAD_CENTS } : null,
-    mouth > 0 ? { part: calibrated ? 'mouth-end-calibrated' : 'mouth-end', cents: mouth } : null,
+    mouth > 0 ? { part: 'mouth-end', cents: mouth } : null,
   ];
   return parts.filter((part) => part !== null);
 }

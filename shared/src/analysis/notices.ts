@@ -89,14 +89,12 @@ function mouthNotices(document: DesignDocument): Notice[] {
           ]
         : [];
     case 'reed':
-      return end.correctionScale !== 1
-        ? []
-        : [
-            mouthNotice(
-              'reed-uncalibrated',
-              'A reed moves every note by 10 to 50 cents. Calibrate it on one measured set of notes before trusting pitches; trust differences until then.',
-            ),
-          ];
+      return [
+        mouthNotice(
+          'reed-uncalibrated',
+          'A reed moves every note by 10 to 50 cents. Calibrate it on one measured set of notes before trusting pitches; trust differences until then.',
+        ),
+      ];
     case 'ideal-open':
     case 'ideal-closed':
       return [];

@@ -26,8 +26,7 @@ export interface LadderRung {
 
 /** One thing that a note's figure rests on, and how far it may be off, ± cents. */
 export interface AccuracyPart {
-  part:
-    'bore-and-holes' | 'losses' | 'undercut' | 'half-covered' | 'pad' | 'mouth-end' | 'mouth-end-calibrated';
+  part: 'bore-and-holes' | 'losses' | 'undercut' | 'half-covered' | 'pad' | 'mouth-end';
   cents: number;
 }
 
@@ -49,7 +48,7 @@ export interface FingeringPrediction {
   ventHole: string | null;
   /** Above this the open holes leak, Hz; null with no open holes. */
   cutoffHz: number | null;
-  /** Expected accuracy of this figure, ± cents: before calibration, or after it where the mouth end is calibrated. */
+  /** Expected accuracy of this figure before calibration, ± cents. */
   accuracyCents: number;
   /** What that is made of. */
   accuracy?: AccuracyPart[] | undefined;

@@ -32,15 +32,7 @@ const fingeringPredictionSchema = z.object({
   accuracy: z
     .array(
       z.object({
-        part: z.enum([
-          'bore-and-holes',
-          'losses',
-          'undercut',
-          'half-covered',
-          'pad',
-          'mouth-end',
-          'mouth-end-calibrated',
-        ]),
+        part: z.enum(['bore-and-holes', 'losses', 'undercut', 'half-covered', 'pad', 'mouth-end']),
         cents: z.number(),
       }),
     )
