@@ -42,7 +42,7 @@ describe('signing in', () => {
     const wrongPassword = await agent.post('/api/session').send({ email, password: `${password}!` });
     const unknownEmail = await agent.post('/api/session').send({ email: 'no@yard.example', password });
     const first = expectProblem(wrongPassword, 401, 'wrong-credentials');
-    expect(first.detail).toBe('Email and password do not match. Try again, or reset the password.');
+    expect(first.detail).toBe('Email and password do not match. Try again.');
     expect(expectProblem(unknownEmail, 401, 'wrong-credentials').detail).toBe(first.detail);
     expect(cookiesOf(unknownEmail.headers)).toEqual([]);
   });
@@ -56,7 +56,7 @@ describe('signing in', () => {
     expect(statuses.filter((status) => status === 401)).toHaveLength(5);
     expect(statuses.filter((status) => status === 429)).toHaveLength(3);
     const right = await agent.post('/api/session').send({ email, password });
-    expect(expectProblem(right, 429, 'too-many-tries').detail).toBe('Wait 5 minutes, or reset now.');
+    expect(expectProblem(right, 429, 'too-many-tries').detail).toBe('Wait 5 minutes, then try again.');
     expect(right.headers['retry-after']).toBe('300');
     await agent.post('/api/session').send({ email: other.email, password: other.password }).expect(200);
   });

@@ -13,7 +13,7 @@ const TRIES = { most: 5, waitMs: 5 * 60_000 };
 
 const wrongPair = () =>
   new HttpError(401, 'wrong-credentials', 'E-mail and password do not match', {
-    detail: 'Email and password do not match. Try again, or reset the password.',
+    detail: 'Email and password do not match. Try again.',
   });
 
 /** Never says whether the e-mail or the password was wrong, neither in words nor in time taken. */
@@ -26,7 +26,7 @@ export async function signIn(
   const key = `sign-in ${request.address} ${email}`;
   // Counted before the password is looked at, so that tries sent all at once count too.
   if ((await countTry(database, key, TRIES)) > TRIES.most) {
-    throw tooManyTries('Wait 5 minutes, or reset now.', TRIES.waitMs);
+    throw tooManyTries('Wait 5 minutes, then try again.', TRIES.waitMs);
   }
   const person = await database.models.Person.findOne({ where: { email } });
   if (!(await passwordMatches(request.password, person?.passwordHash, config.passwordRounds)))
