@@ -30,7 +30,7 @@ const whistle = (): DesignDocument =>
     fingerings: [{ id: 'f-d5', note: 'D5', register: 1, covered: ['h1', 'h2'] }],
   });
 
-const embouchure = (): DesignDocument['mouthEnd'] => ({
+const embouchure = (stopperMm = 16): DesignDocument['mouthEnd'] => ({
   kind: 'embouchure',
   lengthMm: 10.5,
   widthMm: 12.5,
@@ -38,7 +38,7 @@ const embouchure = (): DesignDocument['mouthEnd'] => ({
   undercut: null,
   lipCover: 0.35,
   lipAngleDeg: 90,
-  stopperMm: 16,
+  stopperMm,
   correctionScale: 1,
 });
 
@@ -156,6 +156,11 @@ describe('what is wrong is named by field, with what would do', () => {
       'an undercut deeper than the wall',
       (d) => void (d.holes[0]!.undercut = { innerDiameterMm: 8, depthMm: 3 }),
       'holes.0.undercut.depthMm: Hole 1 is undercut 3.0 deep in a wall of 2.4. Make it 2.4 or less.',
+    ],
+    [
+      'a stopper that stands in the embouchure hole',
+      (d) => void (d.mouthEnd = embouchure(5)),
+      'mouthEnd.stopperMm: The stopper stands in the embouchure hole. Set it 5.3 or more from the middle of the hole.',
     ],
     [
       'a pad without a height',

@@ -81,16 +81,29 @@ function mouthEndFaults(document: DesignDocument): DocumentFault[] {
       message: `The bore begins at the block face, ${mm(mouthEnd.lengthMm)} before the lip. Make its first position ${(-mouthEnd.lengthMm).toFixed(1)}.`,
     });
   }
-  if (mouthEnd.kind === 'embouchure' && mouthMm > 0) {
+  if (mouthEnd.kind !== 'window' && mouthEnd.kind !== 'embouchure' && Math.abs(mouthMm) > 0.05) {
+    faults.push({
+      path: ['bore', 'stations', 0, 'positionMm'],
+      message: 'The bore begins at 0 with this mouth end.',
+    });
+  }
+  return [...faults, ...embouchureFaults(document)];
+}
+
+function embouchureFaults(document: DesignDocument): DocumentFault[] {
+  const { mouthEnd } = document;
+  if (mouthEnd.kind !== 'embouchure') return [];
+  const faults: DocumentFault[] = [];
+  if (boreEnds(document).mouthMm > 0) {
     faults.push({
       path: ['bore', 'stations', 0, 'positionMm'],
       message: 'The bore begins after the embouchure hole. Make its first position 0 or less.',
     });
   }
-  if (mouthEnd.kind !== 'window' && mouthEnd.kind !== 'embouchure' && Math.abs(mouthMm) > 0.05) {
+  if (mouthEnd.stopperMm < mouthEnd.lengthMm / 2) {
     faults.push({
-      path: ['bore', 'stations', 0, 'positionMm'],
-      message: 'The bore begins at 0 with this mouth end.',
+      path: ['mouthEnd', 'stopperMm'],
+      message: `The stopper stands in the embouchure hole. Set it ${mm(mouthEnd.lengthMm / 2)} or more from the middle of the hole.`,
     });
   }
   return faults;
