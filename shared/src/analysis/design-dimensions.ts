@@ -1,4 +1,4 @@
-import type { Touched } from '../acoustics/response/adjoint.ts';
+import type { Touched } from '../acoustics/response/touched-parts.ts';
 import type { DesignDocument } from '../document/design-document.ts';
 import { boreEnds, chimneyMm } from '../document/profile.ts';
 

@@ -1,16 +1,16 @@
 import { impedanceChange, type Perturbation } from '../acoustics/response/adjoint.ts';
 import { columnStates, solveStates, type ColumnStates } from '../acoustics/response/column-states.ts';
 import {
-  tuneColumn,
+  tuneFingering,
   type FingeringBranches,
   type PreparedColumn,
 } from '../acoustics/response/prepared-column.ts';
-import { prepareColumn } from '../acoustics/response/prepared-column.ts';
+import { planTouched } from '../acoustics/response/touched-parts.ts';
 import type { DesignDocument } from '../document/design-document.ts';
 import { designDimensions, type Dimension } from './design-dimensions.ts';
 import { ENGINE } from './engine-version.ts';
 import { predictPrepared } from './predict-design.ts';
-import { prepareDesign } from './prepare-design.ts';
+import { prepareDesign, type PreparedDesign } from './prepare-design.ts';
 import type { DesignSensitivities } from './prediction.ts';
 import { toColumn } from './to-column.ts';
 
@@ -28,10 +28,10 @@ const CENTS_PER_NEPER = 1200 / Math.LN2;
  */
 export function designSensitivities(document: DesignDocument): DesignSensitivities {
   const { design, prepared, fingerings } = prepareDesign(document);
-  const prediction = predictPrepared(document, { design, prepared, fingerings }, {});
+  const prediction = predictPrepared(document, { design, prepared, fingerings }, { modes: 1 });
   const dimensions = designDimensions(document).map((dimension) => ({
     key: dimension.key,
-    perturbation: perturb(dimension),
+    perturbation: perturb(document, { design, prepared }, dimension),
   }));
   const states = columnStates(document.holes.length);
   return {
@@ -41,7 +41,7 @@ export function designSensitivities(document: DesignDocument): DesignSensitiviti
       if (frequencyHz === null || fingering === undefined) return { id, centsPerUnit: {} };
       const note: Note = { prepared, fingering, states, frequency: frequencyHz, slope: NaN };
       note.slope = reactanceSlope(note);
-      tuneColumn(prepared, frequencyHz, true);
+      tuneFingering(prepared, fingering, frequencyHz, true);
       solveStates(prepared, fingering, states);
       const centsPerUnit = Object.fromEntries(
         dimensions.map(({ key, perturbation }) => [key, centsPerUnitOf(note, perturbation)]),
@@ -60,16 +60,22 @@ interface Note {
   slope: number;
 }
 
-function perturb(dimension: Dimension): Perturbation {
+function perturb(
+  document: DesignDocument,
+  { design, prepared }: Pick<PreparedDesign, 'design' | 'prepared'>,
+  dimension: Dimension,
+): Perturbation {
   const step = DIMENSION_STEP * Math.max(Math.abs(dimension.value), 1);
   // A share of 0 cannot be less; then both steps go upwards.
   const low = dimension.value - step < 0 && dimension.value >= 0 ? dimension.value : dimension.value - step;
   const high = dimension.value + step;
-  const prepare = (value: number) => {
-    const { column, states } = toColumn(dimension.at(value));
-    return prepareColumn(column, states).prepared;
+  const plan = (value: number) => {
+    const changed = dimension.at(value);
+    const sameAir = changed.air === document.air;
+    const { column } = sameAir ? toColumn(changed, design.column.outside) : toColumn(changed);
+    return planTouched(prepared, column, dimension.touched);
   };
-  return { plus: prepare(high), minus: prepare(low), difference: high - low, touched: dimension.touched };
+  return { plus: plan(high), minus: plan(low), difference: high - low, touched: dimension.touched };
 }
 
 /** Imaginary part of the impedance, or of its inverse where maxima play: 0 at a resonance. */
@@ -80,7 +86,7 @@ function playing([re, im]: [number, number], maxima: boolean): number {
 function reactanceSlope({ prepared, fingering, states, frequency }: Note): number {
   const step = FREQUENCY_STEP * frequency;
   const at = (f: number) => {
-    tuneColumn(prepared, f, true);
+    tuneFingering(prepared, fingering, f, true);
     solveStates(prepared, fingering, states);
     return playing(states.impedance, prepared.playsMaxima);
   };
@@ -89,7 +95,7 @@ function reactanceSlope({ prepared, fingering, states, frequency }: Note): numbe
 
 function centsPerUnitOf(note: Note, perturbation: Perturbation): number {
   const { states, fingering, frequency, prepared, slope } = note;
-  const [dr, di] = impedanceChange(states, fingering, perturbation, frequency);
+  const [dr, di] = impedanceChange(prepared, fingering, states, perturbation);
   let change = di;
   if (prepared.playsMaxima) {
     // δ(1/Z) = −δZ/Z²

@@ -30,12 +30,16 @@ export interface DesignColumn {
 /**
  * The design in SI units, holes in order along the bore.
  *
+ * The air outside may be handed in where it is known already: its properties cost more than all the rest here.
+ *
  * Throws `EngineInputError` where the air is out of range.
  */
-export function toColumn(document: DesignDocument): DesignColumn {
+export function toColumn(
+  document: DesignDocument,
+  outside: Medium = mediumAt(document, document.air.temperatureC),
+): DesignColumn {
   const holes = [...document.holes].sort((a, b) => a.positionMm - b.positionMm);
   const { footMm } = boreEnds(document);
-  const outside = mediumAt(document, document.air.temperatureC);
   const column: Column = {
     bore: document.bore.stations.map((station) => ({
       position: station.positionMm * MM,

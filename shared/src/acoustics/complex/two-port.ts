@@ -13,7 +13,8 @@ export const TWO_PORT_CELLS = 8;
  * @returns nothing; the result is in the cells
  */
 export function writeIdentity(cells: Cells, at: number): void {
-  cells.fill(0, at, at + TWO_PORT_CELLS);
+  // A loop: for so few cells `fill` costs several times as much.
+  for (let i = 1; i < TWO_PORT_CELLS; i += 1) cells[at + i] = 0;
   cells[at] = 1;
   cells[at + 6] = 1;
 }

@@ -64,6 +64,8 @@ export function bafflingFactor(distance: number, turn: number): number {
 }
 
 const self = new Float64Array(2);
+/** Wavenumber·radius that `self` holds for: most pairs of one body share theirs. */
+let selfAt = NaN;
 
 /**
  * Coupling G of two openings in a round body through the air outside: the mutual impedance is j·k·ρc/(4π)·G.
@@ -83,7 +85,8 @@ export function mutualRadiation(wavenumber: number, pair: OpeningPair, out: Floa
   const v = wavenumber * radius * distance;
   // Held where the self-radiation is: a coupling stronger than the opening's own resistance would give out power.
   const q = Math.min(wavenumber * radius, LARGEST_BODY_WAVENUMBER);
-  selfRadiation(q, self, 0);
+  if (q !== selfAt) selfRadiation(q, self, 0);
+  selfAt = q;
   const ownRe = self[0] ?? NaN;
   const ownIm = (self[1] ?? NaN) + q;
   const half = Math.sin(v / 2);

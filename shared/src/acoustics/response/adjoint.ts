@@ -1,31 +1,14 @@
 import { cell, type Cells } from '../complex/cells.ts';
 import { TWO_PORT_CELLS } from '../complex/two-port.ts';
 import { STATE_CELLS, type ColumnStates } from './column-states.ts';
-import { tunePair } from './coupling.ts';
-import { tuneHoleBranch } from './hole-branch.ts';
-import { tuneMouthBranch } from './mouth-branch.ts';
-import {
-  tuneDucts,
-  tuneFoot,
-  tuneSegment,
-  type FingeringBranches,
-  type PreparedColumn,
-} from './prepared-column.ts';
+import { tunePair, type CoupledPair } from './coupling.ts';
+import type { FingeringBranches, PreparedColumn } from './prepared-column.ts';
+import { tuneTouched, type Touched, type TouchedParts } from './touched-parts.ts';
 
-/** Parts of a column that a dimension changes. */
-export interface Touched {
-  /** Segments, by their place. */
-  segments: number[];
-  /** Holes, by their place. */
-  holes: number[];
-  mouth: boolean;
-  foot: boolean;
-}
-
-/** A column with one dimension a little larger and a little smaller, laid out as the column itself. */
+/** What one dimension touches, with the dimension a little larger and a little smaller. */
 export interface Perturbation {
-  plus: PreparedColumn;
-  minus: PreparedColumn;
+  plus: TouchedParts;
+  minus: TouchedParts;
   /** The difference between them, in the dimension's own unit. */
   difference: number;
   touched: Touched;
@@ -38,73 +21,43 @@ export interface Perturbation {
  * for the openings' radiation it is uᵀ·δZ·u. Only the two-ports that the dimension touches are worked out anew, larger and
  * smaller; the column is not solved again.
  *
- * @param states - of the column, solved at the frequency
+ * @param prepared - the column, set to a frequency
  * @param fingering - its branches
+ * @param states - of the column, solved at the frequency
  * @param perturbation - the dimension
- * @param frequency - Hz
  * @returns real and imaginary part, Pa·s/m³ per unit of the dimension
  * @source Tellegen's theorem for reciprocal networks; S. W. Director and R. A. Rohrer, IEEE Trans. Circuit Theory 16
  *   (1969) 318
  */
 export function impedanceChange(
-  states: ColumnStates,
+  prepared: PreparedColumn,
   fingering: FingeringBranches,
+  states: ColumnStates,
   perturbation: Perturbation,
-  frequency: number,
 ): [re: number, im: number] {
   const { plus, minus, difference, touched } = perturbation;
-  tuneTouched(plus, fingering, touched, frequency);
-  tuneTouched(minus, fingering, touched, frequency);
+  tuneTouched(plus, fingering, touched, prepared.frequency);
+  tuneTouched(minus, fingering, touched, prepared.frequency);
   total.fill(0);
-  const change: Change = { plus, minus, states, fingering };
+  const change: Change = { prepared, plus, minus, states, fingering };
   for (const place of touched.segments) addSegment(change, place);
   for (const place of touched.holes) addHole(change, place);
   if (touched.mouth) addMouth(change);
   if (touched.foot) addFoot(change);
-  addCoupling(change, touched);
+  addCoupling(change);
   return [cell(total, 0) / difference, cell(total, 1) / difference];
 }
 
 interface Change {
-  plus: PreparedColumn;
-  minus: PreparedColumn;
+  prepared: PreparedColumn;
+  plus: TouchedParts;
+  minus: TouchedParts;
   states: ColumnStates;
   fingering: FingeringBranches;
 }
 
 const total = new Float64Array(2);
 const delta = new Float64Array(TWO_PORT_CELLS);
-
-function tuneTouched(
-  prepared: PreparedColumn,
-  fingering: FingeringBranches,
-  touched: Touched,
-  frequency: number,
-): void {
-  const { cells, plan, branches, segments, coupling } = prepared;
-  tuneDucts(prepared, frequency);
-  for (const place of touched.segments) {
-    const segment = segments[place];
-    if (segment !== undefined) tuneSegment(cells, segment);
-  }
-  for (const place of touched.holes) {
-    const branch = branches[fingering[place] ?? -1];
-    if (branch !== undefined) tuneHoleBranch(cells, branch, plan.outside);
-  }
-  if (touched.mouth) tuneMouthBranch(cells, prepared.mouth, plan.outside);
-  if (touched.foot) tuneFoot(prepared);
-  for (const pair of coupling.pairs) {
-    if (touches(touched, coupling.openings, pair)) tunePair(cells, coupling, plan.outside, pair);
-  }
-}
-
-function touches(touched: Touched, openings: number, pair: { first: number; second: number }): boolean {
-  const one = (opening: number) => {
-    if (opening === openings - 1) return touched.mouth;
-    return opening === openings - 2 ? touched.foot : touched.holes.includes(opening);
-  };
-  return one(pair.first) || one(pair.second);
-}
 
 // delta ← what a run of cells is in the larger column, less what it is in the smaller one.
 function setDelta(plus: Cells, from: number, minus: Cells, to: number): void {
@@ -149,7 +102,7 @@ function addTo(re: number, im: number): void {
 function addSegment({ plus, minus, states }: Change, place: number): void {
   const larger = plus.segments[place];
   const smaller = minus.segments[place];
-  if (larger === undefined || smaller === undefined) return;
+  if (!larger || !smaller) return;
   setDelta(plus.cells, larger.twoPort, minus.cells, smaller.twoPort);
   addTwoPort(states.segmentMouth, STATE_CELLS * place, states.segmentFoot, STATE_CELLS * place);
 }
@@ -157,7 +110,7 @@ function addSegment({ plus, minus, states }: Change, place: number): void {
 function addHole({ plus, minus, states, fingering }: Change, place: number): void {
   const larger = plus.branches[fingering[place] ?? -1];
   const smaller = minus.branches[fingering[place] ?? -1];
-  if (larger === undefined || smaller === undefined) return;
+  if (!larger || !smaller) return;
   const at = STATE_CELLS * place;
   const { axisAbove, axisBelow, segmentFoot, segmentMouth, inner, outer } = states;
   if (larger.shift === 0 && smaller.shift === 0) {
@@ -193,6 +146,7 @@ function addProduct(a: Float64Array, i: number, b: Float64Array, [fr, fi]: [numb
 }
 
 function addMouth({ plus, minus, states }: Change): void {
+  if (plus.mouth === null || minus.mouth === null) return;
   setDelta(plus.cells, plus.mouth.twoPort, minus.cells, minus.mouth.twoPort);
   addTwoPort(states.outlet, 0, states.segmentMouth, 0);
 }
@@ -209,31 +163,37 @@ function addFoot({ plus, minus, states, fingering }: Change): void {
 }
 
 // Twice u·δZ·u for each pair outside, v·δZ·v inside; the mouth's own flow outwards is −1.
-function addCoupling(change: Change, touched: Touched): void {
-  const { plus, minus, states, fingering } = change;
-  const { openings, outer, inner, pairs } = plus.coupling;
-  for (const pair of pairs) {
-    if (!touches(touched, openings, pair)) continue;
-    if (!sounds(change, pair.first) || !sounds(change, pair.second)) continue;
-    const place = pair.first * openings + pair.second;
-    const [zr, zi] = difference(plus.cells, outer + 2 * place, minus.cells, minus.coupling.outer + 2 * place);
-    addPair(outflow(states.outer, pair.first, fingering), outflow(states.outer, pair.second, fingering), [
-      2 * zr,
-      2 * zi,
-    ]);
-    const within = cell(plus.cells, inner + place) - cell(minus.cells, minus.coupling.inner + place);
-    if (within !== 0) {
-      addPair(outflow(states.inner, pair.first, fingering), outflow(states.inner, pair.second, fingering), [
-        0,
-        2 * within,
-      ]);
-    }
-  }
+function addCoupling(change: Change): void {
+  change.plus.coupling.pairs.forEach((larger, i) => {
+    const smaller = change.minus.coupling.pairs[i];
+    if (smaller === undefined || !sounds(change, larger.first) || !sounds(change, larger.second)) return;
+    tunePair(change.plus.cells, change.plus.coupling, change.plus.plan.outside, larger);
+    tunePair(change.minus.cells, change.minus.coupling, change.minus.plan.outside, smaller);
+    addCoupledPair(change, larger);
+  });
 }
 
-function sounds({ plus, fingering }: Change, opening: number): boolean {
+function addCoupledPair({ plus, minus, states, fingering }: Change, { first, second }: CoupledPair): void {
+  const place = first * plus.coupling.openings + second;
+  const [zr, zi] = difference(
+    plus.cells,
+    plus.coupling.outer + 2 * place,
+    minus.cells,
+    minus.coupling.outer + 2 * place,
+  );
+  addPair(outflow(states.outer, first, fingering), outflow(states.outer, second, fingering), [
+    2 * zr,
+    2 * zi,
+  ]);
+  const within =
+    cell(plus.cells, plus.coupling.inner + place) - cell(minus.cells, minus.coupling.inner + place);
+  if (within === 0) return;
+  addPair(outflow(states.inner, first, fingering), outflow(states.inner, second, fingering), [0, 2 * within]);
+}
+
+function sounds({ prepared, fingering }: Change, opening: number): boolean {
   if (opening >= fingering.length) return true;
-  return plus.branches[fingering[opening] ?? -1]?.closed === false;
+  return prepared.branches[fingering[opening] ?? -1]?.closed === false;
 }
 
 function outflow(states: Float64Array, opening: number, fingering: FingeringBranches): [number, number] {

@@ -60,17 +60,17 @@ export function solveStates(prepared: PreparedColumn, fingering: FingeringBranch
   for (let h = fingering.length; h >= 0; h -= 1) {
     const segment = segments[h];
     if (segment === undefined) continue;
-    out.segmentFoot.set(state, STATE_CELLS * h);
+    keepState(out.segmentFoot, STATE_CELLS * h);
     passTwoPort(cells, segment.twoPort, state);
-    out.segmentMouth.set(state, STATE_CELLS * h);
+    keepState(out.segmentMouth, STATE_CELLS * h);
     const branch = h === 0 ? undefined : branches[fingering[h - 1] ?? -1];
     if (branch === undefined) continue;
     const place = STATE_CELLS * (h - 1);
     if (branch.shift === 0) passReactance(state, cell(cells, branch.series));
     else passTwoPort(cells, branch.after, state);
-    out.axisBelow.set(state, place);
+    keepState(out.axisBelow, place);
     addBranchFlow(cells, branch.closed ? branch.shunt : -1, out.inner, place);
-    out.axisAbove.set(state, place);
+    keepState(out.axisAbove, place);
     if (branch.shift === 0) passReactance(state, cell(cells, branch.series));
     else passTwoPort(cells, branch.before, state);
   }
@@ -79,6 +79,11 @@ export function solveStates(prepared: PreparedColumn, fingering: FingeringBranch
 
 const state = new Float64Array(STATE_CELLS);
 const sum = new Float64Array(2);
+
+// A loop: for so few cells `set` costs several times as much.
+function keepState(to: Float64Array, at: number): void {
+  for (let i = 0; i < STATE_CELLS; i += 1) to[at + i] = cell(state, i);
+}
 
 // At each node: pressure and flow at the outlet and, through the two-port of the hole, at the bore.
 function writeOpeningStates(prepared: PreparedColumn, out: ColumnStates): void {
@@ -100,9 +105,9 @@ function writeOpeningStates(prepared: PreparedColumn, out: ColumnStates): void {
     state[1] = cell(sum, 1);
     state[2] = cell(cells, flow);
     state[3] = cell(cells, flow + 1);
-    out.outer.set(state, STATE_CELLS * opening);
+    keepState(out.outer, STATE_CELLS * opening);
     passTwoPort(cells, branch === undefined ? prepared.footTwoPort : branch.inside, state);
-    out.inner.set(state, STATE_CELLS * opening);
+    keepState(out.inner, STATE_CELLS * opening);
   }
 }
 
@@ -158,5 +163,5 @@ function addBranchFlow(cells: Cells, shunt: number, inner: Float64Array, place: 
 
 function writeOutlet({ cells, mouth }: PreparedColumn, out: ColumnStates): void {
   passTwoPort(cells, mouth.twoPort, state);
-  out.outlet.set(state);
+  keepState(out.outlet, 0);
 }

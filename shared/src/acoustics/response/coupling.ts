@@ -54,17 +54,24 @@ export interface Coupling {
  * @param plan - the column's cells
  * @param column - the column
  * @param mouth - the mouth end's opening
+ * @param wanted - whether a pair of openings is, by their places; others are left out
  * @returns the pairs
  */
-export function planCoupling(plan: BorePlan, column: Column, mouth: MouthOpening | null): Coupling {
+export function planCoupling(
+  plan: BorePlan,
+  column: Column,
+  mouth: MouthOpening | null,
+  wanted: (first: number, second: number) => boolean = () => true,
+): Coupling {
   const openings = openingsOf(column, mouth);
   const count = openings.length;
   const pairs: CoupledPair[] = [];
-  openings.forEach((first, i) => {
-    openings.slice(i + 1).forEach((second, offset) => {
-      if (first !== null && second !== null)
-        pairs.push({ first: i, second: i + 1 + offset, ...couple(first, second) });
-    });
+  openings.forEach((one, first) => {
+    for (let second = first + 1; second < count; second += 1) {
+      const other = openings[second];
+      if (!one || !other || !wanted(first, second)) continue;
+      pairs.push({ first, second, ...couple(one, other) });
+    }
   });
   return { openings: count, pairs, outer: plan.take(2 * count * count), inner: plan.take(count * count) };
 }

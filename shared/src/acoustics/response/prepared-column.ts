@@ -66,7 +66,7 @@ export function prepareColumn(
 ): { prepared: PreparedColumn; fingerings: FingeringBranches[] } {
   const plan = new BorePlan(column.outside, column.warmth);
   const mouth = planMouthBranch(plan, column);
-  const segments = planSegments(plan, column);
+  const segments = Array.from({ length: column.holes.length + 1 }, (_, i) => planSegment(plan, column, i));
   const { branches, choices } = planBranches(plan, column, fingerings);
   const coupling = planCoupling(plan, column, mouth.opening);
   const system = planOpenings(plan, column.holes.length);
@@ -102,13 +102,19 @@ export function prepareColumn(
   return { prepared, fingerings: choices };
 }
 
-function planSegments(plan: BorePlan, column: Column): Segment[] {
-  const ends = [
-    column.input,
-    ...column.holes.map((hole) => hole.position),
-    column.bore.at(-1)?.position ?? NaN,
-  ];
-  return ends.slice(1).map((to, i) => plan.segment(boreBetween(column.bore, ends[i] ?? to, to)));
+/**
+ * Lays out the bore between two hole axes, or between one and an end.
+ *
+ * @param plan - the column's cells
+ * @param column - the column
+ * @param place - of the segment, from the mouth end; 0 … number of holes
+ * @returns the segment
+ */
+export function planSegment(plan: BorePlan, column: Column, place: number): Segment {
+  const { bore, holes, input } = column;
+  const from = place === 0 ? input : (holes[place - 1]?.position ?? NaN);
+  const to = holes[place]?.position ?? bore.at(-1)?.position ?? NaN;
+  return plan.segment(boreBetween(bore, from, to));
 }
 
 function planBranches(
@@ -206,7 +212,7 @@ export function tuneBore(prepared: PreparedColumn, frequency: number): void {
  * @param frequency - Hz, > 0
  * @returns nothing; the result is in the column's cells
  */
-export function tuneDucts(prepared: PreparedColumn, frequency: number): void {
+export function tuneDucts(prepared: Pick<PreparedColumn, 'cells' | 'plan'>, frequency: number): void {
   const { cells, plan } = prepared;
   for (const { at, medium } of plan.media) writeMedium(cells, at, medium, frequency);
   for (const duct of plan.ducts) writeDuct(cells, duct.at, duct.medium, duct.radius);
@@ -248,7 +254,9 @@ function tuneLink(cells: Cells, link: Link): void {
  * @param prepared - the column
  * @returns nothing; the result is in the column's cells
  */
-export function tuneFoot(prepared: PreparedColumn): void {
+export function tuneFoot(
+  prepared: Pick<PreparedColumn, 'cells' | 'plan' | 'foot' | 'footRadius' | 'footRadiation'>,
+): void {
   const { cells, plan, foot, footRadius, footRadiation } = prepared;
   if (foot.kind === 'stopped') return;
   const ka = cell(cells, plan.outside) * footRadius;
