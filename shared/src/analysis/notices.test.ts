@@ -104,6 +104,17 @@ const CASES: [code: string, changes: Partial<DesignDocument>][] = [
   ['lip-angle-outside-formula', withMouth({ ...embouchure, lipAngleDeg: 150 })],
   ['embouchure-body-outside-formula', withMouth({ ...embouchure, lengthMm: 5, widthMm: 5 })],
   ['embouchure-shape-outside-formula', withMouth({ ...embouchure, lengthMm: 6, widthMm: 8 })],
+  [
+    'outside-not-covered',
+    {
+      outside: {
+        stations: [
+          { positionMm: -4.2, diameterMm: 17.5 },
+          { positionMm: 200, diameterMm: 17.5 },
+        ],
+      },
+    },
+  ],
   ['rim-cover', withMouth({ kind: 'rim', cover: 0.1, correctionScale: 1 })],
   ['reed-uncalibrated', withMouth({ kind: 'reed', equivalentVolumeMm3: 900, correctionScale: 1 })],
   ['hole-wider-than-formula', withHole({ diameterMm: 11.7 })],

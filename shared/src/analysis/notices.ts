@@ -19,6 +19,7 @@ export function designNotices(document: DesignDocument): Notice[] {
   return [
     ...airNotices(document),
     ...boreNotices(document),
+    ...outsideNotices(document),
     ...mouthNotices(document),
     ...document.holes.flatMap((hole) => holeNotices(document, hole)),
   ];
@@ -39,6 +40,21 @@ function airNotices({ air }: DesignDocument): Notice[] {
     });
   }
   return notices;
+}
+
+/** The outside sets chimneys and what the openings radiate into: where it was not measured it is a guess. */
+function outsideNotices({ bore, outside, holes }: DesignDocument): Notice[] {
+  const from = outside.stations[0]?.positionMm ?? 0;
+  const to = outside.stations.at(-1)?.positionMm ?? 0;
+  const footMm = bore.stations.at(-1)?.positionMm ?? 0;
+  const isBare = (positionMm: number) => positionMm < from - 0.05 || positionMm > to + 0.05;
+  if (!isBare(footMm) && !holes.some((hole) => isBare(hole.positionMm))) return [];
+  return [
+    {
+      code: 'outside-not-covered',
+      message: `The outside is given from ${from.toFixed(1)} to ${to.toFixed(1)} only. Its end diameters are carried on to the holes and the foot beyond; measure it there.`,
+    },
+  ];
 }
 
 function boreNotices({ bore, mouthEnd }: DesignDocument): Notice[] {
