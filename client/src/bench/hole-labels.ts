@@ -46,8 +46,3 @@ function labelOf(hole: ToneHole, next: (kind: string) => number): { label: strin
   const label = own === '' ? String(count) : own;
   return { label, title: `Hole ${hole.name === '' ? label : hole.name}` };
 }
-
-/** A title inside a sentence: "hole 4", "thumb hole"; a maker's own name keeps its letters. */
-export function titleInSentence(title: string): string {
-  return title.charAt(0).toLowerCase() + title.slice(1);
-}

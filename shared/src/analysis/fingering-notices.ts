@@ -8,6 +8,7 @@ import type { Notice } from './prediction.ts';
 import { isOutside } from './range.ts';
 import { holeMeasures, holeTitle } from './hole-notices.ts';
 import type { DesignColumn } from './to-column.ts';
+import { titleInSentence } from '../document/title-in-sentence.ts';
 
 export interface FingeringFacts {
   document: DesignDocument;
@@ -99,7 +100,7 @@ function halfCoverNotices({ document, design, states }: FingeringFacts): Notice[
   return states.flatMap((state, i): Notice[] => {
     const hole = design.holes[i];
     if (state.kind !== 'half' || hole === undefined) return [];
-    const title = holeTitle(document, hole).toLowerCase();
+    const title = titleInSentence(holeTitle(document, hole));
     const { radius, outer, chimney } = holeMeasures(document, hole);
     const notices: Notice[] = [];
     if (state.from === 'end') {

@@ -6,6 +6,7 @@ import { chimneyMm, diameterAt } from '../document/profile.ts';
 import type { Notice } from './prediction.ts';
 import { isOutside } from './range.ts';
 import { PAD_TO_HOLE_RATIO } from './to-column.ts';
+import { titleInSentence } from '../document/title-in-sentence.ts';
 
 /** Sizes of a hole that its formulas ask for, mm. */
 interface HoleMeasures {
@@ -62,7 +63,7 @@ function sizeNotices(title: string, { radius, inner, bore, chimney }: HoleMeasur
   if (isOutside(chimney / radius, chimneyRatio)) {
     notices.push({
       code: 'hole-chimney-outside-formula',
-      message: `The chimney of ${title.toLowerCase()} is ${(chimney / radius).toFixed(2)} hole radii high; the formulas were made for ${chimneyRatio.from} to ${chimneyRatio.to}. Its notes may be off by a few cents.`,
+      message: `The chimney of ${titleInSentence(title)} is ${(chimney / radius).toFixed(2)} hole radii high; the formulas were made for ${chimneyRatio.from} to ${chimneyRatio.to}. Its notes may be off by a few cents.`,
     });
   }
   return notices;
@@ -80,7 +81,7 @@ function undercutNotices(title: string, hole: ToneHole, measures: HoleMeasures):
   return [
     {
       code: 'undercut-outside-formula',
-      message: `The undercut of ${title.toLowerCase()} is not of a shape that was studied. Take its notes as right to ± ${UNUSUAL_UNDERCUT_CENTS} cents.`,
+      message: `The undercut of ${titleInSentence(title)} is not of a shape that was studied. Take its notes as right to ± ${UNUSUAL_UNDERCUT_CENTS} cents.`,
     },
   ];
 }
@@ -90,13 +91,13 @@ function padNotices(title: string, hole: ToneHole, { radius }: HoleMeasures): No
   const notices: Notice[] = [
     {
       code: 'pad-width-assumed',
-      message: `The pad over ${title.toLowerCase()} is taken as flat and ${PAD_TO_HOLE_RATIO} times as wide as the hole, with no raised rim.`,
+      message: `The pad over ${titleInSentence(title)} is taken as flat and ${PAD_TO_HOLE_RATIO} times as wide as the hole, with no raised rim.`,
     },
   ];
   if (isOutside((hole.padHeightMm ?? 0) / radius, PAD_RANGE.height)) {
     notices.push({
       code: 'pad-height-outside-formula',
-      message: `The pad over ${title.toLowerCase()} stands lower or higher than those studied, ${(PAD_RANGE.height.from * radius).toFixed(1)} to ${(PAD_RANGE.height.to * radius).toFixed(1)} here. Its notes may be off by several cents.`,
+      message: `The pad over ${titleInSentence(title)} stands lower or higher than those studied, ${(PAD_RANGE.height.from * radius).toFixed(1)} to ${(PAD_RANGE.height.to * radius).toFixed(1)} here. Its notes may be off by several cents.`,
     });
   }
   return notices;

@@ -158,6 +158,15 @@ describe('what is wrong is named by field, with what would do', () => {
       'holes.0.undercut.depthMm: Hole 1 is undercut 3.0 deep in a wall of 2.4. Make it 2.4 or less.',
     ],
     [
+      'overlapping holes with names of their own',
+      (d) => {
+        d.holes[0]!.name = 'L1';
+        d.holes[1]!.name = 'L2';
+        d.holes[1]!.positionMm = 125;
+      },
+      'holes.1.positionMm: Hole L1 and hole L2 run into each other by 5.3. Move one or choose smaller drills.',
+    ],
+    [
       'a stopper that stands in the embouchure hole',
       (d) => void (d.mouthEnd = embouchure(5)),
       'mouthEnd.stopperMm: The stopper stands in the embouchure hole. Set it 5.3 or more from the middle of the hole.',

@@ -1,5 +1,6 @@
 import type { DesignDocument, Station, ToneHole } from './design-document.ts';
 import { boreEnds, chimneyMm, diameterAt } from './profile.ts';
+import { titleInSentence } from './title-in-sentence.ts';
 
 /** One thing that is wrong: where (path of keys and indices), and what to do, in a maker's words. */
 export interface DocumentFault {
@@ -221,7 +222,7 @@ function overlapFaults(document: DesignDocument): DocumentFault[] {
       if (wood > 0) return;
       faults.push({
         path: ['holes', index, 'positionMm'],
-        message: `${holeName(other, otherIndex)} and ${holeName(hole, index).toLowerCase()} run into each other by ${mm(-wood)}. Move one or choose smaller drills.`,
+        message: `${holeName(other, otherIndex)} and ${titleInSentence(holeName(hole, index))} run into each other by ${mm(-wood)}. Move one or choose smaller drills.`,
       });
     });
   });

@@ -1,6 +1,7 @@
+import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { memo, useMemo, useState } from 'react';
 import { printLength } from '#shared/lengths/print-length.ts';
-import { titleInSentence, labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
+import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';

@@ -1,4 +1,5 @@
-import { titleInSentence } from '../../bench/hole-labels.ts';
+import { titleInSentence } from '#shared/document/title-in-sentence.ts';
+
 import { memo, useId } from 'react';
 import { COVERS, type ToneHole } from '#shared/document/design-document.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';

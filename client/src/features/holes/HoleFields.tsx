@@ -1,8 +1,9 @@
+import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import type { ToneHole } from '#shared/document/design-document.ts';
 import { chimneyMm, fromFootMm } from '#shared/document/profile.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { removeHole, widestHoleMm } from '../../bench/hole-edits.ts';
-import { titleInSentence } from '../../bench/hole-labels.ts';
+
 import { centsPerStep, SENSITIVITY_STEP } from '../../bench/hole-sensitivity.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import { Button } from '../../ui/Button.tsx';

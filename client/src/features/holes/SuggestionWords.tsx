@@ -1,4 +1,5 @@
-import { titleInSentence } from '../../bench/hole-labels.ts';
+import { titleInSentence } from '#shared/document/title-in-sentence.ts';
+
 import { formatCents } from '#shared/music/cents.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';

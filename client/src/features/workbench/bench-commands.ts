@@ -1,8 +1,9 @@
+import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
 import { nearestDrills } from '#shared/lengths/drills.ts';
 import { drillsFor } from '../../bench/drill-choice.ts';
 import { changeHole, removeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
-import { titleInSentence, labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '../../bench/hole-labels.ts';
 import { SENSITIVITY_STEP } from '../../bench/hole-sensitivity.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import type { BenchCommands } from './use-bench-keys.ts';
