@@ -15,10 +15,12 @@ import { benchCommands } from '../features/workbench/bench-commands.ts';
 import { choosing } from '../features/workbench/choosing.ts';
 import { designFacts } from '../features/workbench/design-facts.ts';
 import { FailureLine } from '../features/workbench/FailureLine.tsx';
+import { FiguresComing } from '../features/workbench/FiguresComing.tsx';
 import { SpokenChange } from '../features/workbench/SpokenChange.tsx';
 import { useBenchKeys } from '../features/workbench/use-bench-keys.ts';
 import { useBenchView } from '../features/workbench/use-bench-view.ts';
 import { useHistory } from '../features/workbench/use-history.ts';
+import { useLagging } from '../features/workbench/use-lagging.ts';
 import { usePlacing } from '../features/workbench/use-placing.ts';
 import { useSelection } from '../features/workbench/use-selection.ts';
 import { useZones } from '../features/workbench/use-zones.ts';
@@ -36,9 +38,6 @@ interface OpenWorkbenchProps {
   panel: WorkbenchPanel;
 }
 
-/** Width that a bench is laid out for before it is measured, px. */
-const GUESSED_PX = 1440;
-
 /** An open draft on the bench: the strip on top, below it what the panel shows. */
 export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
   const { document } = draft;
@@ -47,7 +46,8 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
   const navigate = useNavigate();
   const { search } = useLocation();
   const [measure, widthPx] = useElementWidth();
-  const desk = useBenchView(document, widthPx ?? GUESSED_PX);
+  // Until the strip is measured, the page's width is the nearest to it.
+  const desk = useBenchView(document, widthPx ?? window.document.documentElement.clientWidth);
   const placing = usePlacing(document);
   const [isDragging, setDragging] = useState(false);
   const [selection, select] = useSelection(document);
@@ -68,6 +68,8 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
   const history = useHistory(draft);
   const suggestion = useSuggestionDesk(bench, isDragging);
   const [best] = suggestion.suggestions ?? [];
+  const isLagging = useLagging(draft.predictionOf !== document && draft.predictionFailure === null);
+  const isOld = isLagging || draft.predictionFailure !== null;
   useZones();
   useBenchKeys({
     ...benchCommands(bench),
@@ -109,6 +111,7 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
             isDragging={isDragging}
             onDragging={setDragging}
           />
+          <FiguresComing isComing={isLagging} />
           {desk.geometry.layout === 'wide' && (
             <ZoomButtons
               isWhole={desk.view.kind === 'whole'}
@@ -127,8 +130,8 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
           onChooseHole={(hole) => bench.onSelect({ hole })}
         />
       )}
-      <div className="mx-auto max-w-400">
-        <WorkbenchPanels {...{ panel, bench, draft, isDragging, suggestion }} />
+      <div className="mx-auto max-w-400" data-figures={isOld ? 'old' : undefined}>
+        <WorkbenchPanels {...{ panel, bench, draft, isDragging, isOld, suggestion }} />
       </div>
       {draft.save.status === 'conflict' && (
         <ConflictDialog

@@ -21,18 +21,22 @@ interface WorkbenchPanelsProps {
   bench: PanelProps;
   draft: DraftOnBench;
   isDragging: boolean;
+  /** The figures belong to an earlier drawing. */
+  isOld: boolean;
   suggestion: SuggestionDesk;
 }
 
 /** What stands below the strip. Features do not know each other: this is where they are put side by side. */
-export function WorkbenchPanels({ panel, bench, draft, isDragging, suggestion }: WorkbenchPanelsProps) {
+export function WorkbenchPanels({
+  panel,
+  bench,
+  draft,
+  isDragging,
+  isOld,
+  suggestion,
+}: WorkbenchPanelsProps) {
   const chart = (
-    <PlumbChart
-      {...bench}
-      isDragging={isDragging}
-      isOld={draft.predictionFailure !== null}
-      showsFingering={panel === 'holes'}
-    />
+    <PlumbChart {...bench} isDragging={isDragging} isOld={isOld} showsFingering={panel === 'holes'} />
   );
   switch (panel) {
     case 'bore':
@@ -117,7 +121,11 @@ function HolesPanel({ bench, chart, suggestion, isDragging }: HolesPanelProps) {
           <NoticeList prediction={prediction} isDragging={isDragging} />
         </div>
       </div>
-      {!hasLeftZone && <BottomDrawer label="Hole">{inspector}</BottomDrawer>}
+      {!hasLeftZone && (
+        <BottomDrawer label="Hole" isIdle={selection.hole === null}>
+          {inspector}
+        </BottomDrawer>
+      )}
     </div>
   );
 }

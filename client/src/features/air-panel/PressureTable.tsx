@@ -39,7 +39,7 @@ export function PressureTable(props: PressureTableProps) {
     <div
       role="table"
       aria-label="Pressure at the holes, percent of the most in the bore"
-      className="relative"
+      className="is-predicted relative"
     >
       <Leaders {...props} />
       <div role="row" className="sr-only">

@@ -60,7 +60,7 @@ export function ResonanceDrawing(props: ResonanceDrawingProps) {
       height={HEIGHT}
       role="group"
       aria-label={`Resonances of ${predicted.note}`}
-      className="mt-2 block"
+      className="is-predicted mt-2 block"
     >
       {cutoffY !== null && cutoffY > TOP && (
         <g aria-hidden="true">

@@ -35,7 +35,7 @@ export function RibbonShelf(props: RibbonShelfProps) {
       height={RIBBON_SHELF}
       role="group"
       aria-label="Standing waves along the bore"
-      className="border-hair block border-b"
+      className="is-predicted border-hair block border-b"
     >
       {chosenX !== undefined && (
         <rect x={geometry.x(chosenX) - 39} width={78} height={RIBBON_SHELF} className="bench-column" />

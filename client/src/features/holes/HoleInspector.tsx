@@ -1,9 +1,10 @@
 import { useMemo } from 'react';
 import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
 import { leadingNote } from '../../bench/hole-sensitivity.ts';
-import { hungNotes, notesOfColumn } from '../../bench/hung-notes.ts';
+import { hungNotes, notesOfColumn, type HungNote } from '../../bench/hung-notes.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
+import { FurthestNotes } from './FurthestNotes.tsx';
 import { HoleFields } from './HoleFields.tsx';
 import type { SuggestionDesk } from './use-suggestion-desk.ts';
 
@@ -18,7 +19,7 @@ export function HoleInspector(props: HoleInspectorProps) {
   const notes = useMemo(() => hungNotes(document, prediction), [document, prediction]);
   const at = holes.findIndex(({ hole }) => hole.id === selection.hole);
   const chosen = holes[at];
-  if (chosen === undefined) return <NoHole {...props} holes={holes} />;
+  if (chosen === undefined) return <NoHole {...props} holes={holes} notes={notes} />;
   const vents = notesOfColumn(notes, chosen.hole.id).slice(0, 3);
   return (
     <section aria-label={chosen.title}>
@@ -46,7 +47,12 @@ export function HoleInspector(props: HoleInspectorProps) {
   );
 }
 
-function NoHole({ holes, readOnly }: HoleInspectorProps & { holes: readonly LabelledHole[] }) {
+interface NoHoleProps extends HoleInspectorProps {
+  holes: readonly LabelledHole[];
+  notes: readonly HungNote[];
+}
+
+function NoHole({ holes, notes, readOnly, bandCents, onSelect }: NoHoleProps) {
   return (
     <section aria-label="Holes">
       <h2 className="text-section font-semibold">Holes</h2>
@@ -56,6 +62,7 @@ function NoHole({ holes, readOnly }: HoleInspectorProps & { holes: readonly Labe
           : 'Choose a hole on the instrument to see and change its sizes.'}
         {readOnly !== null && ` ${readOnly}`}
       </p>
+      {holes.length > 0 && <FurthestNotes {...{ notes, holes, bandCents, onSelect }} />}
     </section>
   );
 }

@@ -21,7 +21,7 @@ const TEXT_PX = 32;
 /** The resonances of the chosen fingering against the exact multiples of the first. */
 export function Ladder({ prediction, height }: LadderProps) {
   return (
-    <section aria-label="Air column" style={{ width: WIDTH }}>
+    <section aria-label="Air column" className="is-predicted" style={{ width: WIDTH }}>
       <header className="flex h-8.5 items-baseline gap-2.5">
         <h2 className="text-section font-semibold">Air column</h2>
         {prediction !== null && (

@@ -1,3 +1,4 @@
+import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { memo, useEffect, useRef, type KeyboardEvent, type ReactNode } from 'react';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { formatCents } from '#shared/music/cents.ts';
@@ -37,7 +38,7 @@ export const NoteRow = memo(function NoteRow(props: NoteRowProps) {
   const tap = (labelled: LabelledHole) => {
     choose();
     onEdit({
-      label: `${fingering.note}: ${labelled.title.toLowerCase()}`,
+      label: `${fingering.note}: ${titleInSentence(labelled.title)}`,
       change: (document) =>
         changeFingering(document, fingering.id, (before) => tapped(before, labelled.hole)),
     });
@@ -146,7 +147,7 @@ function RemarkCell({ remark, notice, layout: { remarkX, rowHeight } }: RemarkCe
   return (
     <div
       role="cell"
-      className={remarkX === null ? 'sr-only' : 'text-label text-ink2 absolute truncate'}
+      className={remarkX === null ? 'sr-only' : 'is-predicted text-label text-ink2 absolute truncate'}
       style={remarkX === null ? undefined : { left: remarkX, right: 40, lineHeight: `${rowHeight}px` }}
     >
       {notice !== undefined && (
@@ -202,7 +203,7 @@ function Figure({ right, height, isStrong = false, children }: FigureProps) {
   return (
     <div
       role="cell"
-      className={classNames('text-data absolute w-20 text-right', isStrong && 'font-bold')}
+      className={classNames('is-predicted text-data absolute w-20 text-right', isStrong && 'font-bold')}
       style={{ left: right - 80, lineHeight: `${height}px` }}
     >
       {children}

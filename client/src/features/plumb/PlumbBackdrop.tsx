@@ -2,7 +2,7 @@ import { memo } from 'react';
 import type { BenchGeometry } from '../../bench/bench-geometry.ts';
 import { BobMark } from '../../bench/Bob.tsx';
 import type { PlumbRow, PlumbRows } from './plumb-rows.ts';
-import { bandOf } from './plumb-scale.ts';
+import { bandOf } from '../../bench/band-of.ts';
 
 interface PlumbBackdropProps {
   geometry: BenchGeometry;

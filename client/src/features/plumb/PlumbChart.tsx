@@ -1,4 +1,5 @@
 import { useMemo } from 'react';
+import { bandOf } from '../../bench/band-of.ts';
 import { FingeringDots } from '../../bench/FingeringDots.tsx';
 import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
 import { hungNotes, type HungNote } from '../../bench/hung-notes.ts';
@@ -11,7 +12,6 @@ import { FingeringRow } from './FingeringRow.tsx';
 import { HangingNote } from './HangingNote.tsx';
 import { NoticeMarks } from './NoticeMarks.tsx';
 import { hasTwoLines, plumbRows, type PlumbRows } from './plumb-rows.ts';
-import { bandOf } from './plumb-scale.ts';
 import { PlumbBackdrop, RowLabels, ScaleKey } from './PlumbBackdrop.tsx';
 import { PlumbTable } from './PlumbTable.tsx';
 

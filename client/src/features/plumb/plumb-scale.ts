@@ -15,8 +15,3 @@ export function bobPlace(cents: number, { pxPerCent, heldAtCents }: PlumbMeasure
   if (cents < -heldAtCents) return { dx: -heldAtCents * pxPerCent, held: -1 };
   return { dx: cents * pxPerCent, held: 0 };
 }
-
-/** Half width of the band in a register; the last figure holds for all above. */
-export function bandOf(bandCents: readonly number[], register: number): number {
-  return bandCents[register - 1] ?? bandCents.at(-1) ?? 0;
-}

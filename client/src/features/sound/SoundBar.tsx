@@ -75,7 +75,7 @@ function NoteButtons({ note, tones }: { note: FingeringPrediction; tones: Tones 
       >
         Play both
       </SoundButton>
-      <span className="text-data text-ink2">
+      <span className="is-predicted text-data text-ink2">
         {frequencyHz === null ? (
           'no steady note'
         ) : (

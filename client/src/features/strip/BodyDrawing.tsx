@@ -128,7 +128,10 @@ function BrokenHead({ frame }: { frame: BenchFrame }) {
 function StretchNote({ frame }: { frame: BenchFrame }) {
   const times = frame.pxPerMm / frame.acrossPxPerMm;
   if (times < 1.05) return null;
-  const y = frame.measures.sectionY + 4.5;
+  const { hasSection, sectionY, planY } = frame.measures;
+  // Over the bore's axis where it is drawn; else along the edge of the tube, clear of the holes.
+  const half = (frame.body.widestMm * frame.acrossPxPerMm) / 2;
+  const y = hasSection ? sectionY + 4.5 : planY + half - 3;
   return (
     <text x={frame.viewLeft + 14} y={y} className="bench-quiet-label bench-haloed">
       drawn {times.toFixed(1)} times longer than wide

@@ -14,13 +14,21 @@ const NEXT: Record<Height, { height: Height; verb: string }> = {
   full: { height: 'peek', verb: 'Close the drawer' },
 };
 
+interface BottomDrawerProps {
+  label: string;
+  /** With nothing to edit in it the drawer only peeps out, until a hand sets it. */
+  isIdle: boolean;
+  children: ReactNode;
+}
+
 /** The left zone on a standing tablet or a phone: a drawer at the bottom edge with three heights. */
-export function BottomDrawer({ label, children }: { label: string; children: ReactNode }) {
-  const [height, setHeight] = useState<Height>('half');
+export function BottomDrawer({ label, isIdle, children }: BottomDrawerProps) {
+  const [chosen, setHeight] = useState<Height | null>(null);
+  const height = chosen ?? (isIdle ? 'peek' : 'half');
   const next = NEXT[height];
   return (
     <>
-      <div aria-hidden="true" className={LOOK.half} />
+      <div aria-hidden="true" className={LOOK[height]} />
       <aside
         aria-label={label}
         className={`bg-sheet shadow-pop border-hair fixed inset-x-0 bottom-15 z-25 flex flex-col rounded-t-[10px] border-t transition-[height] duration-180 ease-out ${LOOK[height]}`}

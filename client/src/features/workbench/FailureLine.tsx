@@ -16,7 +16,7 @@ export function FailureLine({ faults, document, onChooseHole }: FailureLineProps
   return (
     <div role="alert" className="border-stop bg-stop-soft text-ink mx-margin my-2 border-l-3 px-3 py-2">
       <b className="font-semibold">Cannot work this out:</b> {first.message} The sizes stay as you drew them;
-      the outlined bobs are from before.
+      the outlined bobs and the pale figures are from before.
       {others.length > 0 && (
         <ul className="text-data mt-1 list-disc pl-5">
           {others.map((fault) => (

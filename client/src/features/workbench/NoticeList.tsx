@@ -27,7 +27,10 @@ const Sentences = memo(function Sentences({ prediction }: Pick<NoticeListProps, 
   const groups = prediction === null ? [] : grouped(prediction);
   if (groups.length === 0) return null;
   return (
-    <section aria-label="What to know about these figures" className="text-data text-ink2 max-w-170 py-3">
+    <section
+      aria-label="What to know about these figures"
+      className="is-predicted text-data text-ink2 max-w-170 py-3"
+    >
       <h2 className="text-label text-ink3">What to know about these figures</h2>
       <ul className="mt-1 flex flex-col gap-1">
         {groups.map(({ message, notes }) => (
