@@ -10,6 +10,8 @@ import { ConflictDialog } from '../features/draft/ConflictDialog.tsx';
 import { DraftBands } from '../features/draft/DraftBands.tsx';
 import type { DraftOnBench } from '../features/draft/use-draft.ts';
 import { useSuggestionDesk } from '../features/holes/use-suggestion-desk.ts';
+import { useHeldNote } from '../features/sound/use-held-note.ts';
+import { useTones } from '../features/sound/use-tones.ts';
 import { InstrumentStrip } from '../features/strip/InstrumentStrip.tsx';
 import { benchCommands } from '../features/workbench/bench-commands.ts';
 import { choosing } from '../features/workbench/choosing.ts';
@@ -67,18 +69,22 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
   const conditions = useMemo(() => ({ air, pitch }), [air, pitch]);
   const history = useHistory(draft);
   const suggestion = useSuggestionDesk(bench, isDragging);
+  const tones = useTones();
+  const playReference = useHeldNote(tones, bench);
   const [best] = suggestion.suggestions ?? [];
   const isLagging = useLagging(draft.predictionOf !== document && draft.predictionFailure === null);
   const isOld = isLagging || draft.predictionFailure !== null;
+  const goTo = (next: WorkbenchPanel | undefined) => {
+    if (next === undefined) return;
+    const to = paths.workbench(design.id, design.revisionNumber, next) + search;
+    void navigate(to, { preventScrollReset: true });
+  };
   useZones();
   useBenchKeys({
     ...benchCommands(bench),
-    stepPanel: (by) => {
-      const next = WORKBENCH_PANELS[WORKBENCH_PANELS.indexOf(panel) + by];
-      if (next === undefined) return;
-      const to = paths.workbench(design.id, design.revisionNumber, next) + search;
-      void navigate(to, { preventScrollReset: true });
-    },
+    stepPanel: (by) => goTo(WORKBENCH_PANELS[WORKBENCH_PANELS.indexOf(panel) + by]),
+    fullLadder: () => goTo('air'),
+    playReference,
     undo: draft.undo,
     redo: draft.redo,
     trySuggestion: () => best !== undefined && suggestion.tryOut(best),
@@ -131,7 +137,7 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
         />
       )}
       <div className="mx-auto max-w-400" data-figures={isOld ? 'old' : undefined}>
-        <WorkbenchPanels {...{ panel, bench, draft, isDragging, isOld, suggestion }} />
+        <WorkbenchPanels {...{ panel, bench, draft, isDragging, isOld, suggestion, tones }} />
       </div>
       {draft.save.status === 'conflict' && (
         <ConflictDialog

@@ -11,6 +11,7 @@ import { NotesPanel } from '../features/notes-panel/NotesPanel.tsx';
 import { PlumbChart } from '../features/plumb/PlumbChart.tsx';
 import { RegisterChoice } from '../features/plumb/RegisterChoice.tsx';
 import { SoundBar } from '../features/sound/SoundBar.tsx';
+import type { Tones } from '../features/sound/use-tones.ts';
 import { BottomDrawer } from '../features/workbench/BottomDrawer.tsx';
 import { ColumnTint } from '../features/workbench/ColumnTint.tsx';
 import { NoticeList } from '../features/workbench/NoticeList.tsx';
@@ -24,6 +25,7 @@ interface WorkbenchPanelsProps {
   /** The figures belong to an earlier drawing. */
   isOld: boolean;
   suggestion: SuggestionDesk;
+  tones: Tones;
 }
 
 /** What stands below the strip. Features do not know each other: this is where they are put side by side. */
@@ -34,6 +36,7 @@ export function WorkbenchPanels({
   isDragging,
   isOld,
   suggestion,
+  tones,
 }: WorkbenchPanelsProps) {
   const chart = (
     <PlumbChart {...bench} isDragging={isDragging} isOld={isOld} showsFingering={panel === 'holes'} />
@@ -52,18 +55,26 @@ export function WorkbenchPanels({
         />
       );
     case 'notes':
-      return <NotesPanel {...bench} sound={<SoundBar {...bench} />} />;
+      return <NotesPanel {...bench} sound={<SoundBar {...bench} tones={tones} />} />;
     case 'air':
       return (
         <AirPanel
           {...bench}
           predictionOptions={draft.predictionOptions}
           onChoosePredictionOptions={draft.choosePredictionOptions}
-          sound={<SoundBar {...bench} />}
+          sound={<SoundBar {...bench} tones={tones} />}
         />
       );
     case 'holes':
-      return <HolesPanel bench={bench} chart={chart} suggestion={suggestion} isDragging={isDragging} />;
+      return (
+        <HolesPanel
+          bench={bench}
+          chart={chart}
+          sound={<SoundBar {...bench} tones={tones} />}
+          suggestion={suggestion}
+          isDragging={isDragging}
+        />
+      );
   }
 }
 
@@ -80,12 +91,13 @@ function HangZone({ bench, children }: { bench: PanelProps; children: ReactNode 
 interface HolesPanelProps {
   bench: PanelProps;
   chart: ReactNode;
+  sound: ReactNode;
   suggestion: SuggestionDesk;
   isDragging: boolean;
 }
 
 /** Inspector and ladder at the left, where nothing hangs; plumb lines and sizes under the holes. */
-function HolesPanel({ bench, chart, suggestion, isDragging }: HolesPanelProps) {
+function HolesPanel({ bench, chart, sound, suggestion, isDragging }: HolesPanelProps) {
   const { document, geometry, prediction, sensitivities, unit, selection, readOnly } = bench;
   const { leftZone } = geometry.measures;
   const chosen = selection.fingering ?? document.fingerings[0]?.id;
@@ -118,6 +130,7 @@ function HolesPanel({ bench, chart, suggestion, isDragging }: HolesPanelProps) {
           </div>
         </HangZone>
         <div style={{ paddingLeft: Math.max(16, geometry.hangLeft - 112), paddingRight: 16 }}>
+          <div className="pt-3">{sound}</div>
           <NoticeList prediction={prediction} isDragging={isDragging} />
         </div>
       </div>

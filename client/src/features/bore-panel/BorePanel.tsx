@@ -1,7 +1,7 @@
 import { useState, type ReactNode } from 'react';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';
-import type { ProfilePart } from './bore-edits.ts';
+import type { ProfilePart } from '../../bench/end-edits.ts';
 import { BoreShelf } from './BoreShelf.tsx';
 import { BoreTable } from './BoreTable.tsx';
 import { FootForm } from './FootForm.tsx';

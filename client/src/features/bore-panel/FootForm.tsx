@@ -3,7 +3,7 @@ import type { PanelProps } from '../../bench/panel-props.ts';
 import { lengthFormat } from '../../ui/length-format.ts';
 import { NumberField } from '../../ui/NumberField.tsx';
 import { Segment } from '../../ui/Segment.tsx';
-import { moveFoot } from './bore-edits.ts';
+import { moveFoot } from '../../bench/end-edits.ts';
 
 const KINDS = [
   { value: 'open', label: 'open' },

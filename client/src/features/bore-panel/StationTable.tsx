@@ -3,7 +3,7 @@ import { fromFootMm } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { classNames } from '../../ui/class-names.ts';
-import type { ProfilePart } from './bore-edits.ts';
+import type { ProfilePart } from '../../bench/end-edits.ts';
 import { taperWords } from './taper.ts';
 
 interface StationTableProps {

@@ -1,18 +1,12 @@
 import { DOCUMENT_LIMITS } from '#shared/document/design-document.ts';
 import { boreEnds } from '#shared/document/profile.ts';
+import type { ProfilePart } from '../../bench/end-edits.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { Button } from '../../ui/Button.tsx';
 import { lengthFormat } from '../../ui/length-format.ts';
 import { NumberField } from '../../ui/NumberField.tsx';
 import { Segment } from '../../ui/Segment.tsx';
-import {
-  changeStation,
-  longestSpan,
-  moveStation,
-  removeStation,
-  splitSpan,
-  type ProfilePart,
-} from './bore-edits.ts';
+import { changeStation, longestSpan, moveStation, removeStation, splitSpan } from './bore-edits.ts';
 import { StationTable } from './StationTable.tsx';
 
 interface StationsFormProps extends PanelProps {

@@ -1,30 +1,11 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import type { MouthEnd } from '#shared/document/design-document.ts';
-import { documentFaults } from '#shared/document/document-faults.ts';
 import { diameterAt } from '#shared/document/profile.ts';
 import { whistleDocument } from '../../../../tests/support/whistle-document.ts';
-import {
-  changeStation,
-  longestSpan,
-  moveFoot,
-  moveStation,
-  removeStation,
-  splitSpan,
-  usualMouthEnd,
-  withMouthEnd,
-} from './bore-edits.ts';
+import { changeStation, longestSpan, moveStation, removeStation, splitSpan } from './bore-edits.ts';
 import { taperRate, taperWords } from './taper.ts';
 
 const whistle = whistleDocument();
-const longerWindow: MouthEnd = {
-  kind: 'window',
-  widthMm: 9,
-  lengthMm: 5.2,
-  wallMm: 1.2,
-  rampDeg: 20,
-  correctionScale: 1,
-};
 const coned = whistleDocument({
   bore: {
     stations: [
@@ -67,46 +48,6 @@ describe('stations', () => {
 
   it('take a typed diameter as it is', () => {
     expect(changeStation(coned, 'bore', 1, { diameterMm: 12.5 }).bore.stations[1]?.diameterMm).toBe(12.5);
-  });
-});
-
-describe('the mouth end', () => {
-  it('takes the first station of bore and outside along when the window is cut longer', () => {
-    const longer = withMouthEnd(whistle, longerWindow);
-    expect(longer.bore.stations[0]).toEqual({ positionMm: -5.2, diameterMm: 12.7 });
-    expect(longer.outside.stations[0]).toEqual({ positionMm: -5.2, diameterMm: 17.5 });
-    expect(documentFaults(longer)).toEqual([]);
-  });
-
-  it('leaves an outside alone that covers the block behind the window', () => {
-    const beaked = {
-      ...whistle,
-      outside: { stations: [{ positionMm: -30, diameterMm: 17.5 }, ...whistle.outside.stations.slice(1)] },
-    };
-    const longer = withMouthEnd(beaked, longerWindow);
-    expect(longer.outside.stations[0]?.positionMm).toBe(-30);
-  });
-
-  it.each(['window', 'embouchure', 'rim', 'reed', 'ideal-open', 'ideal-closed'] as const)(
-    'of kind %s makes a document that can be built, from any other',
-    (kind) => {
-      const changed = withMouthEnd(whistle, usualMouthEnd(kind, 12.7));
-      expect(documentFaults(changed)).toEqual([]);
-      expect(documentFaults(withMouthEnd(changed, usualMouthEnd('window', 12.7)))).toEqual([]);
-    },
-  );
-});
-
-describe('the foot', () => {
-  it.each([240, 300])('moves bore and outside to %d together', (footMm) => {
-    const cut = moveFoot(coned, footMm);
-    expect(cut.bore.stations.at(-1)?.positionMm).toBe(footMm);
-    expect(cut.outside.stations.at(-1)?.positionMm).toBe(footMm);
-    expect(diameterAt(cut.bore.stations, 90)).toBe(12.7);
-  });
-
-  it('cuts through the taper at its width there', () => {
-    expect(moveFoot(coned, 177.5).bore.stations.at(-1)?.diameterMm).toBe(11.85);
   });
 });
 

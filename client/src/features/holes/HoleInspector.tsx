@@ -1,7 +1,12 @@
 import { useMemo } from 'react';
+import type { DesignDocument } from '#shared/document/design-document.ts';
+import { boreEnds } from '#shared/document/profile.ts';
+import { printLength } from '#shared/lengths/print-length.ts';
+import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
 import { leadingNote } from '../../bench/hole-sensitivity.ts';
 import { hungNotes, notesOfColumn, type HungNote } from '../../bench/hung-notes.ts';
+import { MOUTH_WORDS } from '../../bench/mouth-words.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { FurthestNotes } from './FurthestNotes.tsx';
@@ -52,11 +57,13 @@ interface NoHoleProps extends HoleInspectorProps {
   notes: readonly HungNote[];
 }
 
-function NoHole({ holes, notes, readOnly, bandCents, onSelect }: NoHoleProps) {
+function NoHole({ document, unit, selection, holes, notes, readOnly, bandCents, onSelect }: NoHoleProps) {
+  const end = endWords(document, selection.hole, unit);
   return (
     <section aria-label="Holes">
-      <h2 className="text-section font-semibold">Holes</h2>
+      <h2 className="text-section font-semibold">{end?.title ?? 'Holes'}</h2>
       <p className="text-data text-ink2 mt-1">
+        {end !== null && `${end.place} Drag it, or Alt with ← and →; its sizes stand under Bore. `}
         {holes.length === 0
           ? 'No holes yet. Click the instrument where the first one goes, or press Add a hole.'
           : 'Choose a hole on the instrument to see and change its sizes.'}
@@ -65,6 +72,17 @@ function NoHole({ holes, notes, readOnly, bandCents, onSelect }: NoHoleProps) {
       {holes.length > 0 && <FurthestNotes {...{ notes, holes, bandCents, onSelect }} />}
     </section>
   );
+}
+
+/** Heading and place of a chosen end; null while no end is chosen. */
+function endWords(document: DesignDocument, key: string | null, unit: LengthUnit) {
+  const length = (mm: number) => `${printLength(mm, unit)} ${unit}`;
+  const { footMm } = boreEnds(document);
+  if (key === 'foot') return { title: 'Foot', place: `${length(footMm)} from the mouth end.` };
+  if (key !== 'mouth') return null;
+  const words = MOUTH_WORDS[document.mouthEnd.kind];
+  const title = `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
+  return { title, place: `${length(footMm)} from the foot.` };
 }
 
 interface NeighboursProps {

@@ -1,29 +1,22 @@
-import { useEffect, useId, type ReactNode } from 'react';
+import { useId, type ReactNode } from 'react';
 import type { FingeringPrediction } from '#shared/analysis/prediction.ts';
 import { beatsBetween } from '#shared/music/cents.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { Button } from '../../ui/Button.tsx';
 import { scaleUpAndDown } from './scale-row.ts';
-import { useTones, type Playing, type Tones } from './use-tones.ts';
+import { soundingNote } from './use-held-note.ts';
+import type { Playing, Tones } from './use-tones.ts';
 
-type SoundBarProps = Pick<PanelProps, 'prediction' | 'selection'>;
+interface SoundBarProps extends Pick<PanelProps, 'prediction' | 'selection'> {
+  tones: Tones;
+}
 
 /** The chosen note as it will sound, as it should, and both at once; and the whole scale. */
-export function SoundBar({ prediction, selection }: SoundBarProps) {
-  const tones = useTones();
+export function SoundBar({ prediction, selection, tones }: SoundBarProps) {
   const predictions = prediction?.fingerings ?? [];
-  const note = predictions.find(({ id }) => id === selection.fingering) ?? predictions[0];
-  const sounding = note?.frequencyHz ?? null;
-  const target = note?.targetHz ?? null;
-  const { playing, retune, stop } = tones;
-  useEffect(() => {
-    // A dragged hole is heard while it moves; a note that falls silent is silent.
-    if (playing === null || playing === 'scale' || target === null) return;
-    if (playing === 'reference') retune([target]);
-    else if (sounding === null) stop();
-    else retune(playing === 'both' ? [sounding, target] : [sounding]);
-  });
+  const note = soundingNote(prediction, selection);
+  const { playing, stop } = tones;
   if (note === undefined) return null;
   return (
     <div role="group" aria-label="Sound" className="flex flex-wrap items-center gap-2">

@@ -8,6 +8,7 @@ import { addHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
 import { labelledHoles } from '../../bench/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { BodyDrawing } from './BodyDrawing.tsx';
+import { EndGrips } from './EndGrips.tsx';
 import { HoleButtons } from './HoleButtons.tsx';
 import { HoleDrawing } from './HoleDrawing.tsx';
 import { PlaceSpot } from './PlaceSpot.tsx';
@@ -95,7 +96,7 @@ export function InstrumentStrip(props: InstrumentStripProps) {
             />
           ))}
         </g>
-        <StripLabels geometry={geometry} document={document} chosen={chosen} unit={unit} />
+        <StripLabels geometry={geometry} document={document} chosenKey={selection.hole} unit={unit} />
         {placing.spotMm !== null && (
           <circle
             cx={frame.x(placing.spotMm)}
@@ -105,6 +106,7 @@ export function InstrumentStrip(props: InstrumentStripProps) {
           />
         )}
       </svg>
+      <EndGrips {...props} />
       <HoleButtons {...props} shape={shape} holes={holes} />
       {placing.spotMm !== null && (
         <PlaceSpot

@@ -1,28 +1,25 @@
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import { fromFootMm } from '#shared/document/profile.ts';
+import { boreEnds, fromFootMm } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
-import type { BenchColumn, BenchGeometry } from '../../bench/bench-geometry.ts';
+import type { BenchGeometry } from '../../bench/bench-geometry.ts';
 import { MOUTH_WORDS } from '../../bench/mouth-words.ts';
 
 interface StripLabelsProps {
   geometry: BenchGeometry;
   document: DesignDocument;
-  chosen: BenchColumn | undefined;
+  chosenKey: string | null;
   unit: LengthUnit;
 }
 
 /** Words at both ends of the instrument, and the chosen hole's figure on the rule. */
-export function StripLabels({ geometry, document, chosen, unit }: StripLabelsProps) {
+export function StripLabels({ geometry, document, chosenKey, unit }: StripLabelsProps) {
   const { frame } = geometry;
   const { measures } = frame;
-  const chosenHole = document.holes.find((hole) => hole.id === chosen?.key);
   const mouthX = frame.x(0);
   const footX = frame.x(geometry.body.footMm);
-  const figure =
-    chosen === undefined
-      ? ''
-      : printLength(fromFootMm(document, chosenHole?.positionMm ?? geometry.body.footMm), unit);
+  const chosenMm = placeOf(document, chosenKey);
+  const chipX = chosenMm === null ? null : frame.x(chosenMm);
   const chipY = measures.ruleY + 2.5;
   return (
     <>
@@ -41,18 +38,25 @@ export function StripLabels({ geometry, document, chosen, unit }: StripLabelsPro
           foot
         </text>
       )}
-      {chosen !== undefined && (
-        <g transform={`translate(${chosen.holeX} 0)`}>
+      {chosenMm !== null && chipX !== null && chipX >= frame.viewLeft - 1 && chipX <= frame.viewRight + 1 && (
+        <g transform={`translate(${chipX} 0)`}>
           <rect x={-25} y={chipY} width={50} height={measures.ruleHeight - 4} rx={3} className="bench-chip" />
           <text
             y={chipY + (measures.ruleHeight - 4) / 2 + 4.8}
             textAnchor="middle"
             className="bench-chip-figure"
           >
-            {figure}
+            {printLength(fromFootMm(document, chosenMm), unit)}
           </text>
         </g>
       )}
     </>
   );
+}
+
+/** Where the chosen hole or end is; null with nothing chosen. */
+function placeOf(document: DesignDocument, key: string | null): number | null {
+  if (key === 'mouth') return 0;
+  if (key === 'foot') return boreEnds(document).footMm;
+  return document.holes.find(({ id }) => id === key)?.positionMm ?? null;
 }

@@ -1,6 +1,7 @@
 import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
 import { nearestDrills } from '#shared/lengths/drills.ts';
+import { moveMouthEnd, trimFoot } from '../../bench/end-edits.ts';
 import { drillsFor } from '../../bench/drill-choice.ts';
 import { changeHole, removeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
 import { labelledHoles } from '../../bench/hole-labels.ts';
@@ -52,10 +53,13 @@ export function benchCommands(props: PanelProps): Commands {
 function holeCommands(props: PanelProps): Pick<Commands, 'nudge' | 'changeDrill' | 'removeHole'> {
   const { document, selection, unit, readOnly, onEdit, onSelect } = props;
   const chosen = labelledHoles(document).find((labelled) => labelled.hole.id === selection.hole);
-  if (chosen === undefined || readOnly !== null) {
-    const nothing = () => undefined;
-    return { nudge: nothing, changeDrill: nothing, removeHole: nothing };
-  }
+  const nothing = () => undefined;
+  if (chosen === undefined || readOnly !== null)
+    return {
+      nudge: readOnly === null ? nudgeEnd(props) : nothing,
+      changeDrill: nothing,
+      removeHole: nothing,
+    };
   const { hole } = chosen;
   const title = titleInSentence(chosen.title);
   return {
@@ -81,6 +85,20 @@ function holeCommands(props: PanelProps): Pick<Commands, 'nudge' | 'changeDrill'
       onEdit({ label: `Take away ${title}`, change: (before) => removeHole(before, hole.id) });
       onSelect({ hole: null });
     },
+  };
+}
+
+/** Moves the chosen end along the instrument by steps, as its grip does. */
+function nudgeEnd({ selection, unit, onEdit }: PanelProps): Commands['nudge'] {
+  const end = selection.hole;
+  return (steps) => {
+    if (end !== 'mouth' && end !== 'foot') return;
+    const byMm = steps * SENSITIVITY_STEP[unit].mm;
+    onEdit({
+      label: `Move the ${end === 'foot' ? 'foot' : 'mouth end'}`,
+      change: (before) => (end === 'mouth' ? moveMouthEnd(before, byMm) : trimFoot(before, byMm)),
+      mergeKey: `nudge-${end}`,
+    });
   };
 }
 

@@ -14,6 +14,8 @@ export interface BenchCommands {
   stepPanel: (by: 1 | -1) => void;
   undo: () => void;
   redo: () => void;
+  fullLadder: () => void;
+  playReference: () => void;
   trySuggestion: () => void;
   putBack: () => void;
   removeHole: () => void;
@@ -84,6 +86,8 @@ const SINGLE: Record<string, (commands: BenchCommands) => void> = {
   n: (commands) => commands.stepNote(1),
   N: (commands) => commands.stepNote(-1),
   r: (commands) => commands.nextRegister(),
+  l: (commands) => commands.fullLadder(),
+  ' ': (commands) => commands.playReference(),
   t: (commands) => commands.trySuggestion(),
   '[': (commands) => commands.stepPanel(-1),
   ']': (commands) => commands.stepPanel(1),
@@ -104,7 +108,7 @@ interface Digits {
 }
 
 function single(event: KeyboardEvent, commands: BenchCommands, digits: Digits): boolean {
-  if (!isSingleKey(event, event.key) || isOwnArrow(event)) return false;
+  if (!isSingleKey(event, event.key) || isOwnArrow(event) || isOwnSpace(event)) return false;
   if (/^\d$/.test(event.key) && takeDigit(event, commands, digits)) return true;
   const command = SINGLE[event.key] ?? SINGLE[event.key.toLowerCase()];
   if (command === undefined) return false;
@@ -114,6 +118,15 @@ function single(event: KeyboardEvent, commands: BenchCommands, digits: Digits): 
 
 function isOwnArrow({ key, target }: KeyboardEvent): boolean {
   return key.startsWith('Arrow') && target instanceof Element && target.closest(OWN_ARROWS) !== null;
+}
+
+/** The space bar presses what has the focus, unless that is what is chosen already: then it would do nothing. */
+function isOwnSpace({ key, target }: KeyboardEvent): boolean {
+  if (key !== ' ' || !(target instanceof Element)) return false;
+  const control = target.closest('button, a, summary, [role="button"], [role="switch"], [role="tab"]');
+  if (control === null) return false;
+  const isChosen = control.getAttribute('aria-pressed') === 'true' && control.closest('[data-zone]') !== null;
+  return !isChosen;
 }
 
 /** A second figure soon after the first makes a number of two; a 0 by itself is the foot. */
