@@ -1,50 +1,7 @@
-import type { Locator, Page } from 'playwright-core';
 import { describe, expect } from 'vitest';
 import { expectAccessible, test } from '../support/browser-test.ts';
 import { signInThroughPage } from '../support/sign-in-page.ts';
-
-const WHISTLE = 'Wharf D whistle';
-
-const holeButton = (page: Page, number: number) =>
-  page.getByRole('button', { name: new RegExp(`^Hole ${number}, `) });
-
-/** What a hole's button says: where it is, how wide, and how its notes sound. */
-const spoken = (hole: Locator) => hole.getAttribute('aria-label');
-
-/** The header of a narrow window has one too, which is not to be seen here. */
-const savedNote = (page: Page) => page.getByText(/^Saved \d/).filter({ visible: true });
-
-async function openWhistle(page: Page): Promise<void> {
-  await page.getByRole('link', { name: 'Designs', exact: true }).click();
-  await page
-    .getByRole('link', { name: new RegExp(WHISTLE) })
-    .first()
-    .click();
-  await page.getByRole('heading', { level: 1, name: WHISTLE }).waitFor();
-  await page.getByRole('button', { name: /^Hole 3, .* cents (flat|sharp)/ }).waitFor();
-}
-
-async function drag(page: Page, hole: Locator, byPx: number): Promise<void> {
-  const box = await hole.boundingBox();
-  if (box === null) throw new Error('The hole is not on the screen.');
-  const x = box.x + box.width / 2;
-  const y = box.y + box.height / 2;
-  await page.mouse.move(x, y);
-  await page.mouse.down();
-  await page.mouse.move(x + byPx / 2, y);
-  await page.mouse.move(x + byPx, y);
-  await page.mouse.up();
-}
-
-/** Until a save that began after `version` has been answered: the server's own word, not the screen's. */
-async function expectStored(page: Page, text: (document: string) => boolean): Promise<void> {
-  const id = /\/designs\/(\d+)/.exec(page.url())?.[1] ?? '';
-  await expect
-    .poll(async () => text(await (await page.request.get(`/api/designs/${id}/draft`)).text()), {
-      timeout: 15_000,
-    })
-    .toBe(true);
-}
+import { drag, expectStored, holeButton, openWhistle, savedNote, spoken } from './bench-pages.ts';
 
 const holesIn = (draft: string) =>
   (JSON.parse(draft) as { document: { holes: unknown[] } }).document.holes.length;
@@ -117,6 +74,37 @@ describe('a maker at the workbench', () => {
       await expectAccessible(page);
     },
   );
+});
+
+describe('both ends of the instrument', () => {
+  test('the window is dragged toward the foot: the holes stay, every note rises, and Undo puts it back', async ({
+    page,
+  }) => {
+    await signInThroughPage(page, 'maker');
+    await openWhistle(page);
+    const window = page.getByRole('button', { name: /^Window, / });
+    const before = await spoken(window);
+    const hole = await spoken(holeButton(page, 4));
+    const place = /[\d.]+ mm from foot/.exec(hole ?? '')?.[0] ?? '';
+
+    await drag(page, window, 40);
+    await expect.poll(() => spoken(window)).not.toBe(before);
+    await expect.poll(async () => centsOf(await spoken(holeButton(page, 4)))).toBeGreaterThan(centsOf(hole));
+    expect(await spoken(holeButton(page, 4))).toContain(place);
+
+    await page.keyboard.press('Control+Z');
+    await expect.poll(() => spoken(holeButton(page, 4))).toBe(hole);
+  });
+
+  test('the foot is trimmed by the keys alone', async ({ page }) => {
+    await signInThroughPage(page, 'maker');
+    await openWhistle(page);
+    const foot = page.getByRole('button', { name: /^Foot, / });
+    const before = await spoken(foot);
+    await page.keyboard.press('0');
+    await page.keyboard.press('Alt+Shift+ArrowLeft');
+    await expect.poll(() => spoken(foot)).not.toBe(before);
+  });
 });
 
 describe('two people in one draft', () => {
