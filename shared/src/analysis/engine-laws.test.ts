@@ -4,7 +4,6 @@ import { chainImpedance } from '../acoustics/response/chain.ts';
 import type { Column, ColumnHole, ColumnMouth, HoleState } from '../acoustics/response/column.ts';
 import { coupledImpedance } from '../acoustics/response/input-impedance.ts';
 import { prepareColumn, tuneColumn, type PreparedColumn } from '../acoustics/response/prepared-column.ts';
-import { scanPhases } from '../acoustics/response/phase-scan.ts';
 import { findResonances } from '../acoustics/response/resonances.ts';
 
 const real = (min: number, max: number) => fc.double({ min, max, noNaN: true });
@@ -229,45 +228,4 @@ describe('laws of the engine over random bodies', () => {
       { numRuns: 40 },
     );
   });
-
-  it('misses no resonance that a scan in steps of 2 Hz finds, and finds none twice', () => {
-    fc.assert(
-      fc.property(bodies, (body) => {
-        const { column, states } = columnOf(body);
-        const { prepared, fingerings } = prepareColumn(column, [states]);
-        const maxima = prepared.playsMaxima;
-        const search = { count: 4, coupling: true, maxima };
-        const found = findResonances(prepared, fingerings, search)[0]!.map((r) => r.frequency);
-        const highest = Math.min(found.at(-1) ?? 0, 3000);
-        const slow = slowResonances(prepared, fingerings[0]!, { highest, maxima });
-        const below = found.filter((frequency) => frequency < highest - 2);
-        expect(below.length).toBe(slow.filter((frequency) => frequency < highest - 2).length);
-        below.forEach((frequency, i) => expect(Math.abs(frequency - slow[i]!)).toBeLessThan(2.01));
-        expect(scanPhases(prepared, fingerings, search)[0]!.track.count).toBeLessThan(400);
-      }),
-      { numRuns: 25 },
-    );
-  });
 });
-
-/** Places where the phase of the reflection falls through its level, by small steps and nothing clever. */
-function slowResonances(
-  prepared: PreparedColumn,
-  fingering: Int32Array,
-  { highest, maxima }: { highest: number; maxima: boolean },
-): number[] {
-  const found: number[] = [];
-  const unit = prepared.inputImpedance;
-  let before = NaN;
-  for (let frequency = 10; frequency <= highest + 2; frequency += 2) {
-    tuneColumn(prepared, frequency, true);
-    const at = coupledImpedance(prepared, fingering);
-    const re = prepared.cells[at]!;
-    const im = prepared.cells[at + 1]!;
-    const turned = Math.atan2(2 * im * unit, re * re + im * im - unit * unit) - (maxima ? 0 : Math.PI);
-    const phase = Math.atan2(Math.sin(turned), Math.cos(turned));
-    if (before > 0 && phase <= 0 && before - phase < Math.PI) found.push(frequency);
-    before = phase;
-  }
-  return found;
-}

@@ -3,7 +3,7 @@ import { EngineInputError } from '../engine-input-error.ts';
 import { chainImpedance } from './chain.ts';
 import { coupledImpedance } from './input-impedance.ts';
 import { countedPhase } from './phase-count.ts';
-import { PhaseTrack } from './phase-track.ts';
+import { nearestTurn, PhaseTrack } from './phase-track.ts';
 import { tuneColumn, tuneFingering, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
 
 export interface ResonanceSearch {
@@ -35,6 +35,9 @@ const LARGEST_RISE = 0.4;
 /** An interval looked into is settled once it is this share of the grid's and its step this small, rad. */
 const SETTLED_SHARE = 1 / 8;
 const SETTLED_STEP = 0.8;
+/** Where a phase turns round so near to a level, rad, the interval must be this share of the grid's. */
+const NEAR_LEVEL = 0.6;
+const TURNING_SHARE = 1 / 64;
 /** Share of the power that comes back, below which losses and radiation may let a pair of resonances vanish. */
 const LEAKING = 0.7;
 /** Hz; nothing in an instrument is narrower. */
@@ -46,6 +49,8 @@ const SLOW_FALL = 0.7;
 const VERY_SLOW_FALL = 0.3;
 /** A scan ends, though it passed fewer, where so many more resonances would lie if none had leaked away. */
 const LEAKED = 2;
+/** But no sooner than so many turns after the last it passed: above lost ones a part of the column may sound on. */
+const SILENT = 3.5;
 /** And where the bore's first cross mode begins to travel: wavenumber times radius there. */
 const CROSS_MODE = 1.84;
 
@@ -150,19 +155,28 @@ function sample({ prepared, fingering, search, track }: Probe, place: number, fr
   track.insert(place, { frequency, phase, reflected, counted: countedPhase(prepared, fingering) });
 }
 
-// Whether all resonances wanted lie below the last sample, or would if none had leaked away.
+// Whether all resonances wanted lie below the last sample, or would if none had leaked away and the column fell silent.
 function isThrough({ track, search }: Probe): boolean {
   const last = track.count - 1;
-  return (
-    cell(track.phases, last) <= levelOf(search.count, track, search.maxima) ||
-    cell(track.counts, last) <= levelOf(search.count + LEAKED, track, search.maxima)
-  );
+  if (cell(track.phases, last) <= levelOf(search.count, track, search.maxima)) return true;
+  const counted = cell(track.counts, last);
+  if (counted > levelOf(search.count + LEAKED, track, search.maxima)) return false;
+  const found = levelAbove(cell(track.phases, last), search.maxima);
+  let silent = last;
+  while (silent > 0 && cell(track.phases, silent) <= found) silent -= 1;
+  return cell(track.counts, silent) - counted >= 2 * Math.PI * SILENT;
 }
 
-// Halves the last interval, and its halves, until every step is sure.
+// The last level that a falling phase has passed: whole turns for maxima, odd halves of one for minima.
+function levelAbove(phase: number, maxima: boolean): number {
+  const level = maxima ? 0 : Math.PI;
+  return level + 2 * Math.PI * Math.ceil((phase - level) / (2 * Math.PI));
+}
+
+// Halves the last interval, and its halves, until every step is sure; the one before it too where the phase begins to rise.
 function settle(probe: Probe): void {
   const { track, prepared, search } = probe;
-  for (let i = track.count - 1; i > 0 && i < track.count;) {
+  for (let i = Math.max(track.count - 2, 1); i < track.count;) {
     if (isSettled(probe, i)) {
       i += 1;
       continue;
@@ -170,17 +184,34 @@ function settle(probe: Probe): void {
     const middle = (cell(track.frequencies, i - 1) + cell(track.frequencies, i)) / 2;
     tuneFingering(prepared, probe.fingering, middle, search.coupling);
     sample(probe, i, middle);
+    i = Math.max(i - 1, 1);
   }
 }
 
-function isSettled({ track, step }: Probe, i: number): boolean {
+function isSettled({ track, step, search }: Probe, i: number): boolean {
   const width = cell(track.frequencies, i) - cell(track.frequencies, i - 1);
+  if (width < NARROWEST) return true;
   const turn = cell(track.phases, i) - cell(track.phases, i - 1);
   const counted = cell(track.counts, i) - cell(track.counts, i - 1);
-  if (Math.abs(counted - turn) < Math.PI && turn > -LARGEST_FALL && turn < LARGEST_RISE) return true;
+  if (Math.abs(counted - turn) < Math.PI && turn > -LARGEST_FALL && turn < LARGEST_RISE) {
+    return width <= TURNING_SHARE * step || !mayTouchUnseen(track, i, search.maxima);
+  }
   const reflected = Math.min(cell(track.reflected, i), cell(track.reflected, i - 1));
-  const leaks = reflected < LEAKING && width <= SETTLED_SHARE * step;
-  return (leaks && Math.abs(turn) <= SETTLED_STEP) || width < NARROWEST;
+  return reflected < LEAKING && width <= SETTLED_SHARE * step && Math.abs(turn) <= SETTLED_STEP;
+}
+
+// Whether the phase turns round, or lost a turn, so near to a level that it could reach it between two samples.
+function mayTouchUnseen(track: PhaseTrack, i: number, maxima: boolean): boolean {
+  if (!turnsRound(track, i - 1) && !turnsRound(track, i) && !turnsRound(track, i + 1)) return false;
+  const level = maxima ? 0 : Math.PI;
+  const distance = (phase: number) => Math.abs(nearestTurn(level, phase) - phase);
+  return Math.min(distance(cell(track.phases, i)), distance(cell(track.phases, i - 1))) < NEAR_LEVEL;
+}
+
+function turnsRound({ phases, counts, count }: PhaseTrack, i: number): boolean {
+  if (i < 1 || i >= count) return false;
+  const turn = cell(phases, i) - cell(phases, i - 1);
+  return turn > 0 || Math.abs(cell(counts, i) - cell(counts, i - 1) - turn) >= Math.PI;
 }
 
 // How many grid steps on the next sample lies: more where the phase falls slowly.
