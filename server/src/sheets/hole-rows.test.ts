@@ -34,6 +34,21 @@ describe('the rows of the hole table', () => {
     const [row] = holeRows(buildSheetInput({ document }));
     expect([row?.pilot?.diameterMm, row?.finalDrill?.diameterMm]).toEqual([pilotMm, finalMm]);
   });
+
+  it('take the exact drill of another system where there is one', () => {
+    // 9/32 inch is 7.14375 mm: ASME B94.11M, fractional sizes.
+    const document = buildWhistle({ holes: [buildHole({ id: 'a', positionMm: 200, diameterMm: 7.14375 })] });
+    expect(holeRows(buildSheetInput({ document }))[0]?.finalDrill?.diameterMm).toBeCloseTo(7.14375, 5);
+  });
+
+  it('differ by what stands in the column of positions, not by digits that are not printed', () => {
+    const holes = [
+      buildHole({ id: 'a', positionMm: 265 - 147.06 }),
+      buildHole({ id: 'b', positionMm: 265 - 123.14 }),
+    ];
+    const [, upper] = holeRows(buildSheetInput({ document: buildWhistle({ holes }) }));
+    expect(upper?.fromLastMm).toBeCloseTo(147.1 - 123.1, 9);
+  });
 });
 
 describe('a hole on paper', () => {

@@ -1,7 +1,14 @@
 import type { DesignSensitivities } from '#shared/analysis/prediction.ts';
 import type { Fingering } from '#shared/document/design-document.ts';
 import { boreEnds, chimneyMm } from '#shared/document/profile.ts';
-import { drillsOf, nearestDrills, type Drill, type DrillSetName } from '#shared/lengths/drills.ts';
+import {
+  drillsOf,
+  MM_PER_INCH,
+  nearestDrills,
+  type Drill,
+  type DrillSetName,
+} from '#shared/lengths/drills.ts';
+import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { benchPositionMm, numberedHoles, type NumberedHole } from './bench-position.ts';
 import type { SheetInput } from './sheet-input.ts';
 import { writingOf } from './sheet-lengths.ts';
@@ -37,6 +44,8 @@ const ORDINARY_DRILLS: Record<'mm' | 'inch', DrillSetName[]> = {
   inch: ['inch-fraction', 'number', 'letter'],
 };
 
+const EVERY_DRILL = drillsOf([...ORDINARY_DRILLS.mm, ...ORDINARY_DRILLS.inch]);
+
 export function ordinaryDrills(input: SheetInput): Drill[] {
   return drillsOf(ORDINARY_DRILLS[writingOf(input).unit]);
 }
@@ -47,14 +56,24 @@ function drillUpTo(diameterMm: number, drills: readonly Drill[]): Drill | null {
   return exact ?? narrower;
 }
 
+/** A length as far as its print shows it: a tenth of a millimetre, a thousandth of an inch. */
+function asPrinted(mm: number, unit: LengthUnit): number {
+  return unit === 'mm'
+    ? Math.round(mm * 10) / 10
+    : (Math.round((mm / MM_PER_INCH) * 1000) / 1000) * MM_PER_INCH;
+}
+
 /** The rows of the hole table in drilling order: from the foot upward. */
 export function holeRows(input: SheetInput): HoleRow[] {
   const { document, sensitivities, workshop } = input;
   const drills = ordinaryDrills(input);
+  const { unit } = writingOf(input);
   const { footMm } = boreEnds(document);
   const fromFootUp = numberedHoles(document).reverse();
   return fromFootUp.map((entry, at) => {
     const { hole, index } = entry;
+    const reference = (positionMm: number) =>
+      asPrinted(benchPositionMm(document, positionMm, workshop.referenceEnd), unit);
     const last = fromFootUp[at - 1]?.hole.positionMm ?? (workshop.referenceEnd === 'foot' ? footMm : null);
     const note = tunedNote(input, entry);
     const cents = (path: string) => centsPerTenth(sensitivities, note, `holes.${index}.${path}`);
@@ -62,10 +81,12 @@ export function holeRows(input: SheetInput): HoleRow[] {
       ...entry,
       fromReferenceMm: benchPositionMm(document, hole.positionMm, workshop.referenceEnd),
       fromFootMm: footMm - hole.positionMm,
-      fromLastMm: last === null ? null : last - hole.positionMm,
+      // From the figures as they are printed, so that whoever adds them up comes out where the column says.
+      fromLastMm: last === null ? null : Math.abs(reference(hole.positionMm) - reference(last)),
       pilot: drillUpTo(hole.diameterMm * PILOT_SHARE, drills),
       then: drillUpTo(hole.diameterMm * NEXT_SHARE, drills),
-      finalDrill: drillUpTo(hole.diameterMm, drills),
+      // A hole laid out for a drill of another system is bored with that drill.
+      finalDrill: nearestDrills(hole.diameterMm, EVERY_DRILL).exact ?? drillUpTo(hole.diameterMm, drills),
       chimneyMm: chimneyMm(document, hole),
       centsWider: cents('diameterMm'),
       centsFootward: cents('positionMm'),
