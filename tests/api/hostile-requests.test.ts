@@ -110,6 +110,20 @@ describe('a document that cannot be read', () => {
     },
   );
 
+  it.each([String.raw`"a\u0000b"`, String.raw`"a\u001bb"`, String.raw`"a\bb"`])(
+    'refuses a control character in a name: %s',
+    async (json) => {
+      expectProblem(await postRaw(withValue('name', json)), 400, 'bad-request');
+      await expectNothingKept();
+    },
+  );
+
+  it.each([101, 5000, 200_000])('refuses a body nested %d deep', async (depth) => {
+    const text = `{"document":${'['.repeat(depth)}${']'.repeat(depth)}}`;
+    expectProblem(await postRaw(text), 400, 'bad-request');
+    await expectNothingKept();
+  });
+
   it.each(['\ud83c\udfb6', String.raw`C:\ud800`])('keeps %s in a name, which is whole', async (name) => {
     const elsewhere = await signInAs(server, await buildPerson(server, { role: 'maker' }));
     const answer = await elsewhere.post('/api/designs').send({ document: { ...whistleDocument(), name } });

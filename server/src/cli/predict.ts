@@ -71,7 +71,8 @@ function readText(file: string): string {
 function readDesign(file: string): DesignDocument {
   let json: unknown;
   try {
-    json = JSON.parse(readText(file));
+    // Some editors begin a file with a byte order mark, which JSON does not allow.
+    json = JSON.parse(readText(file).replace(/^\uFEFF/, ''));
   } catch (error) {
     if (error instanceof CommandFault) throw error;
     const reason = error instanceof Error ? error.message : String(error);

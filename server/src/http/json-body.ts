@@ -10,6 +10,12 @@ const LARGEST_BODY = 1_000_000;
  */
 const HALF_CHARACTER = /(?<!\\)(?:\\\\)*\\ud[89a-f][0-9a-f]{2}/;
 
+/** Deeper than any document goes; what reads bodies after this calls itself for every level. */
+const DEEPEST = 100;
+
+/** A control character as `JSON.stringify` writes it, line ends and tabs apart: nothing that a hand types. */
+const CONTROL_CHARACTER = /(?<!\\)(?:\\\\)*\\(?:u00[01][0-9a-f]|[bf])/;
+
 const tooLarge = () =>
   new HttpError(413, 'too-large', 'Too large', {
     detail:
@@ -31,17 +37,37 @@ const wrongType = () =>
  */
 export async function readJsonBody(req: IncomingMessage): Promise<unknown> {
   refuseHeaders(req);
-  const text = decode(await collect(req));
+  const sent = decode(await collect(req));
   let body: unknown;
   try {
-    body = JSON.parse(text);
+    body = JSON.parse(sent);
   } catch {
     throw badRequest('The body of the request is not JSON. Nothing was kept.');
   }
-  if (HALF_CHARACTER.test(JSON.stringify(body))) {
+  if (depthOf(body) > DEEPEST) {
+    throw badRequest(`The body of the request is nested more than ${DEEPEST} deep. Nothing was kept.`);
+  }
+  const text = JSON.stringify(body);
+  if (CONTROL_CHARACTER.test(text)) {
+    throw badRequest('A text holds a control character. Type it again. Nothing was kept.');
+  }
+  if (HALF_CHARACTER.test(text)) {
     throw badRequest('A text holds half a character. Type it again. Nothing was kept.');
   }
   return body;
+}
+
+/** Levels of lists and objects, no further than one beyond the deepest allowed; level by level, not by recursion. */
+function depthOf(body: unknown): number {
+  let level: unknown[] = [body];
+  let depth = 0;
+  while (level.length > 0 && depth <= DEEPEST) {
+    level = level.flatMap((value): unknown[] =>
+      typeof value === 'object' && value !== null ? Object.values(value) : [],
+    );
+    depth += 1;
+  }
+  return depth;
 }
 
 function refuseHeaders({ headers }: IncomingMessage): void {
