@@ -1,7 +1,7 @@
 import type { Fingering } from '#shared/document/design-document.ts';
 import { FingeringCircle } from './FingeringCircle.tsx';
 import { holeMark } from './fingering-marks.ts';
-import type { LabelledHole } from './hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 
 interface FingeringDotsProps {
   fingering: Fingering;

@@ -1,5 +1,5 @@
 import type { DesignDocument, Fingering, ToneHole } from '#shared/document/design-document.ts';
-import { WIDEST_HOLE_SHARE } from '#shared/document/document-faults.ts';
+import { WIDEST_HOLE_SHARE } from '#shared/document/hole-faults.ts';
 import { boreEnds, chimneyMm, diameterAt } from '#shared/document/profile.ts';
 
 /** Widest hole that the bore there allows, mm, on a tenth. */

@@ -1,6 +1,6 @@
 import type { DesignPrediction, ImpedanceCurve } from '#shared/analysis/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import type { DocumentFault } from '#shared/document/document-faults.ts';
+import type { DocumentFault } from '#shared/document/fault-words.ts';
 import type { WiderHere } from './wider-here.ts';
 
 export interface PredictionOptions {

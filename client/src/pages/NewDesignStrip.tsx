@@ -5,7 +5,7 @@ import { BenchDefs } from '../bench/BenchDefs.tsx';
 import { benchFrame } from '../bench/bench-geometry.ts';
 import { WHOLE } from '../bench/bench-view.ts';
 import { drawnBody } from '../bench/drawn-body.ts';
-import { labelledHoles } from '../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { BodyDrawing } from '../features/strip/BodyDrawing.tsx';
 import { HoleDrawing } from '../features/strip/HoleDrawing.tsx';
 import { useElementWidth } from '../ui/use-element-width.ts';

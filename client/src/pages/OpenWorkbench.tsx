@@ -128,11 +128,17 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
           )}
         </div>
       </div>
-      <DraftBands save={draft.save} keptOnDevice={draft.keptOnDevice} mismatchCents={draft.mismatchCents} />
+      <DraftBands
+        save={draft.save}
+        keptOnDevice={draft.keptOnDevice}
+        mismatchCents={draft.mismatchCents}
+        isToldBelow={draft.predictionFailure !== null}
+      />
       {draft.predictionFailure !== null && (
         <FailureLine
           faults={draft.predictionFailure.faults}
           document={document}
+          unit={unit}
           onChooseHole={(hole) => bench.onSelect({ hole })}
         />
       )}

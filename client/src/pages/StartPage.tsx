@@ -12,7 +12,7 @@ export function StartPage() {
       <div className="px-margin mx-auto w-full max-w-140 py-8">
         <h1 className="text-page font-semibold">Create a workshop</h1>
         <p className="text-ink2 mt-1 mb-6">
-          You become its owner. Everything here can be changed later. You have one already?{' '}
+          You become its owner. The workshop&rsquo;s name can be changed later. You have one already?{' '}
           <Link to={paths.signIn()} className="text-link whitespace-nowrap">
             Sign in
           </Link>

@@ -6,7 +6,8 @@ import type { DesignDocument, Fingering } from '../document/design-document.ts';
 import { resonanceHeight } from './ladder.ts';
 import type { Notice } from './prediction.ts';
 import { isOutside } from './range.ts';
-import { holeMeasures, holeTitle } from './hole-notices.ts';
+import { holeTitle } from '../document/hole-labels.ts';
+import { holeMeasures } from './hole-notices.ts';
 import type { DesignColumn } from './to-column.ts';
 import { titleInSentence } from '../document/title-in-sentence.ts';
 
@@ -100,7 +101,7 @@ function halfCoverNotices({ document, design, states }: FingeringFacts): Notice[
   return states.flatMap((state, i): Notice[] => {
     const hole = design.holes[i];
     if (state.kind !== 'half' || hole === undefined) return [];
-    const title = titleInSentence(holeTitle(document, hole));
+    const title = titleInSentence(holeTitle(document, hole.id));
     const { radius, outer, chimney } = holeMeasures(document, hole);
     const notices: Notice[] = [];
     if (state.from === 'end') {

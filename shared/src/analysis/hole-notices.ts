@@ -2,6 +2,7 @@ import { PAD_RANGE } from '../acoustics/tone-hole/pad.ts';
 import { TONE_HOLE_RANGE } from '../acoustics/tone-hole/tone-hole-range.ts';
 import { UNDERCUT_RANGE, UNUSUAL_UNDERCUT_CENTS } from '../acoustics/tone-hole/undercut.ts';
 import type { DesignDocument, ToneHole } from '../document/design-document.ts';
+import { holeTitle } from '../document/hole-labels.ts';
 import { chimneyMm, diameterAt } from '../document/profile.ts';
 import type { Notice } from './prediction.ts';
 import { isOutside } from './range.ts';
@@ -20,19 +21,13 @@ interface HoleMeasures {
 
 /** Notices about one hole: each formula that is asked outside the range it was made from. */
 export function holeNotices(document: DesignDocument, hole: ToneHole): Notice[] {
-  const title = holeTitle(document, hole);
+  const title = holeTitle(document, hole.id);
   const measures = holeMeasures(document, hole);
   return [
     ...sizeNotices(title, measures),
     ...undercutNotices(title, hole, measures),
     ...padNotices(title, hole, measures),
   ].map((notice) => ({ ...notice, hole: hole.id }));
-}
-
-/** What a maker calls a hole. */
-export function holeTitle(document: DesignDocument, hole: ToneHole): string {
-  const place = document.holes.findIndex((other) => other.id === hole.id) + 1;
-  return `Hole ${hole.name === '' ? String(place) : hole.name}`;
 }
 
 export function holeMeasures(document: DesignDocument, hole: ToneHole): HoleMeasures {

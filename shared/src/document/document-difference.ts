@@ -1,3 +1,4 @@
+import { holeTitle } from './hole-labels.ts';
 import type { DesignDocument } from './design-document.ts';
 
 /** One value that differs between two documents. */
@@ -159,8 +160,8 @@ function labelOf(path: readonly string[], before: DesignDocument, after: DesignD
 }
 
 function holeLabel(id: string, before: DesignDocument, after: DesignDocument): string {
-  const hole = [...after.holes, ...before.holes].find((item) => item.id === id);
-  return `Hole ${hole === undefined || hole.name === '' ? id : hole.name}`;
+  const has = after.holes.some((hole) => hole.id === id) ? after : before;
+  return holeTitle(has, id);
 }
 
 function fingeringLabel(id: string, before: DesignDocument, after: DesignDocument): string {

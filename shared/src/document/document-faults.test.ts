@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { designDocumentSchema, type DesignDocument } from './design-document.ts';
-import { documentFaults, woodBetweenMm } from './document-faults.ts';
+import { documentFaults } from './document-faults.ts';
 import { readDocument } from './read-document.ts';
 
 const whistle = (): DesignDocument =>
@@ -81,22 +81,22 @@ describe('what is wrong is named by field, with what would do', () => {
     [
       'crossing stations',
       (d) => d.bore.stations.push({ positionMm: 200, diameterMm: 12 }),
-      'bore.stations.2.positionMm: Station 3 of the bore lies before station 2. Give a position of 265.0 or more.',
+      'bore.stations.2.positionMm: Station 3 of the bore lies before station 2. Move it footward of 265.0 from the mouth end.',
     ],
     [
       'crossing stations outside',
       (d) => d.outside.stations.splice(1, 0, { positionMm: 300, diameterMm: 17 }),
-      'outside.stations.2.positionMm: Station 3 of the outside lies before station 2. Give a position of 300.0 or more.',
+      'outside.stations.2.positionMm: Station 3 of the outside lies before station 2. Move it footward of 300.0 from the mouth end.',
     ],
     [
       'three stations at one place',
       (d) => d.bore.stations.push({ positionMm: 265, diameterMm: 12 }, { positionMm: 265, diameterMm: 11 }),
-      'bore.stations.3.positionMm: Three stations of the bore lie at 265.0. A step needs two.',
+      'bore.stations.3.positionMm: Three stations of the bore lie at 265.0 from the mouth end. A step needs two.',
     ],
     [
       'a bore that does not begin at the block face',
       (d) => void (d.bore.stations[0]!.positionMm = 0),
-      'bore.stations.0.positionMm: The bore begins at the block face, 4.2 before the lip. Make its first position -4.2.',
+      'bore.stations.0.positionMm: The bore begins at the block face, 4.2 before the lip. Begin its table there.',
     ],
     [
       'a bore wider than the outside',
@@ -106,17 +106,17 @@ describe('what is wrong is named by field, with what would do', () => {
     [
       'a hole outside the bore',
       (d) => void (d.holes[1]!.positionMm = 270),
-      'holes.1.positionMm: Hole 2 lies outside the bore. Place it between 4.3 and 260.7 from the mouth end.',
+      'holes.1.positionMm: Hole 2 lies outside the bore, or cuts into its end. Place it between 7.6 and 260.7 from the mouth end.',
     ],
     [
       'a hole over the edge of the foot',
       (d) => void (d.holes[1]!.positionMm = 263),
-      'holes.1.positionMm: Hole 2 lies outside the bore. Place it between 4.3 and 260.7 from the mouth end.',
+      'holes.1.positionMm: Hole 2 lies outside the bore, or cuts into its end. Place it between 7.6 and 260.7 from the mouth end.',
     ],
     [
       'a hole under the window',
       (d) => void (d.holes[0]!.positionMm = -1.5),
-      'holes.0.positionMm: Hole 1 lies outside the bore. Place it between 3.5 and 261.5 from the mouth end.',
+      'holes.0.positionMm: Hole 1 lies outside the bore, or cuts into its end. Place it between 6.8 and 261.5 from the mouth end.',
     ],
     ...[-40, -10, 0, 8].map((positionMm): [string, Change, string] => [
       `a hole ${positionMm} from an embouchure hole, before it or in it`,
@@ -125,7 +125,7 @@ describe('what is wrong is named by field, with what would do', () => {
         for (const profile of [d.bore, d.outside]) profile.stations[0]!.positionMm = -60;
         d.holes[0]!.positionMm = positionMm;
       },
-      'holes.0.positionMm: Hole 1 lies outside the bore. Place it between 8.8 and 261.5 from the mouth end.',
+      'holes.0.positionMm: Hole 1 lies outside the bore, or cuts into its end. Place it between 8.8 and 261.5 from the mouth end.',
     ]),
     [
       'a hole wider than the bore',
@@ -283,18 +283,5 @@ describe('reading a document', () => {
 
   it.each([null, 7, 'text', [], {}])('refuses %j', (input) => {
     expect(readDocument(input).status).toBe('refused');
-  });
-});
-
-describe('wood between two holes', () => {
-  it('is measured at the bore wall, round the tube too', () => {
-    const document = whistle();
-    const [a, b] = document.holes;
-    expect(woodBetweenMm(document, a!, b!)).toBeCloseTo(21.9 - 7.75, 9);
-    expect(woodBetweenMm(document, a!, { ...a!, angleDeg: 180 })).toBeCloseTo(Math.PI * 6.35 - 7, 9);
-    expect(woodBetweenMm(document, { ...a!, angleDeg: 350 }, { ...a!, angleDeg: 10 })).toBeCloseTo(
-      (6.35 * Math.PI) / 9 - 7,
-      9,
-    );
   });
 });

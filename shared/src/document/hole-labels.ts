@@ -1,4 +1,4 @@
-import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
+import type { DesignDocument, ToneHole } from './design-document.ts';
 
 export interface LabelledHole {
   hole: ToneHole;
@@ -45,4 +45,9 @@ function labelOf(hole: ToneHole, next: (kind: string) => number): { label: strin
   }
   const label = own === '' ? String(count) : own;
   return { label, title: `Hole ${hole.name === '' ? label : hole.name}` };
+}
+
+/** What a maker calls one hole: `Hole 4`, `Thumb hole`. */
+export function holeTitle(document: DesignDocument, id: string): string {
+  return labelledHoles(document).find(({ hole }) => hole.id === id)?.title ?? `Hole ${id}`;
 }

@@ -1,6 +1,7 @@
 import { designDocumentSchema, type DesignDocument } from './design-document.ts';
 import { plainWords } from './plain-words.ts';
-import { documentFaults, type DocumentFault } from './document-faults.ts';
+import type { DocumentFault } from './fault-words.ts';
+import { documentFaults } from './document-faults.ts';
 
 export type DocumentReading =
   { status: 'read'; document: DesignDocument } | { status: 'refused'; faults: DocumentFault[] };

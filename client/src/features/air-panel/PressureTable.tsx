@@ -4,7 +4,7 @@ import { boreEnds } from '#shared/document/profile.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { FingeringCircle } from '../../bench/FingeringCircle.tsx';
 import { holeMark, spokenMark } from '../../bench/fingering-marks.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import type { StudyView } from '../../engine/use-study.ts';

@@ -1,7 +1,7 @@
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { boreEnds, diameterAt } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';
 

@@ -2,6 +2,7 @@ import { useMemo, useState } from 'react';
 import type { Draft } from '#shared/contract/designs.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { documentFaults } from '#shared/document/document-faults.ts';
+import { wordsFromFoot } from '#shared/document/fault-words.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Dialog, DialogActions } from '../../ui/Dialog.tsx';
@@ -28,7 +29,7 @@ export function ConflictDialog({ mine, newer, ancestor, unit, onSettle }: Confli
   const choices = { ...firstChoices(rows), ...chosen };
   const open = rows.filter((row) => choices[row.key] === undefined).length;
   const merged = mergedDocument(mine, rows, choices);
-  const fault = open === 0 ? documentFaults(merged)[0] : undefined;
+  const fault = open === 0 ? documentFaults(merged, wordsFromFoot(unit))[0] : undefined;
   return (
     <Dialog
       open

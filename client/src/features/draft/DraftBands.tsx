@@ -6,10 +6,12 @@ interface DraftBandsProps {
   save: SaveState;
   keptOnDevice: boolean;
   mismatchCents: number | null;
+  /** The page says already what is wrong with the drawing. */
+  isToldBelow: boolean;
 }
 
 /** What has to be known about the draft beyond its time: one line each, across the page, gone when it is mended. */
-export function DraftBands({ save, keptOnDevice, mismatchCents }: DraftBandsProps) {
+export function DraftBands({ save, keptOnDevice, mismatchCents, isToldBelow }: DraftBandsProps) {
   return (
     <div role="status" aria-live="polite">
       {save.status === 'waiting' && (
@@ -19,8 +21,9 @@ export function DraftBands({ save, keptOnDevice, mismatchCents }: DraftBandsProp
       )}
       {save.status === 'refused' && (
         <Band>
-          <b>The workshop did not accept the last change.</b> {save.problem.detail} What you typed stays here.
-          {save.problem.errors !== undefined && <Reasons errors={save.problem.errors} />}
+          <b>The workshop did not accept the last change.</b> {!isToldBelow && save.problem.detail} What you
+          typed stays here.
+          {!isToldBelow && save.problem.errors !== undefined && <Reasons errors={save.problem.errors} />}
         </Band>
       )}
       {!keptOnDevice && save.status !== 'saved' && (

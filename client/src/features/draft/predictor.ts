@@ -1,7 +1,7 @@
 import type { DesignPrediction, DesignSensitivities } from '#shared/analysis/prediction.ts';
 import type { StoredPrediction } from '#shared/contract/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import type { DocumentFault } from '#shared/document/document-faults.ts';
+import type { DocumentFault } from '#shared/document/fault-words.ts';
 import type { PredictionOptions } from '../../engine/engine-answers.ts';
 import type { PredictionEngine } from './prediction-engine.ts';
 import { largestDifferenceCents } from './prediction-difference.ts';

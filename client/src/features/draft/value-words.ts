@@ -3,7 +3,7 @@ import { fromFootMm } from '#shared/document/profile.ts';
 import { printExactLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { formatCents } from '#shared/music/cents.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 
 /** Reads a value of one document aloud: lengths from its own foot, holes by what stands over them. */
 export interface Reader {

@@ -1,7 +1,7 @@
 import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { memo, useMemo, useState } from 'react';
 import { printLength } from '#shared/lengths/print-length.ts';
-import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
+import { labelledHoles, type LabelledHole } from '#shared/document/hole-labels.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';
@@ -180,7 +180,7 @@ function TableCell({ row, place, shift, labelled, next, top, ...props }: TableCe
   return (
     <td className="relative p-0">
       <div
-        className="absolute bottom-0 left-1/2 flex items-center justify-center"
+        className="absolute bottom-0 left-1/2 flex items-center justify-center has-[[aria-invalid]]:z-20"
         style={{ top, width, transform: `translateX(${shift - width / 2}px)` }}
       >
         {labelled !== undefined && row.editable !== undefined ? (

@@ -2,7 +2,7 @@ import type { DesignDocument } from '#shared/document/design-document.ts';
 import { boreEnds, chimneyMm, diameterAt, fromFootMm } from '#shared/document/profile.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { changeHole, snapPosition, widestHoleMm, withUndercut } from '../../bench/hole-edits.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import { centsPerStep, leadingNote, SENSITIVITY_STEP } from '../../bench/hole-sensitivity.ts';
 import type { HungNote } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';

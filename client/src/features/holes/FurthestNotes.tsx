@@ -1,7 +1,7 @@
 import { formatCents } from '#shared/music/cents.ts';
 import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { bandOf } from '../../bench/band-of.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import type { HungNote } from '../../bench/hung-notes.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';

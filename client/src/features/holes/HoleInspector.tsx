@@ -3,7 +3,7 @@ import type { DesignDocument } from '#shared/document/design-document.ts';
 import { boreEnds } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
-import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
+import { labelledHoles, type LabelledHole } from '#shared/document/hole-labels.ts';
 import { leadingNote } from '../../bench/hole-sensitivity.ts';
 import { hungNotes, notesOfColumn, type HungNote } from '../../bench/hung-notes.ts';
 import { MOUTH_WORDS } from '../../bench/mouth-words.ts';

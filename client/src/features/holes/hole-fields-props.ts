@@ -1,4 +1,4 @@
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import type { SuggestionDesk } from './use-suggestion-desk.ts';
 

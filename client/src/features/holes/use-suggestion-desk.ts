@@ -1,7 +1,7 @@
 import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { useMemo, useState } from 'react';
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { leadingNote } from '../../bench/hole-sensitivity.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';

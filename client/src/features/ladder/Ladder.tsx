@@ -123,13 +123,19 @@ function RungWords({
 const decibels = (strength: number) => `${strength < -0.5 ? '−' : ''}${Math.abs(strength).toFixed(0)} dB`;
 
 function RungDrawing({ placed }: { placed: PlacedRung }) {
-  const { rung, y, multipleY, share } = placed;
+  const { rung, y, multipleY, share, held } = placed;
   const end = LEFT + (RIGHT - LEFT) * share;
   const look = rung.weak && 'is-weak';
   return (
     <>
       <path d={`M${LEFT} ${multipleY}H${RIGHT}`} className="bench-multiple" />
       <path d={`M${LEFT} ${y}H${end}`} className={classNames('bench-rung', look)} />
+      {held !== 0 && (
+        <path
+          d={`M${end + 8} ${y + held * 2}l4.5 ${held * -4.5}l4.5 ${held * 4.5}`}
+          className="bench-rung-held"
+        />
+      )}
       <circle cx={end} cy={y} r={3.2} className={classNames('bench-rung-end', look)} />
       <text x={LEFT - 8} y={y + 4.5} textAnchor="end" className="bench-label bench-label-strong">
         {rung.mode}

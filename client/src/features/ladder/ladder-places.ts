@@ -6,6 +6,8 @@ export interface PlacedRung {
   multipleY: number;
   /** Where the resonance stands: moved from its multiple by its cents. */
   y: number;
+  /** Further off than the drawing shows: held at the end of its room, toward −1 below or 1 above. */
+  held: -1 | 0 | 1;
   /** Share of the full length: 1 at 0 dB, 0 at −30 dB. */
   share: number;
 }
@@ -18,6 +20,8 @@ export interface LadderPlaces {
 
 /** A resonance is moved by this share of the spacing for every 100 cents. */
 const SHARE_PER_100_CENTS = 0.42;
+/** Held where it would run into the next multiple's room, share of the spacing. */
+const MOST_SHARE = 0.45;
 const NOTHING_AT_DB = -30;
 
 interface LadderSize {
@@ -40,11 +44,18 @@ export function ladderPlaces(
     rungs: shown.map((rung, index) => ({
       rung,
       multipleY: multipleY(index),
-      y: multipleY(index) - (spacing * SHARE_PER_100_CENTS * rung.centsFromMultiple) / 100,
+      ...placeFrom(multipleY(index), spacing, rung.centsFromMultiple),
       share: Math.min(1, Math.max(0.02, 1 - rung.strength / NOTHING_AT_DB)),
     })),
     cutoffY: cutoffY(prediction, shown, { top, at: multipleY }),
   };
+}
+
+function placeFrom(multipleY: number, spacing: number, cents: number): Pick<PlacedRung, 'y' | 'held'> {
+  const share = (SHARE_PER_100_CENTS * cents) / 100;
+  if (Math.abs(share) <= MOST_SHARE) return { y: multipleY - spacing * share, held: 0 };
+  const held = share > 0 ? 1 : -1;
+  return { y: multipleY - spacing * MOST_SHARE * held, held };
 }
 
 /** The cutoff stands between the exact multiples it lies between. */

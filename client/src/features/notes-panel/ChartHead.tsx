@@ -1,4 +1,4 @@
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import type { NotesLayout } from './note-lane.ts';
 

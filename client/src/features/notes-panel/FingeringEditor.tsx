@@ -1,6 +1,6 @@
 import type { Fingering } from '#shared/document/design-document.ts';
 import { readNoteName, printNoteName } from '#shared/music/note-name.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { Button } from '../../ui/Button.tsx';
 import { NumberField } from '../../ui/NumberField.tsx';

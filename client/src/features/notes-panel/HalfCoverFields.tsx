@@ -1,5 +1,5 @@
 import type { Fingering } from '#shared/document/design-document.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import { NumberField } from '../../ui/NumberField.tsx';
 import { Segment } from '../../ui/Segment.tsx';
 import { percentFormat } from '../../ui/percent-format.ts';

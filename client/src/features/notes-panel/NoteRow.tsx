@@ -2,7 +2,7 @@ import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { memo, useEffect, useRef, type KeyboardEvent, type ReactNode } from 'react';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { formatCents } from '#shared/music/cents.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';

@@ -1,5 +1,5 @@
 import { useMemo, type ReactNode } from 'react';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';
 import { chartRows, type ChartRow } from './chart-rows.ts';

@@ -2,7 +2,7 @@ import { memo } from 'react';
 import type { Fingering } from '#shared/document/design-document.ts';
 import { FingeringCircle } from '../../bench/FingeringCircle.tsx';
 import { holeMark, spokenMark } from '../../bench/fingering-marks.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 
 interface TapCircleProps {
   /** undefined: a column of no hole, which has no circle. */

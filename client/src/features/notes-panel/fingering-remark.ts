@@ -1,6 +1,6 @@
 import type { DesignDocument, Fingering } from '#shared/document/design-document.ts';
 import { holeMark } from '../../bench/fingering-marks.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 
 /** What is special about a fingering, in two or three words; empty for the plain ones. */
 export function fingeringRemark(

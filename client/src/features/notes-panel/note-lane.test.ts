@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { benchFrame, benchGeometry } from '../../bench/bench-geometry.ts';
 import { WHOLE } from '../../bench/bench-view.ts';
 import { drawnBody } from '../../bench/drawn-body.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { whistleDocument } from '../../../../tests/support/whistle-document.ts';
 import { fingeringRemark } from './fingering-remark.ts';
 import { notesLayout } from './note-lane.ts';

@@ -2,7 +2,7 @@ import type { Fingering } from '#shared/document/design-document.ts';
 import type { BenchColumn, BenchGeometry } from '../../bench/bench-geometry.ts';
 import { FingeringCircle } from '../../bench/FingeringCircle.tsx';
 import { holeMark } from '../../bench/fingering-marks.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import { leaderLanes } from '../../bench/leader-lanes.ts';
 import { classNames } from '../../ui/class-names.ts';
 

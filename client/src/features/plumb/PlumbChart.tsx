@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import { bandOf } from '../../bench/band-of.ts';
 import { FingeringDots } from '../../bench/FingeringDots.tsx';
-import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
+import { labelledHoles, type LabelledHole } from '#shared/document/hole-labels.ts';
 import { hungNotes, type HungNote } from '../../bench/hung-notes.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';

@@ -1,7 +1,7 @@
 import { memo } from 'react';
 import { formatCents } from '#shared/music/cents.ts';
 import { spokenNote } from '#shared/music/note-name.ts';
-import type { LabelledHole } from '../../bench/hole-labels.ts';
+import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import type { HungNote } from '../../bench/hung-notes.ts';
 
 interface PlumbTableProps {

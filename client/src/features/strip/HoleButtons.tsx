@@ -2,7 +2,7 @@ import { useMemo } from 'react';
 import { fromFootMm } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { BodyShape } from '../../bench/drawn-body.ts';
-import { labelledHoles, type LabelledHole } from '../../bench/hole-labels.ts';
+import { labelledHoles, type LabelledHole } from '#shared/document/hole-labels.ts';
 import { hungNotes, notesOfColumn } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { spokenHungNote } from '../../bench/spoken-pitch.ts';

@@ -5,7 +5,7 @@ import { columnOf } from '../../bench/bench-geometry.ts';
 import type { BenchView } from '../../bench/bench-view.ts';
 import { snapToDrill } from '../../bench/drill-choice.ts';
 import { addHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { BodyDrawing } from './BodyDrawing.tsx';
 import { EndGrips } from './EndGrips.tsx';

@@ -1,12 +1,12 @@
 import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { useMemo, useRef, type PointerEvent } from 'react';
 import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
-import { woodBetweenMm } from '#shared/document/document-faults.ts';
+import { woodBetweenMm } from '#shared/document/hole-faults.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import type { BenchFrame } from '../../bench/bench-geometry.ts';
 import { snapToDrill } from '../../bench/drill-choice.ts';
 import { changeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
-import { type LabelledHole } from '../../bench/hole-labels.ts';
+import { type LabelledHole } from '#shared/document/hole-labels.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import type { HoleHandlers } from './HoleButton.tsx';

@@ -1,16 +1,21 @@
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import type { DocumentFault } from '#shared/document/document-faults.ts';
+import { documentFaults } from '#shared/document/document-faults.ts';
+import { wordsFromFoot, type DocumentFault } from '#shared/document/fault-words.ts';
+import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { Button } from '../../ui/Button.tsx';
 
 interface FailureLineProps {
   faults: readonly DocumentFault[];
   document: DesignDocument;
+  unit: LengthUnit;
   onChooseHole: (hole: string) => void;
 }
 
 /** Why the present drawing has no figures, over the chart whose bobs have turned to outlines. */
-export function FailureLine({ faults, document, onChooseHole }: FailureLineProps) {
-  const [first, ...others] = faults;
+export function FailureLine({ faults, document, unit, onChooseHole }: FailureLineProps) {
+  // What the drawing itself gets wrong is said in the figures of the bench; the rest only the engine knows.
+  const drawn = documentFaults(document, wordsFromFoot(unit));
+  const [first, ...others] = drawn.length > 0 ? drawn : faults;
   if (first === undefined) return null;
   const hole = first.path[0] === 'holes' ? document.holes[Number(first.path[1])] : undefined;
   return (

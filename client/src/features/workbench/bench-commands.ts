@@ -4,7 +4,7 @@ import { nearestDrills } from '#shared/lengths/drills.ts';
 import { moveMouthEnd, trimFoot } from '../../bench/end-edits.ts';
 import { drillsFor } from '../../bench/drill-choice.ts';
 import { changeHole, removeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { SENSITIVITY_STEP } from '../../bench/hole-sensitivity.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import type { BenchCommands } from './use-bench-keys.ts';

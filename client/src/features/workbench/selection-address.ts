@@ -1,5 +1,5 @@
 import type { DesignDocument } from '#shared/document/design-document.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import type { Selection } from '../../bench/panel-props.ts';
 
 /** Words for the ends of the instrument; everything else is the label over a hole. */
