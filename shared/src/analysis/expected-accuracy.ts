@@ -10,6 +10,9 @@ import type { DesignColumn } from './to-column.ts';
  */
 const BORE_AND_HOLES = [0.6, 1.3, 2];
 
+/** Where a bore changes under a hole: what a hundredth of a millimetre to either side of a step makes. Own judgement. */
+const UNEVEN_BORE_CENTS = 20;
+
 /** Measured of a vented register, undercut (studied shapes), half-cover and pad on whole instruments or elements, cents. */
 const UNDERCUT_CENTS = 1.5;
 const HALF_COVERED_CENTS = 1.5;
@@ -34,11 +37,14 @@ export interface AccuracyQuestion {
   states: readonly HoleState[];
   register: number;
   unusualUndercuts: ReadonlySet<string>;
+  /** A bore that changes under a hole. */
+  hasUnevenHoles: boolean;
 }
 
 /** What a note's figure rests on, and how far each part may be off, ± cents. */
 export function accuracyParts(question: AccuracyQuestion): AccuracyPart[] {
-  const { document, design, states, register, unusualUndercuts } = question;
+  const { document, design, states, register, unusualUndercuts, hasUnevenHoles } = question;
+  const plain = BORE_AND_HOLES[Math.min(register, 3) - 1] ?? 2;
   // A correction scale that was typed is no calibration: only a measured set of notes would narrow this.
   const mouth = UNCALIBRATED_MOUTH_ENDS[document.mouthEnd.kind];
   const undercuts = design.holes.filter((hole) => hole.undercut !== null);
@@ -47,7 +53,7 @@ export function accuracyParts(question: AccuracyQuestion): AccuracyPart[] {
     : UNDERCUT_CENTS;
   const padOpen = design.holes.some((hole, i) => hole.cover === 'pad' && states[i]?.kind === 'open');
   const parts: (AccuracyPart | null)[] = [
-    { part: 'bore-and-holes', cents: BORE_AND_HOLES[Math.min(register, 3) - 1] ?? 2 },
+    { part: 'bore-and-holes', cents: hasUnevenHoles ? UNEVEN_BORE_CENTS : plain },
     document.air.losses ? { part: 'losses', cents: LOSSES_CENTS } : null,
     undercuts.length > 0 ? { part: 'undercut', cents: undercut } : null,
     states.some((state) => state.kind === 'half')

@@ -4,6 +4,7 @@ import { UNDERCUT_RANGE, UNUSUAL_UNDERCUT_CENTS } from '../acoustics/tone-hole/u
 import type { DesignDocument, ToneHole } from '../document/design-document.ts';
 import { holeTitle } from '../document/hole-labels.ts';
 import { chimneyMm, diameterAt } from '../document/profile.ts';
+import { holeSurroundNotices } from './hole-surround-notices.ts';
 import type { Notice } from './prediction.ts';
 import { isOutside } from './range.ts';
 import { PAD_TO_HOLE_RATIO } from './to-column.ts';
@@ -27,6 +28,7 @@ export function holeNotices(document: DesignDocument, hole: ToneHole): Notice[] 
     ...sizeNotices(title, measures),
     ...undercutNotices(title, hole, measures),
     ...padNotices(title, hole, measures),
+    ...holeSurroundNotices(document, hole),
   ].map((notice) => ({ ...notice, hole: hole.id }));
 }
 

@@ -48,17 +48,26 @@ function outsideNotices({ bore, outside, holes }: DesignDocument): Notice[] {
   const to = outside.stations.at(-1)?.positionMm ?? 0;
   const footMm = bore.stations.at(-1)?.positionMm ?? 0;
   const isBare = (positionMm: number) => positionMm < from - 0.05 || positionMm > to + 0.05;
-  if (!isBare(footMm) && !holes.some((hole) => isBare(hole.positionMm))) return [];
+  const notices: Notice[] = [];
+  if (to > footMm + 0.05) {
+    notices.push({
+      code: 'outside-beyond-foot',
+      message: `The outside runs on ${(to - footMm).toFixed(1)} mm beyond the end of the bore. The foot is worked out as if the wood ended with the bore.`,
+    });
+  }
+  if (!isBare(footMm) && !holes.some((hole) => isBare(hole.positionMm))) return notices;
   return [
+    ...notices,
     {
       code: 'outside-not-covered',
-      message: `The outside is given from ${from.toFixed(1)} to ${to.toFixed(1)} only. Its end diameters are carried on to the holes and the foot beyond; measure it there.`,
+      message: `The outside is given from ${(footMm - to).toFixed(1)} to ${(footMm - from).toFixed(1)} mm from the foot only. Its end diameters are carried on to the holes and the foot beyond; measure it there.`,
     },
   ];
 }
 
 function boreNotices({ bore, mouthEnd }: DesignDocument): Notice[] {
   const notices: Notice[] = [];
+  const fromFoot = (positionMm: number) => ((bore.stations.at(-1)?.positionMm ?? 0) - positionMm).toFixed(1);
   bore.stations.forEach((station, index) => {
     const before = bore.stations[index - 1];
     if (before === undefined) return;
@@ -67,14 +76,14 @@ function boreNotices({ bore, mouthEnd }: DesignDocument): Notice[] {
     if (along === 0 && isOutside(ratio, STEP_RANGE)) {
       notices.push({
         code: 'bore-step',
-        message: `The bore steps from ${before.diameterMm.toFixed(1)} to ${station.diameterMm.toFixed(1)} at ${station.positionMm.toFixed(1)}. The air's inertia at so large a step is left out; notes may be some cents sharper than they sound.`,
+        message: `The bore steps from ${before.diameterMm.toFixed(1)} to ${station.diameterMm.toFixed(1)} mm at ${fromFoot(station.positionMm)} from the foot. The air's inertia at so large a step is left out; notes may be some cents sharper than they sound.`,
       });
     }
     const slope = Math.abs(station.diameterMm - before.diameterMm) / (2 * along);
     if (along > 0 && Math.atan(slope) > (STEEPEST_CONE_DEG * Math.PI) / 180) {
       notices.push({
         code: 'bore-steep-cone',
-        message: `The bore widens or narrows steeply between ${before.positionMm.toFixed(1)} and ${station.positionMm.toFixed(1)}. Waves are taken as plane there, which may cost a cent or more.`,
+        message: `The bore widens or narrows steeply between ${fromFoot(station.positionMm)} and ${fromFoot(before.positionMm)} mm from the foot. Waves are taken as plane there, which may cost a cent or more.`,
       });
     }
   });

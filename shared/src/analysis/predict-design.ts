@@ -47,12 +47,13 @@ export function predictPrepared(
   const unusualUndercuts = new Set(
     notices.filter(({ code }) => code === 'undercut-outside-formula').map(({ hole }) => hole ?? ''),
   );
+  const hasUnevenHoles = notices.some(({ code }) => code === 'hole-over-bore-change');
   return {
     engine: ENGINE,
     notices,
     fingerings: document.fingerings.map((fingering, i) =>
       predictFingering(
-        { document, design, fingering, index: i, maxima, modes, unusualUndercuts },
+        { document, design, fingering, index: i, maxima, modes, unusualUndercuts, hasUnevenHoles },
         resonances[i] ?? [],
       ),
     ),
@@ -67,13 +68,14 @@ interface FingeringQuestion {
   maxima: boolean;
   modes: number;
   unusualUndercuts: ReadonlySet<string>;
+  hasUnevenHoles: boolean;
 }
 
 function predictFingering(
   question: FingeringQuestion,
   resonances: readonly Resonance[],
 ): FingeringPrediction {
-  const { document, design, fingering, index, maxima, modes, unusualUndercuts } = question;
+  const { document, design, fingering, index, maxima, modes, unusualUndercuts, hasUnevenHoles } = question;
   const states = design.states[index] ?? [];
   const targetHz = targetFrequencyHz(document, fingering);
   const multiples = ladderMultiples(design.column, states, maxima);
@@ -92,6 +94,7 @@ function predictFingering(
     states,
     register: fingering.register,
     unusualUndercuts,
+    hasUnevenHoles,
   });
   return {
     id: fingering.id,

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { whistleDocument } from '../../../tests/support/whistle-document.ts';
+import { documentFaults } from './document-faults.ts';
 import { woodBetweenMm } from './hole-faults.ts';
 
 describe('wood between two holes', () => {
@@ -12,5 +13,26 @@ describe('wood between two holes', () => {
       (6.35 * Math.PI) / 9 - 7,
       9,
     );
+  });
+});
+
+describe('holes round one place of the bore', () => {
+  const ring = (diameterMm: number, count: number) => {
+    const document = whistleDocument();
+    const [hole] = document.holes;
+    const holes = Array.from({ length: count }, (_, index) => ({
+      ...hole!,
+      id: `r${index}`,
+      name: '',
+      diameterMm,
+      angleDeg: (360 / count) * index,
+    }));
+    return documentFaults({ ...document, holes, fingerings: [] }).map(({ message }) => message);
+  };
+
+  it('are refused where they leave no wood, and only there', () => {
+    expect(ring(11, 3).join()).toContain('almost no wood left between hole 1, hole 2, hole 3');
+    expect(ring(7, 3)).toEqual([]);
+    expect(ring(11, 2)).toEqual([]);
   });
 });

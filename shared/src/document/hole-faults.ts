@@ -12,6 +12,7 @@ export function allHoleFaults(check: FaultCheck): DocumentFault[] {
   return [
     ...check.document.holes.flatMap((hole, index) => holeFaults(check, hole, index)),
     ...overlapFaults(check),
+    ...ringFaults(check),
   ];
 }
 
@@ -137,4 +138,36 @@ export function woodBetweenMm(document: DesignDocument, a: ToneHole, b: ToneHole
   const distance = Math.hypot(a.positionMm - b.positionMm, radius * ((turn * Math.PI) / 180));
   const widthOf = (hole: ToneHole) => hole.undercut?.innerDiameterMm ?? hole.diameterMm;
   return distance - (widthOf(a) + widthOf(b)) / 2;
+}
+
+/** Holes round one place of the bore may together take this share of its circumference. Own judgement. */
+const MOST_OF_A_RING = 0.9;
+
+/** Three holes side by side round the tube can each leave wood to the next and none to hold the tube together. */
+function ringFaults({ document }: FaultCheck): DocumentFault[] {
+  const ring = document.holes
+    .map((hole, index) => ({ index, holes: ringOf(document, hole) }))
+    .find(({ holes }) => holes.length > 2 && shareOfRing(document, holes) > MOST_OF_A_RING);
+  if (ring === undefined) return [];
+  const titles = ring.holes.map(({ id }) => titleInSentence(holeTitle(document, id))).join(', ');
+  return [
+    {
+      path: ['holes', ring.index, 'positionMm'],
+      message: `Round one place of the bore there is almost no wood left between ${titles}. Move one along the bore, or choose smaller drills.`,
+    },
+  ];
+}
+
+function ringOf(document: DesignDocument, hole: ToneHole): ToneHole[] {
+  return document.holes.filter(
+    ({ positionMm }) => Math.abs(positionMm - hole.positionMm) < hole.diameterMm / 2,
+  );
+}
+
+function shareOfRing(document: DesignDocument, holes: readonly ToneHole[]): number {
+  const arcs = holes.map((hole) => {
+    const bore = diameterAt(document.bore.stations, hole.positionMm);
+    return Math.asin(Math.min(1, hole.diameterMm / bore)) / Math.PI;
+  });
+  return arcs.reduce((sum, arc) => sum + arc, 0);
 }
