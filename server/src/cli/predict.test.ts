@@ -21,7 +21,7 @@ const rungSchema = z.object({
 
 const answerSchema = z.strictObject({
   engine: z.string().regex(/^borewright \d+\.\d+\.\d+$/),
-  notices: z.array(z.object({ code: z.string(), message: z.string() })),
+  notices: z.array(z.object({ code: z.string(), message: z.string(), fingering: z.string().optional() })),
   fingerings: z.array(
     z.object({
       id: z.string(),
@@ -149,6 +149,14 @@ describe.concurrent('predict command', () => {
       });
     },
   );
+
+  it('says where a ladder has fewer modes than were asked for', { timeout: PATIENCE }, async () => {
+    const { notices, fingerings } = await predicted([WHISTLE, '--modes', '24']);
+    const ended = notices.filter(({ code }) => code === 'ladder-ends').map(({ fingering }) => fingering);
+    const short = fingerings.filter(({ ladder }) => ladder.length < 24).map(({ id }) => id);
+    expect(short.length).toBeGreaterThan(0);
+    expect(ended).toEqual(short);
+  });
 
   it('adds the input impedance in units of the characteristic impedance', { timeout: PATIENCE }, async () => {
     const { fingerings } = await predicted(['-', '--impedance', '100,1000,100'], tube('ideal-open', 15));

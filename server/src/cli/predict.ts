@@ -3,6 +3,7 @@ import { parseArgs } from 'node:util';
 import { EngineInputError } from '#shared/acoustics/engine-input-error.ts';
 import { impedanceCurves, type FrequencyRange } from '#shared/analysis/impedance-curve.ts';
 import { predictDesign } from '#shared/analysis/predict-design.ts';
+import type { DesignPrediction, Notice } from '#shared/analysis/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { readDocument } from '#shared/document/read-document.ts';
 import { CommandFault } from './command-fault.ts';
@@ -98,12 +99,24 @@ function predict({ file, modes, impedance }: Command): unknown {
       ...prediction.fingerings.flatMap(({ id, notices }) =>
         notices.map((notice) => ({ ...notice, fingering: id })),
       ),
+      ...endedLadders(prediction, modes ?? 0),
     ],
     fingerings: prediction.fingerings.map((fingering) => {
       const curve = curves.find(({ fingering: id }) => id === fingering.id);
       return curve === undefined ? fingering : { ...fingering, impedance: curve.points };
     }),
   };
+}
+
+/** Fewer resonances than were asked for are no oversight: above the last one none is left that would be one. */
+function endedLadders({ fingerings }: DesignPrediction, modes: number): (Notice & { fingering: string })[] {
+  return fingerings
+    .filter(({ ladder }) => ladder.length < modes)
+    .map(({ id, ladder }) => ({
+      code: 'ladder-ends',
+      message: `${ladder.length} of ${modes} resonances are there. Above the last one the openings let the sound out before it can come back.`,
+      fingering: id,
+    }));
 }
 
 function problemOf(error: unknown): unknown {

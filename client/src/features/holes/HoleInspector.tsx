@@ -65,7 +65,7 @@ function NoHole({ document, unit, selection, holes, notes, readOnly, bandCents, 
       <p className="text-data text-ink2 mt-1">
         {end !== null && `${end.place} Drag it, or Alt with ← and →; its sizes stand under Bore. `}
         {holes.length === 0
-          ? 'No holes yet. Click the instrument where the first one goes, or press Add a hole.'
+          ? 'No holes yet. Double-click the instrument where the first one goes, or press Add a hole.'
           : 'Choose a hole on the instrument to see and change its sizes.'}
         {readOnly !== null && ` ${readOnly}`}
       </p>

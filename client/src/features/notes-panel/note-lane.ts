@@ -54,7 +54,7 @@ export function notesLayout(geometry: BenchGeometry): NotesLayout {
     noteX,
     hzRight,
     centsRight,
-    lane: noteLane(laneLeft, Math.min(laneLeft + 323, isStacked ? widthPx - 16 : beside)),
+    lane: noteLane(laneLeft, Math.min(laneLeft + 323, isStacked ? widthPx - 32 : beside)),
     columns,
     remarkX: remarkPlace(columns, widthPx),
     isStacked,
