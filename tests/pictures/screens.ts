@@ -1,0 +1,85 @@
+import type { Page } from 'playwright-core';
+import type { Role } from '#shared/contract/session.ts';
+import { WHISTLE } from '../e2e/bench-pages.ts';
+
+/** One screen in one state: who looks at it, where it is, and what is done before the picture is taken. */
+export interface Screen {
+  name: string;
+  /** null: nobody has signed in. */
+  role: Role | null;
+  path: (designs: ReadonlyMap<string, number>) => string;
+  /** Waits until the screen shows what it is about. */
+  ready: (page: Page) => Promise<unknown>;
+}
+
+const heading = (name: string | RegExp) => (page: Page) =>
+  page.getByRole('heading', { name }).first().waitFor();
+const figures = (page: Page) =>
+  page
+    .getByRole('button', { name: /^Hole \d+, .* (cents (flat|sharp)|in tune)/ })
+    .first()
+    .waitFor();
+
+const bench = (panel: string, query = '', design = WHISTLE) => ({
+  role: 'maker' as const,
+  path: (designs: ReadonlyMap<string, number>) => `/designs/${designs.get(design) ?? 0}/r/1/${panel}${query}`,
+});
+
+const FRAME: readonly Screen[] = [
+  { name: 'sign-in', role: null, path: () => '/sign-in', ready: heading(/./) },
+  { name: 'start', role: null, path: () => '/start', ready: heading('Create a workshop') },
+  { name: 'not-found', role: null, path: () => '/nowhere', ready: heading(/nothing on this peg/) },
+  { name: 'today', role: 'maker', path: () => '/today', ready: heading(/./) },
+  { name: 'designs', role: 'maker', path: () => '/designs', ready: heading('Designs') },
+  {
+    name: 'designs-none-found',
+    role: 'maker',
+    path: () => '/designs?find=zither',
+    ready: heading('Designs'),
+  },
+  { name: 'designs-visitor', role: 'visitor', path: () => '/designs', ready: heading('Designs') },
+  { name: 'new-design', role: 'maker', path: () => '/designs/new', ready: drawnNew },
+  { name: 'account', role: 'maker', path: () => '/account', ready: heading('Account') },
+  { name: 'workshop-defaults', role: 'owner', path: () => '/workshop/defaults', ready: heading(/./) },
+  { name: 'workshop-members', role: 'owner', path: () => '/workshop/members', ready: heading(/./) },
+  { name: 'keys', role: 'maker', path: () => '/today', ready: openKeys },
+];
+
+const WORKBENCH: readonly Screen[] = [
+  { name: 'bench-holes', ...bench('holes', '?hole=4&note=G5'), ready: figures },
+  { name: 'bench-holes-idle', ...bench('holes'), ready: figures },
+  { name: 'bench-bore', ...bench('bore'), ready: figures },
+  { name: 'bench-notes', ...bench('notes', '?note=G5'), ready: figures },
+  { name: 'bench-air', ...bench('air', '?note=D5'), ready: figures },
+  { name: 'bench-readonly', ...bench('holes', '?hole=4'), role: 'visitor', ready: heading(WHISTLE) },
+  { name: 'bench-no-line', ...bench('holes', '?hole=5'), ready: loseLine },
+  { name: 'bench-sign-in-lost', ...bench('holes', '?hole=5'), ready: loseSignIn },
+];
+
+export const SCREENS: readonly Screen[] = [...FRAME, ...WORKBENCH];
+
+async function drawnNew(page: Page): Promise<void> {
+  const lay = page.getByRole('button', { name: 'Lay it on the bench' });
+  await lay.waitFor();
+  await page.getByText(/Holes (stand|of these sizes)/).waitFor();
+}
+
+async function openKeys(page: Page): Promise<void> {
+  await heading(/./)(page);
+  await page.keyboard.press('?');
+  await page.getByRole('dialog', { name: 'Keys' }).waitFor();
+}
+
+async function loseLine(page: Page): Promise<void> {
+  await figures(page);
+  await page.context().setOffline(true);
+  await page.keyboard.press('Alt+ArrowLeft');
+  await page.getByText(/^No line since/).waitFor();
+}
+
+async function loseSignIn(page: Page): Promise<void> {
+  await figures(page);
+  await page.context().clearCookies();
+  await page.keyboard.press('Alt+ArrowLeft');
+  await page.getByRole('dialog', { name: 'Your sign-in has run out' }).waitFor();
+}
