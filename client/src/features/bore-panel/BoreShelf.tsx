@@ -1,12 +1,16 @@
 import { useMemo, useState } from 'react';
 import { printLength } from '#shared/lengths/print-length.ts';
 import { fromFootMm } from '#shared/document/profile.ts';
+import { DropLines } from '../../bench/DropLines.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
+import { ShelfCaption } from '../../bench/ShelfCaption.tsx';
+import { timesWider, type WidthScale } from '../../bench/width-scale.ts';
+import { WidthGrid } from '../../bench/WidthGrid.tsx';
+import '../../bench/shelf.css';
 import { BoreKnot } from './BoreKnot.tsx';
 import { KnotReading } from './KnotReading.tsx';
 import { moveStation } from './bore-edits.ts';
-import { ShelfCaption } from './ShelfCaption.tsx';
-import { SHELF, shelfScale, timesWider, type ShelfScale } from './shelf-scale.ts';
+import { SHELF, shelfScale } from './shelf-scale.ts';
 import { SpanLines } from './SpanLines.tsx';
 import { WiderCurves } from './WiderCurves.tsx';
 
@@ -25,7 +29,7 @@ export function BoreShelf(props: BoreShelfProps) {
   const { document, geometry, unit, chosen, onChoose, onEdit, readOnly } = props;
   const { stations } = document.bore;
   // While a knot is dragged the scale stands still, or the knot would run away from the hand.
-  const [held, setHeld] = useState<ShelfScale | null>(null);
+  const [held, setHeld] = useState<WidthScale | null>(null);
   const fitted = useMemo(() => shelfScale(stations), [stations]);
   const scale = held ?? fitted;
   const line = stations
@@ -49,7 +53,7 @@ export function BoreShelf(props: BoreShelfProps) {
       aria-label="Bore, drawn wider than true"
       className="border-hair block border-b"
     >
-      <DropLines {...props} />
+      <DropLines {...props} height={SHELF.height} />
       <g aria-hidden="true">
         <path d={`M${left} ${SHELF.woodY}L${line}L${right} ${SHELF.woodY}Z`} className="bore-wood" />
         <WidthGrid scale={scale} unit={unit} from={left} to={right} isBeside={isBeside} />
@@ -97,49 +101,4 @@ export function BoreShelf(props: BoreShelfProps) {
       <WiderCurves {...props} isBeside={isBeside} />
     </svg>
   );
-}
-
-function DropLines({ document, geometry, selection }: PanelProps) {
-  return (
-    <g aria-hidden="true">
-      {document.holes.map(({ id, positionMm }) => {
-        const x = geometry.x(positionMm);
-        return x < geometry.viewLeft || x > geometry.viewRight ? null : (
-          <line
-            key={id}
-            x1={x}
-            x2={x}
-            y2={SHELF.height}
-            className={id === selection.hole ? 'bench-drop is-chosen' : 'bench-drop'}
-          />
-        );
-      })}
-    </g>
-  );
-}
-
-interface WidthGridProps {
-  scale: ShelfScale;
-  unit: PanelProps['unit'];
-  from: number;
-  to: number;
-  isBeside: boolean;
-}
-
-function WidthGrid({ scale, unit, from, to, isBeside }: WidthGridProps) {
-  const [first = 0, second = first + 1] = scale.ticks;
-  const digits = unit === 'inch' ? 3 : second - first < 0.099 ? 2 : 1;
-  return scale.ticks.map((mm) => (
-    <g key={mm}>
-      <line x1={from} x2={to} y1={scale.y(mm)} y2={scale.y(mm)} className="bore-grid" />
-      <text
-        x={isBeside ? 144 : to - 12}
-        y={scale.y(mm) + 4}
-        textAnchor="end"
-        className="bench-quiet-label bore-haloed"
-      >
-        {printLength(mm, unit, digits)}
-      </text>
-    </g>
-  ));
 }

@@ -6,8 +6,8 @@ import { useStudy } from '../../engine/use-study.ts';
 import { Bob } from '../../bench/Bob.tsx';
 import { NoteSpan } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
+import { ShelfCaption } from '../../bench/ShelfCaption.tsx';
 import { boreEnds } from '#shared/document/profile.ts';
-import { ShelfCaption } from './ShelfCaption.tsx';
 import { SHELF } from './shelf-scale.ts';
 
 interface WiderCurvesProps extends PanelProps {
