@@ -20,6 +20,11 @@ export interface Ribbon {
 
 /** What a panel wants to know beyond the prediction, and what it gets. */
 export interface Studies {
+  /** Figures of a design that nobody has chosen yet. */
+  prediction: {
+    ask: { document: DesignDocument; options: PredictionOptions };
+    answer: DesignPrediction;
+  };
   'wider-here': {
     ask: { document: DesignDocument; fingerings: readonly string[] };
     answer: WiderHere[];

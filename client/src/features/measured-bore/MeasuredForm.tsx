@@ -1,0 +1,89 @@
+import type { MeasuredBore } from '#shared/measured-bore/read-measured-bore.ts';
+import type { PanelProps } from '../../bench/panel-props.ts';
+import { classNames } from '../../ui/class-names.ts';
+import { ColumnsForm } from './ColumnsForm.tsx';
+import { FitWords } from './FitWords.tsx';
+import { LimitsForm } from './LimitsForm.tsx';
+import { counted } from './measured-words.ts';
+import { PlaceForm } from './PlaceForm.tsx';
+import { SourceForm } from './SourceForm.tsx';
+import { TableForm } from './TableForm.tsx';
+import type { MeasuredBoreDesk } from './use-measured-bore.ts';
+
+interface MeasuredFormProps extends Pick<PanelProps, 'document' | 'unit'> {
+  desk: MeasuredBoreDesk;
+  isWide: boolean;
+}
+
+/** How the table is understood, by which limits it becomes stations, and what is in the way. */
+export function MeasuredForm(props: MeasuredFormProps) {
+  const { source, measured } = props.desk;
+  const readings = measured?.status === 'read' ? counted(measured.readings.length, 'reading') : null;
+  return (
+    <>
+      <h2 className="text-section font-semibold">
+        Measured bore{' '}
+        <span className="text-data text-ink3 ml-1 font-normal">
+          {[source.fileName, readings].filter((part) => part !== null).join(', ')}
+        </span>
+      </h2>
+      {measured === null ? (
+        <div className="mt-2">
+          <SourceForm desk={props.desk} rows={9} />
+        </div>
+      ) : (
+        <UnderstoodForm {...props} measured={measured} />
+      )}
+    </>
+  );
+}
+
+interface UnderstoodFormProps extends MeasuredFormProps {
+  measured: MeasuredBore;
+}
+
+function UnderstoodForm({ measured, ...props }: UnderstoodFormProps) {
+  const { document, unit, desk, isWide } = props;
+  const { fitted } = desk;
+  const { table } = measured;
+  return (
+    <>
+      <div className={classNames('mt-1', isWide && 'grid grid-cols-2 gap-x-6')}>
+        <div>
+          <ColumnsForm columns={measured.columns} onChange={desk.meanColumn} />
+          {measured.status === 'read' && (
+            <PlaceForm document={document} unit={unit} place={measured.place} onMean={desk.mean} />
+          )}
+        </div>
+        {fitted !== null && (
+          <div>
+            <LimitsForm desk={desk} fitted={fitted} unit={unit} />
+          </div>
+        )}
+      </div>
+      <Refusals refusals={desk.refusals} />
+      <Outcome {...props} measured={measured} />
+      {typeof table?.doubt === 'string' && (
+        <p className="bg-wait text-data text-ink mt-2 px-3 py-2">{table.doubt}</p>
+      )}
+      <TableForm desk={desk} table={table} />
+    </>
+  );
+}
+
+function Outcome({ document, unit, desk, measured }: UnderstoodFormProps) {
+  const { fitted } = desk;
+  if (measured.status !== 'read' || fitted === null || fitted.stations.length === 0) return null;
+  return <FitWords {...{ document, unit, desk, fitted }} readingCount={measured.readings.length} />;
+}
+
+function Refusals({ refusals }: { refusals: readonly string[] }) {
+  if (refusals.length === 0) return null;
+  return (
+    <div role="alert" className="border-stop bg-stop-soft text-data text-ink my-2 border-l-3 px-3 py-2">
+      {refusals.map((refusal) => (
+        <p key={refusal}>{refusal}</p>
+      ))}
+    </div>
+  );
+}
