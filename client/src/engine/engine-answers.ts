@@ -20,9 +20,9 @@ export interface Ribbon {
 
 /** What a panel wants to know beyond the prediction, and what it gets. */
 export interface Studies {
-  /** Figures of a design that nobody has chosen yet. */
+  /** A design that is looked at beside another, apart from the draft on the bench. */
   prediction: {
-    ask: { document: DesignDocument; options: PredictionOptions };
+    ask: { document: DesignDocument; options?: PredictionOptions };
     answer: DesignPrediction;
   };
   'wider-here': {

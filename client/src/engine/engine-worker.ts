@@ -15,7 +15,7 @@ const CURVE_FROM_HZ = 40;
 const CURVE_POINTS = 900;
 
 const studies: { [Kind in StudyKind]: (ask: Studies[Kind]['ask']) => Studies[Kind]['answer'] } = {
-  prediction: ({ document, options }) => predictDesign(document, options),
+  prediction: ({ document, options = {} }) => predictDesign(document, options),
   'wider-here': ({ document, fingerings }) => widerHere(document, fingerings),
   impedance: ({ document, fingering, toHz }) =>
     impedanceCurve(document, fingering, {

@@ -1,4 +1,4 @@
-import { useMemo, useState } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
 import { useLocation, useNavigate } from 'react-router';
 import type { DesignSummary } from '#shared/contract/designs.ts';
 import { permissionRefusal } from '#shared/rules/permissions.ts';
@@ -10,6 +10,8 @@ import { ConflictDialog } from '../features/draft/ConflictDialog.tsx';
 import { DraftBands } from '../features/draft/DraftBands.tsx';
 import type { DraftOnBench } from '../features/draft/use-draft.ts';
 import { useSuggestionDesk } from '../features/holes/use-suggestion-desk.ts';
+import { MeasuredActions } from '../features/measured-bore/MeasuredActions.tsx';
+import { useMeasuredBore, type MeasuredBoreDesk } from '../features/measured-bore/use-measured-bore.ts';
 import { useHeldNote } from '../features/sound/use-held-note.ts';
 import { useTones } from '../features/sound/use-tones.ts';
 import { InstrumentStrip } from '../features/strip/InstrumentStrip.tsx';
@@ -69,6 +71,7 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
   const conditions = useMemo(() => ({ air, pitch }), [air, pitch]);
   const history = useHistory(draft);
   const suggestion = useSuggestionDesk(bench, isDragging);
+  const measured = useMeasuredBore(bench, design.id, draft.predictionOptions);
   const tones = useTones();
   const playReference = useHeldNote(tones, bench);
   const [best] = suggestion.suggestions ?? [];
@@ -103,6 +106,8 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
         readOnly={bench.readOnly}
         save={draft.save}
         onAddHole={useStable(placing.start)}
+        onReadBore={useStable(measured.open)}
+        instead={trialActions(panel, measured)}
       />
       <div
         className="bg-bench border-hair sticky top-0 z-20 border-b outline-offset-[-3px]"
@@ -143,7 +148,7 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
         />
       )}
       <div className="mx-auto max-w-400" data-figures={isOld ? 'old' : undefined}>
-        <WorkbenchPanels {...{ panel, bench, draft, isDragging, isOld, suggestion, tones }} />
+        <WorkbenchPanels {...{ panel, bench, draft, isDragging, isOld, suggestion, tones, measured }} />
       </div>
       {draft.save.status === 'conflict' && (
         <ConflictDialog
@@ -157,4 +162,9 @@ export function OpenWorkbench({ design, draft, panel }: OpenWorkbenchProps) {
       <SpokenChange {...bench} isDragging={isDragging} />
     </>
   );
+}
+
+/** null while nothing is held against the design, so that the header rests while a hole is dragged. */
+function trialActions(panel: WorkbenchPanel, measured: MeasuredBoreDesk): ReactNode {
+  return panel === 'bore' && measured.isOpen ? <MeasuredActions desk={measured} /> : null;
 }

@@ -1,4 +1,4 @@
-import { memo } from 'react';
+import { memo, type ReactNode } from 'react';
 import { useLocation } from 'react-router';
 import type { DesignSummary } from '#shared/contract/designs.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
@@ -6,7 +6,7 @@ import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { permissionRefusal } from '#shared/rules/permissions.ts';
 import { SaveNote } from '../features/draft/SaveNote.tsx';
 import type { DraftOnBench } from '../features/draft/use-draft.ts';
-import { Conditions } from '../features/workbench/Conditions.tsx';
+import { Conditions, TrialConditions } from '../features/workbench/Conditions.tsx';
 import { DesignHeader, type History } from '../features/workbench/DesignHeader.tsx';
 import { PanelLinks } from '../features/workbench/PanelLinks.tsx';
 import { SheetMenu } from '../features/workbench/SheetMenu.tsx';
@@ -29,6 +29,9 @@ interface WorkbenchHeadProps {
   save: DraftOnBench['save'];
   history: History;
   onAddHole: () => void;
+  onReadBore: () => void;
+  /** What can be done with something that is held against the design, in place of what can be done with the design. */
+  instead: ReactNode;
 }
 
 const PANEL_WORDS: Record<WorkbenchPanel, string> = {
@@ -40,7 +43,7 @@ const PANEL_WORDS: Record<WorkbenchPanel, string> = {
 
 /** Header, panels and conditions of the design in hand; rests while a hole is dragged. */
 export const WorkbenchHead = memo(function WorkbenchHead(props: WorkbenchHeadProps) {
-  const { design, unit, save, history, readOnly } = props;
+  const { design, unit, save, history, readOnly, instead } = props;
   const { search } = useLocation();
   const panelTo = (to: WorkbenchPanel) => paths.workbench(design.id, design.revisionNumber, to) + search;
   const links = WORKBENCH_PANELS.map((each) => ({ to: panelTo(each), label: PANEL_WORDS[each] }));
@@ -52,24 +55,28 @@ export const WorkbenchHead = memo(function WorkbenchHead(props: WorkbenchHeadPro
         revision={design.revisionNumber}
         state={design.state}
         facts={props.facts}
-        history={history}
+        history={instead === null ? history : null}
         saveNote={saveNote}
-        actions={<HeadActions {...props} />}
+        actions={instead ?? <HeadActions {...props} />}
       />
       {readOnly !== null && <p className="bg-sheet px-margin text-data text-ink2 pb-1.5">{readOnly}</p>}
       {props.isWide ? (
         <div className="bg-sheet border-hair px-margin flex h-10 items-stretch border-b">
           <PanelLinks links={links} atBottom={false} />
-          <Conditions
-            document={props.conditions}
-            bandCents={props.bandCents}
-            unit={unit}
-            saveNote={saveNote}
-            airTo={panelTo('air')}
-            pitchTo={panelTo('notes')}
-            bandTo={paths.workshopDefaults()}
-            onUnit={(chosen) => unitPreference.choose(chosen)}
-          />
+          {instead === null ? (
+            <Conditions
+              document={props.conditions}
+              bandCents={props.bandCents}
+              unit={unit}
+              saveNote={saveNote}
+              airTo={panelTo('air')}
+              pitchTo={panelTo('notes')}
+              bandTo={paths.workshopDefaults()}
+              onUnit={(chosen) => unitPreference.choose(chosen)}
+            />
+          ) : (
+            <TrialConditions unit={unit} onUnit={(chosen) => unitPreference.choose(chosen)} />
+          )}
         </div>
       ) : (
         <PanelLinks links={links} atBottom />
@@ -78,7 +85,7 @@ export const WorkbenchHead = memo(function WorkbenchHead(props: WorkbenchHeadPro
   );
 });
 
-function HeadActions({ design, panel, unit, save, readOnly, onAddHole }: WorkbenchHeadProps) {
+function HeadActions({ design, panel, unit, save, readOnly, ...props }: WorkbenchHeadProps) {
   const { role } = useSession();
   const printing = permissionRefusal({ role }, 'print-sheet');
   const unsaved =
@@ -86,8 +93,13 @@ function HeadActions({ design, panel, unit, save, readOnly, onAddHole }: Workben
   return (
     <>
       {panel === 'holes' && (
-        <Button disabled={readOnly !== null} onClick={onAddHole}>
+        <Button disabled={readOnly !== null} onClick={props.onAddHole}>
           Add a hole
+        </Button>
+      )}
+      {panel === 'bore' && (
+        <Button disabled={readOnly !== null} onClick={props.onReadBore}>
+          Read in a measured bore
         </Button>
       )}
       <SheetMenu designId={design.id} unit={unit} refusal={printing ?? unsaved} />

@@ -1,4 +1,5 @@
-import type { ReactNode } from 'react';
+import { useMemo, type ReactNode } from 'react';
+import type { DesignPrediction } from '#shared/analysis/prediction.ts';
 import type { PanelProps } from '../bench/panel-props.ts';
 import { AirPanel } from '../features/air-panel/AirPanel.tsx';
 import { BorePanel } from '../features/bore-panel/BorePanel.tsx';
@@ -7,6 +8,9 @@ import { HoleTable } from '../features/hole-table/HoleTable.tsx';
 import { HoleInspector } from '../features/holes/HoleInspector.tsx';
 import type { SuggestionDesk } from '../features/holes/use-suggestion-desk.ts';
 import { Ladder } from '../features/ladder/Ladder.tsx';
+import { MeasuredBorePanel } from '../features/measured-bore/MeasuredBorePanel.tsx';
+import { MeasuredNote } from '../features/measured-bore/MeasuredNote.tsx';
+import type { MeasuredBoreDesk } from '../features/measured-bore/use-measured-bore.ts';
 import { NotesPanel } from '../features/notes-panel/NotesPanel.tsx';
 import { PlumbChart } from '../features/plumb/PlumbChart.tsx';
 import { RegisterChoice } from '../features/plumb/RegisterChoice.tsx';
@@ -26,6 +30,7 @@ interface WorkbenchPanelsProps {
   isOld: boolean;
   suggestion: SuggestionDesk;
   tones: Tones;
+  measured: MeasuredBoreDesk;
 }
 
 /** What stands below the strip. Features do not know each other: this is where they are put side by side. */
@@ -37,15 +42,19 @@ export function WorkbenchPanels({
   isOld,
   suggestion,
   tones,
+  measured,
 }: WorkbenchPanelsProps) {
   const chart = (
     <PlumbChart {...bench} isDragging={isDragging} isOld={isOld} showsFingering={panel === 'holes'} />
   );
   switch (panel) {
     case 'bore':
+      if (measured.isOpen) return <MeasuredPanel bench={bench} draft={draft} measured={measured} />;
       return (
         <BorePanel
           {...bench}
+          note={<MeasuredNote desk={measured} geometry={bench.geometry} readOnly={bench.readOnly} />}
+          beside={measured.besideStations}
           hang={
             <HangZone bench={bench}>
               {chart}
@@ -76,6 +85,57 @@ export function WorkbenchPanels({
         />
       );
   }
+}
+
+interface MeasuredPanelProps {
+  bench: PanelProps;
+  draft: DraftOnBench;
+  measured: MeasuredBoreDesk;
+}
+
+const GHOST_WORDS = { ghost: 'drawn', now: 'measured' };
+
+/** The measured bore's notes hang over the drawn one's, which are dashed. */
+function MeasuredPanel({ bench, draft, measured }: MeasuredPanelProps) {
+  const drawn = draft.predictionOf === bench.document ? bench.prediction : null;
+  const ghosts = useMemo(() => centsByFingering(drawn), [drawn]);
+  const { proposed, prediction, lastPrediction } = measured;
+  const chart =
+    proposed === null ? (
+      <PlumbChart {...bench} isDragging={false} isOld={drawn === null} showsFingering={false} />
+    ) : (
+      <PlumbChart
+        {...bench}
+        document={proposed}
+        prediction={lastPrediction}
+        isDragging={false}
+        isOld={prediction === null}
+        showsFingering={false}
+        ghosts={ghosts}
+        ghostWords={GHOST_WORDS}
+      />
+    );
+  return (
+    <MeasuredBorePanel
+      {...bench}
+      prediction={drawn}
+      desk={measured}
+      hang={
+        <HangZone bench={bench}>
+          {chart}
+          <RegisterChoice {...bench} />
+        </HangZone>
+      }
+    />
+  );
+}
+
+function centsByFingering(prediction: DesignPrediction | null): Map<string, number> {
+  return new Map(
+    prediction?.fingerings.flatMap(({ id, centsFromScale }) =>
+      centsFromScale === null ? [] : [[id, centsFromScale]],
+    ),
+  );
 }
 
 function HangZone({ bench, children }: { bench: PanelProps; children: ReactNode }) {

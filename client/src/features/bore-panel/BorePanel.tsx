@@ -1,4 +1,5 @@
 import { useState, type ReactNode } from 'react';
+import type { Station } from '#shared/document/design-document.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';
 import type { ProfilePart } from '../../bench/end-edits.ts';
@@ -12,10 +13,14 @@ import './bore-panel.css';
 interface BorePanelProps extends PanelProps {
   /** What hangs under the holes: handed in by the page. */
   hang?: ReactNode;
+  /** What a measured bore has to say below the stations: handed in by the page. */
+  note?: ReactNode;
+  /** A second line over the drawn bore. */
+  beside?: readonly Station[] | null;
 }
 
 /** Bore, outside, mouth end and foot: the wall across the shelf, its figures at the left, what it does under the holes. */
-export function BorePanel({ hang, ...props }: BorePanelProps) {
+export function BorePanel({ hang, note, ...props }: BorePanelProps) {
   const [part, setPart] = useState<ProfilePart>('bore');
   const [chosen, setChosen] = useState<number | null>(null);
   const { layout, measures } = props.geometry;
@@ -52,6 +57,7 @@ export function BorePanel({ hang, ...props }: BorePanelProps) {
           <div className={classNames(isWide && 'w-74 shrink-0')}>
             <StationsForm {...props} part={part} onPart={choosePart} chosen={chosen} onChoose={setChosen} />
             <FootForm {...props} />
+            {note}
           </div>
           <MouthForm {...props} />
         </div>

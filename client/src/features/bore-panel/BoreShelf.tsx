@@ -1,4 +1,5 @@
 import { useMemo, useState } from 'react';
+import type { Station } from '#shared/document/design-document.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import { fromFootMm } from '#shared/document/profile.ts';
 import { DropLines } from '../../bench/DropLines.tsx';
@@ -15,6 +16,8 @@ import { SpanLines } from './SpanLines.tsx';
 import { WiderCurves } from './WiderCurves.tsx';
 
 interface BoreShelfProps extends PanelProps {
+  /** A second line over the drawn bore. */
+  beside?: readonly Station[] | null;
   chosen: number | null;
   onChoose: (index: number) => void;
 }
@@ -30,14 +33,17 @@ export function BoreShelf(props: BoreShelfProps) {
   const { stations } = document.bore;
   // While a knot is dragged the scale stands still, or the knot would run away from the hand.
   const [held, setHeld] = useState<WidthScale | null>(null);
-  const fitted = useMemo(() => shelfScale(stations), [stations]);
+  const { beside } = props;
+  const fitted = useMemo(() => shelfScale([...stations, ...(beside ?? [])]), [stations, beside]);
   const scale = held ?? fitted;
-  const line = stations
-    .map(
-      ({ positionMm, diameterMm }) =>
-        `${geometry.x(positionMm).toFixed(1)} ${scale.y(diameterMm).toFixed(1)}`,
-    )
-    .join('L');
+  const lineOf = (profile: readonly Station[]) =>
+    profile
+      .map(
+        ({ positionMm, diameterMm }) =>
+          `${geometry.x(positionMm).toFixed(1)} ${scale.y(diameterMm).toFixed(1)}`,
+      )
+      .join('L');
+  const line = lineOf(stations);
   const times = `${timesWider(scale, geometry.pxPerMm)} times wider`;
   const [left, right] = [
     geometry.x(stations[0]?.positionMm ?? 0),
@@ -58,6 +64,7 @@ export function BoreShelf(props: BoreShelfProps) {
         <path d={`M${left} ${SHELF.woodY}L${line}L${right} ${SHELF.woodY}Z`} className="bore-wood" />
         <WidthGrid scale={scale} unit={unit} from={left} to={right} isBeside={isBeside} />
         <path d={`M${line}`} className="bore-line" />
+        {beside && <path d={`M${lineOf(beside)}`} className="bore-beside" />}
         <ShelfCaption
           isBeside={isBeside}
           y={20}

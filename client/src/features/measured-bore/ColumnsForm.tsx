@@ -4,7 +4,6 @@ import {
   type MeasurementColumn,
 } from '#shared/measured-bore/measurement-columns.ts';
 import { COLUMN_UNITS, type ColumnUnit } from '#shared/measured-bore/measurement-cell.ts';
-import { FormRow } from './FormRow.tsx';
 import { SmallSelect } from './SmallSelect.tsx';
 
 interface ColumnsFormProps {
@@ -26,8 +25,17 @@ export function ColumnsForm({ columns, onChange }: ColumnsFormProps) {
   return columns.map(({ index, title, kind, unit }) => {
     const name = `Column ${index + 1}`;
     return (
-      <FormRow key={index} label={name} hint={title}>
-        <span className="w-26 shrink-0">
+      <div
+        key={index}
+        className="border-hair flex min-h-9 items-center gap-2 border-t py-0.5 @max-[460px]:flex-wrap"
+      >
+        <span className="flex min-w-0 flex-1 items-baseline gap-3 @max-[460px]:basis-full">
+          <span className="text-data text-ink2 shrink-0 whitespace-nowrap">{name}</span>
+          <span className="text-label text-ink3 min-w-0 truncate" title={title ?? undefined}>
+            {title}
+          </span>
+        </span>
+        <span className="w-29 shrink-0 @max-[460px]:flex-1">
           <SmallSelect
             label={`${name} holds`}
             value={kind}
@@ -35,7 +43,7 @@ export function ColumnsForm({ columns, onChange }: ColumnsFormProps) {
             onChange={(chosen) => onChange(index, { kind: chosen })}
           />
         </span>
-        <span className="w-18 shrink-0">
+        <span className="w-20 shrink-0 @max-[460px]:w-26">
           {kind !== 'unused' && (
             <SmallSelect
               label={`Unit of column ${index + 1}`}
@@ -45,7 +53,7 @@ export function ColumnsForm({ columns, onChange }: ColumnsFormProps) {
             />
           )}
         </span>
-      </FormRow>
+      </div>
     );
   });
 }

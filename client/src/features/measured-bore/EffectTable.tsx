@@ -1,6 +1,5 @@
 import type { DesignPrediction } from '#shared/analysis/prediction.ts';
 import { formatCents } from '#shared/music/cents.ts';
-import { spokenNote } from '#shared/music/note-name.ts';
 import { NoteName } from '../../bench/NoteName.tsx';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { movedCents, noteMoves } from './measured-words.ts';
@@ -38,7 +37,7 @@ export function EffectTable({ document, drawn, measured }: EffectTableProps) {
         <tbody>
           {moves.map((move) => (
             <tr key={move.fingering} className="border-hair border-t">
-              <th scope="row" aria-label={spokenNote(move.note)} className="py-0.5 text-left font-normal">
+              <th scope="row" className="py-0.5 text-left font-normal">
                 <NoteName note={move.note} />
               </th>
               <td className="text-ink3 text-right">{cents(move.drawnCents)}</td>

@@ -1,17 +1,21 @@
 import type { FittedBore, LoneReading } from '#shared/measured-bore/fit-stations.ts';
+import type { MeasuredPlace } from '#shared/measured-bore/read-measured-bore.ts';
+import { printLength } from '#shared/lengths/print-length.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
-import { counted, gapWords, printLimit, printWidth, readingWords } from './measured-words.ts';
+import { counted, EDGE_WORDS, gapWords, printLimit, printWidth, readingWords } from './measured-words.ts';
 import type { MeasuredBoreDesk } from './use-measured-bore.ts';
 
 interface FitWordsProps extends Pick<PanelProps, 'document' | 'unit'> {
   desk: Pick<MeasuredBoreDesk, 'source' | 'fit'>;
   fitted: FittedBore;
   readingCount: number;
+  place: MeasuredPlace;
 }
 
 /** What became of the readings, in sentences. */
-export function FitWords({ document, unit, desk, fitted, readingCount }: FitWordsProps) {
+export function FitWords({ document, unit, desk, fitted, readingCount, place }: FitWordsProps) {
   const { leftOut, restored, outside, stations } = fitted;
+  const aligned = alignedWords(document, place, unit);
   const gaps = gapWords(fitted, unit);
   const setRestored = (keys: string[]) => desk.fit({ restored: keys });
   return (
@@ -30,6 +34,7 @@ export function FitWords({ document, unit, desk, fitted, readingCount }: FitWord
         )}
         No {leftOut.length > 0 ? 'other place' : 'place'} lies further than{' '}
         {printLimit(desk.source.fit.withinMm, unit)} from the line.
+        {aligned !== null && ` ${aligned}`}
         {gaps !== null && ` ${gaps}`}
         {outside.length > 0 && ` ${outsideWords(outside.length)}`}
       </p>
@@ -47,6 +52,17 @@ export function FitWords({ document, unit, desk, fitted, readingCount }: FitWord
       />
     </div>
   );
+}
+
+/** A place that was guessed has to be seen: a bore laid askew is a wrong bore. */
+function alignedWords(
+  { mouthEnd }: FitWordsProps['document'],
+  { from, zeroMm, isGuess }: MeasuredPlace,
+  unit: FitWordsProps['unit'],
+): string | null {
+  if (!isGuess || from === 'foot' || zeroMm === 0) return null;
+  const edge = EDGE_WORDS[mouthEnd.kind].toLowerCase();
+  return `The ${edge} was taken to lie at ${printLength(zeroMm, unit)} in the table, so that the last reading is at the foot.`;
 }
 
 function outsideWords(count: number): string {

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';
 import { EffectTable } from './EffectTable.tsx';
@@ -18,34 +18,25 @@ interface MeasuredBorePanelProps extends PanelProps {
 /** A measured bore held against the drawn one; nothing is changed until it is used. */
 export function MeasuredBorePanel({ desk, hang, ...bench }: MeasuredBorePanelProps) {
   const { document, geometry, prediction, unit, selection } = bench;
-  const { layout, measures } = geometry;
-  const isWide = layout === 'wide';
-  const isBeside = isWide || layout === 'tablet';
+  const isWide = geometry.layout === 'wide';
   const { proposed } = desk;
+  const left = leftZone(geometry);
+  const zone = useFocusWhenLost();
   return (
     <section aria-label="Measured bore">
       <MeasuredShelf {...bench} desk={desk} />
-      <div className={classNames('grid', !isWide && 'pb-18')}>
+      <div className={classNames('grid grid-cols-1', !isWide && 'pb-18')}>
         <div
-          className={classNames('z-10 pt-2 pb-6', isBeside && 'col-start-1 row-start-1')}
+          ref={zone}
+          className={classNames('z-10 min-w-0 pt-2 pb-6', left.isBeside && 'col-start-1 row-start-1')}
           data-zone="left"
           tabIndex={-1}
-          style={{
-            marginLeft: measures.leftZone.x,
-            ...(isBeside
-              ? { width: isWide ? 516 : measures.leftZone.width }
-              : { marginRight: measures.leftZone.x }),
-          }}
+          style={left.style}
         >
           <MeasuredForm document={document} unit={unit} isWide={isWide} desk={desk} />
           <Figures {...{ document, unit }} drawn={prediction} desk={desk} />
-          {layout === 'phone' && (
-            <div className="border-hair mt-3 flex flex-wrap gap-2 border-t pt-3">
-              <MeasuredActions desk={desk} />
-            </div>
-          )}
         </div>
-        <div className={classNames(isBeside && 'col-start-1 row-start-1')}>
+        <div className={classNames('min-w-0', left.isBeside && 'col-start-1 row-start-1')}>
           {hang}
           {proposed !== null && (
             <MeasuredTable
@@ -54,10 +45,39 @@ export function MeasuredBorePanel({ desk, hang, ...bench }: MeasuredBorePanelPro
               measured={desk.prediction}
             />
           )}
+          {geometry.layout === 'phone' && (
+            // The header has no room for them there.
+            <div className="flex flex-wrap gap-2 p-4">
+              <MeasuredActions desk={desk} />
+            </div>
+          )}
         </div>
       </div>
     </section>
   );
+}
+
+/** Row labels of the figures under the holes begin so far left of the columns, px. */
+const LABELS_PX = 124;
+const WIDEST_FORM_PX = 490;
+/** With less room beside the labels the form stands above the columns, px. */
+const LEAST_FORM_PX = 290;
+
+function leftZone({ layout, measures, labelRight }: PanelProps['geometry']) {
+  const { x } = measures.leftZone;
+  const room = labelRight - LABELS_PX - x;
+  const isBeside = (layout === 'wide' || layout === 'tablet') && room >= LEAST_FORM_PX;
+  const width = { width: Math.min(WIDEST_FORM_PX, room) };
+  return { isBeside, style: { marginLeft: x, ...(isBeside ? width : { marginRight: x }) } };
+}
+
+/** The button that opened the screen is gone: the focus goes to what took its place, not to the top of the page. */
+function useFocusWhenLost() {
+  const zone = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    if (window.document.activeElement === window.document.body) zone.current?.focus({ preventScroll: true });
+  }, []);
+  return zone;
 }
 
 interface FiguresProps extends Pick<PanelProps, 'document' | 'unit'> {

@@ -48,9 +48,11 @@ function UnderstoodForm({ measured, ...props }: UnderstoodFormProps) {
   const { table } = measured;
   return (
     <>
-      <div className={classNames('mt-1', isWide && 'grid grid-cols-2 gap-x-6')}>
+      <div className="@container mt-1">
+        <ColumnsForm columns={measured.columns} onChange={desk.meanColumn} />
+      </div>
+      <div className={classNames(isWide && 'grid grid-cols-2 gap-x-5')}>
         <div>
-          <ColumnsForm columns={measured.columns} onChange={desk.meanColumn} />
           {measured.status === 'read' && (
             <PlaceForm document={document} unit={unit} place={measured.place} onMean={desk.mean} />
           )}
@@ -74,7 +76,8 @@ function UnderstoodForm({ measured, ...props }: UnderstoodFormProps) {
 function Outcome({ document, unit, desk, measured }: UnderstoodFormProps) {
   const { fitted } = desk;
   if (measured.status !== 'read' || fitted === null || fitted.stations.length === 0) return null;
-  return <FitWords {...{ document, unit, desk, fitted }} readingCount={measured.readings.length} />;
+  const { readings, place } = measured;
+  return <FitWords {...{ document, unit, desk, fitted, place }} readingCount={readings.length} />;
 }
 
 function Refusals({ refusals }: { refusals: readonly string[] }) {

@@ -53,6 +53,16 @@ export function MeasuredShelf({ desk, ...bench }: MeasuredShelfProps) {
         sentence={`${times} than it is long`}
       />
       <BoreLines drawn={drawn} stations={stations} geometry={geometry} y={scale.y} />
+      {stations === null && (
+        <text
+          x={Math.max(24, left)}
+          y={MEASURED_SHELF.narrowY}
+          className="bench-label bore-haloed"
+          aria-hidden="true"
+        >
+          Readings lie here, over the bore as drawn, once there is a table.
+        </text>
+      )}
       {measured?.status === 'read' && fitted !== null && (
         <>
           <ReadingDots geometry={geometry} scale={scale} measured={measured} fitted={fitted} />

@@ -17,17 +17,16 @@ interface PlaceFormProps extends Pick<PanelProps, 'document' | 'unit'> {
 export function PlaceForm({ document, unit, place, onMean }: PlaceFormProps) {
   const { kind } = document.mouthEnd;
   const edge = place.from === 'foot' ? 'Foot' : EDGE_WORDS[kind];
-  const isAligned = place.isGuess && place.from === 'mouth' && place.zeroMm !== 0;
   return (
     <>
-      <FormRow label="Distances run">
-        <span className="w-46 shrink-0">
+      <FormRow label="Counted from">
+        <span className="w-33 shrink-0 max-[1100px]:w-42">
           <SmallSelect
-            label="Distances run"
+            label="Distances are counted from"
             value={place.from}
             options={[
-              { value: 'mouth', label: `from the ${MOUTH_WORDS[kind]} end`.replace('end end', 'end') },
-              { value: 'foot', label: 'from the foot' },
+              { value: 'mouth', label: mouthEndWords(MOUTH_WORDS[kind]) },
+              { value: 'foot', label: 'foot' },
             ]}
             onChange={(from) => onMean({ from, zeroMm: null })}
           />
@@ -37,7 +36,6 @@ export function PlaceForm({ document, unit, place, onMean }: PlaceFormProps) {
         <NumberField
           layout="row"
           label={`${edge} lies at`}
-          hint={isAligned ? 'so that the last reading is at the foot' : 'in the table'}
           value={place.zeroMm}
           format={lengthFormat(unit)}
           min={-5000}
@@ -48,3 +46,6 @@ export function PlaceForm({ document, unit, place, onMean }: PlaceFormProps) {
     </>
   );
 }
+
+/** `window end`, but not `open end end`. */
+const mouthEndWords = (mouth: string) => (mouth.endsWith(' end') ? mouth : `${mouth} end`);

@@ -25,28 +25,35 @@ interface KeyItem {
 const LETTER_PX = 6.4;
 const BETWEEN_PX = 30;
 const LONGEST_NAME = 22;
+/** The shelf has its own unit. */
+const UNIT_IN_NAME = /\s*[[(](mm|cm|in|inch|inches)\.?[\])]\s*$/i;
 
-const Y = MEASURED_SHELF.keyY;
+/** Two lines where one has no room. */
+const LINE_PX = 20;
 
 /** What each mark of the shelf means. */
 export function ShelfKey(props: ShelfKeyProps) {
   const { geometry, from } = props;
-  let x = from;
-  return keyItems(props).map((item) => {
-    const left = x;
-    const width = item.markPx + 8 + item.words.length * LETTER_PX;
-    x += width + BETWEEN_PX;
-    // What has no room is said in the words below.
-    if (left + width > geometry.widthPx - 8) return null;
-    return (
-      <g key={item.words}>
-        {item.mark(left + item.markPx / 2)}
-        <text x={left + item.markPx + 8} y={Y + 4.5} className="bench-label">
-          {item.words}
-        </text>
-      </g>
-    );
-  });
+  const room = geometry.widthPx - 8;
+  const places = keyItems(props).reduce<{ item: KeyItem; x: number; line: number; end: number }[]>(
+    (made, item) => {
+      const width = item.markPx + 8 + item.words.length * LETTER_PX;
+      const last = made.at(-1) ?? { end: from - BETWEEN_PX, line: 0 };
+      const isOnLine = last.end + BETWEEN_PX + width <= room;
+      const x = isOnLine ? last.end + BETWEEN_PX : from;
+      return [...made, { item, x, line: isOnLine ? last.line : last.line + 1, end: x + width }];
+    },
+    [],
+  );
+  const top = MEASURED_SHELF.keyY - ((places.at(-1)?.line ?? 0) * LINE_PX) / 2;
+  return places.map(({ item, x, line }) => (
+    <g key={item.words} transform={`translate(${x} ${top + line * LINE_PX})`}>
+      {item.mark(item.markPx / 2)}
+      <text x={item.markPx + 8} y={4.5} className="bench-label">
+        {item.words}
+      </text>
+    </g>
+  ));
 }
 
 function keyItems({ desk, drawn, unit }: ShelfKeyProps): KeyItem[] {
@@ -54,27 +61,27 @@ function keyItems({ desk, drawn, unit }: ShelfKeyProps): KeyItem[] {
   const drawnItem: KeyItem = {
     words: drawnWords(drawn, unit),
     markPx: 22,
-    mark: (x) => <path d={`M${x - 11} ${Y}h22`} className="measured-drawn" />,
+    mark: (x) => <path d={`M${x - 11} 0h22`} className="measured-drawn" />,
   };
   if (measured?.status !== 'read' || fitted === null) return [];
   const shapes = shapeOfColumn(measured.readings);
   const gauges = [...shapes].map(([column, shape]): KeyItem => {
-    const name = nameOf(measured.columns[column] ?? { title: null, index: column });
+    const name = nameOf(measured.columns[column] ?? { title: null, index: column }).replace(UNIT_IN_NAME, '');
     return {
       words: name.length > LONGEST_NAME ? `${name.slice(0, LONGEST_NAME - 1)}…` : name,
       markPx: 8,
-      mark: (x) => <ReadingDot x={x} y={Y} shape={shape} size={2.6} />,
+      mark: (x) => <ReadingDot x={x} y={0} shape={shape} size={2.6} />,
     };
   });
   return [
     ...gauges,
     ...(fitted.leftOut.length > 0
-      ? [{ words: 'left out', markPx: 16, mark: (x: number) => <LeftOutMark x={x} y={Y} /> }]
+      ? [{ words: 'left out', markPx: 16, mark: (x: number) => <LeftOutMark x={x} y={0} /> }]
       : []),
     {
       words: 'station kept',
       markPx: 11,
-      mark: (x) => <rect x={x - 5.5} y={Y - 5.5} width={11} height={11} rx={2} className="bore-knot" />,
+      mark: (x) => <rect x={x - 5.5} y={-5.5} width={11} height={11} rx={2} className="bore-knot" />,
     },
     drawnItem,
   ];

@@ -23,7 +23,7 @@ export function SmallSelect<Value extends string>({
         const chosen = options.find((option) => option.value === event.currentTarget.value);
         if (chosen !== undefined) onChange(chosen.value);
       }}
-      className="rounded-control border-line bg-sheet text-data text-ink h-8 w-full border pl-2 font-semibold max-[1100px]:h-12 max-[1100px]:text-[16px] pointer-coarse:h-12"
+      className="rounded-control border-line bg-sheet text-data text-ink h-7.5 w-full border pl-2 font-semibold max-[1100px]:h-12 max-[1100px]:text-[16px] pointer-coarse:h-12"
     >
       {options.map((option) => (
         <option key={option.value} value={option.value}>

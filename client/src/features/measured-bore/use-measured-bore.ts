@@ -24,6 +24,8 @@ export interface MeasuredBoreDesk extends SourceDesk {
   proposed: DesignDocument | null;
   /** Figures of the proposed design; null until they are worked out. */
   prediction: DesignPrediction | null;
+  /** The newest figures there are, perhaps of an earlier proposal: they have to look that way. */
+  lastPrediction: DesignPrediction | null;
   /** Why the stations cannot be used, in full sentences. */
   refusals: string[];
   use: () => void;
@@ -54,7 +56,7 @@ export function useMeasuredBore(
   const [isOpen, setOpen] = useShown();
   const [used, setUsed] = useState<Used | null>(null);
   const { measured, fitted } = useReading(document, desk, isOpen);
-  const { proposed, faults, prediction } = useProposal(document, { fitted, isOpen, options });
+  const { proposed, faults, ...predicted } = useProposal(document, { fitted, isOpen, options });
   const close = (isBeside: boolean) => {
     desk.keepBeside(isBeside);
     setOpen(false);
@@ -68,7 +70,7 @@ export function useMeasuredBore(
     measured,
     fitted,
     proposed,
-    prediction,
+    ...predicted,
     refusals: refusalsOf(readOnly, measured, fitted).concat(faults),
     use: () => {
       if (proposed === null) return;
@@ -115,7 +117,7 @@ function useProposal(document: DesignDocument, { fitted, isOpen, options }: Prop
     [proposed, faults, isOpen, options],
   );
   const { answer, isCurrent } = useStudy('prediction', ask);
-  return { proposed, faults, prediction: isCurrent ? answer : null };
+  return { proposed, faults, prediction: isCurrent ? answer : null, lastPrediction: answer };
 }
 
 function useShown(): [boolean, (isShown: boolean) => void] {
@@ -129,9 +131,9 @@ function useShown(): [boolean, (isShown: boolean) => void] {
   return [search.get(SHOWN) === 'open', setShown];
 }
 
-/** Reading waits while somebody types: a long table takes longer than a key. */
+/** Reading waits while somebody types or drags: a long table takes longer than a key or a frame. */
 function useReading(document: DesignDocument, { source }: SourceDesk, isOpen: boolean) {
-  const { bore } = document;
+  const bore = useDeferredValue(document.bore);
   const text = useDeferredValue(isOpen || source.isBeside ? source.text : '');
   const { meaning, fit } = source;
   const measured = useMemo(

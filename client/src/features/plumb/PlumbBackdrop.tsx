@@ -3,6 +3,7 @@ import type { BenchGeometry } from '../../bench/bench-geometry.ts';
 import { BobMark } from '../../bench/Bob.tsx';
 import type { PlumbRow, PlumbRows } from './plumb-rows.ts';
 import { bandOf } from '../../bench/band-of.ts';
+import { roomyGap } from './roomy-gap.ts';
 
 interface PlumbBackdropProps {
   geometry: BenchGeometry;
@@ -98,12 +99,9 @@ export function RowLabels({ geometry, rows, top }: RowLabelsProps) {
 
 /** The scale of the bobs, written once where two columns leave room for it. */
 export function ScaleKey({ geometry, bandCents }: { geometry: BenchGeometry; bandCents: readonly number[] }) {
-  const { columns, measures } = geometry;
-  const gap = columns
-    .slice(1)
-    .map((column, index) => ({ left: columns[index]?.x ?? 0, right: column.x }))
-    .find(({ left, right }) => right - left >= KEY_ROOM_PX);
-  if (gap === undefined || measures.rowStep === 0) return null;
+  const { measures } = geometry;
+  const gap = roomyGap(geometry, KEY_ROOM_PX);
+  if (gap === null) return null;
   const band = bandOf(bandCents, 1);
   const at = (cents: number) => cents * measures.pxPerCent;
   const end = measures.heldAtCents - 1;

@@ -9,6 +9,8 @@ import { spokenHungNote } from '../../bench/spoken-pitch.ts';
 import { useRestingValue } from '../../bench/use-resting-value.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import { FingeringRow } from './FingeringRow.tsx';
+import { GhostBobs } from './GhostBobs.tsx';
+import { GhostKey, GhostLine, type GhostWords } from './GhostKey.tsx';
 import { HangingNote } from './HangingNote.tsx';
 import { NoticeMarks } from './NoticeMarks.tsx';
 import { hasTwoLines, plumbRows, type PlumbRows } from './plumb-rows.ts';
@@ -21,6 +23,10 @@ interface PlumbChartProps extends PanelProps {
   isOld: boolean;
   /** The chosen note's fingering over the beam; panels with a chart of their own leave it out. */
   showsFingering?: boolean;
+  /** Cents of the same notes in an earlier or another state, by fingering id: dashed bobs behind. */
+  ghosts?: ReadonlyMap<string, number>;
+  /** What the dashed bobs and the full ones are called. */
+  ghostWords?: GhostWords;
 }
 
 /** A note and where it hangs in the chart, px from the column's pivot. */
@@ -50,7 +56,14 @@ export function PlumbChart(props: PlumbChartProps) {
         <FingeringRow geometry={geometry} holes={holes} fingering={shown} chosenKey={selection.hole} />
         <g transform={`translate(0 ${measures.beamY})`}>
           <PlumbBackdrop geometry={geometry} rows={rows} bandCents={bandCents} />
-          <ScaleKey geometry={geometry} bandCents={bandCents} />
+          {props.ghostWords === undefined ? (
+            <ScaleKey geometry={geometry} bandCents={bandCents} />
+          ) : (
+            <GhostKey geometry={geometry} words={props.ghostWords} />
+          )}
+          {props.ghosts !== undefined && (
+            <GhostBobs placed={placed} ghosts={props.ghosts} measures={measures} />
+          )}
           {placed.map((note) => (
             <PlacedBob key={note.fingering.id} note={note} chart={props} onChoose={choose} />
           ))}
@@ -72,6 +85,7 @@ export function PlumbChart(props: PlumbChartProps) {
           fingering
         </p>
       )}
+      {props.ghostWords !== undefined && <GhostLine geometry={geometry} words={props.ghostWords} />}
       <NoticeMarks notes={placed} top={measures.beamY} measures={measures} />
       <PlumbTable notes={useRestingValue(notes, isDragging)} holes={useRestingValue(holes, isDragging)} />
     </section>

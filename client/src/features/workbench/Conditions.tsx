@@ -41,6 +41,16 @@ export function Conditions(props: ConditionsProps) {
   );
 }
 
+/** While something is only held against the design. */
+export function TrialConditions({ unit, onUnit }: Pick<ConditionsProps, 'unit' | 'onUnit'>) {
+  return (
+    <div className="text-data text-ink3 ml-auto flex items-center gap-5.5">
+      <span>Nothing is changed until you choose</span>
+      <Segment label="Unit" size="small" value={unit} options={UNITS} onChange={onUnit} />
+    </div>
+  );
+}
+
 function Condition({ to, label, figure }: { to: string; label: string; figure: string }) {
   return (
     <Link to={to} className="text-ink3 hover:text-ink no-underline" preventScrollReset>

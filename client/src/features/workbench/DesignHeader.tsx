@@ -17,7 +17,8 @@ interface DesignHeaderProps {
   revision: number;
   state: RevisionState;
   facts: string;
-  history: History;
+  /** null while something is only held against the design: there is nothing of it to undo. */
+  history: History | null;
   /** Up to two quiet actions, then the primary one. */
   actions: ReactNode;
   /** Where the draft stands, for the narrow bar that has no row of conditions. */
@@ -43,7 +44,7 @@ export function DesignHeader({
         </div>
         <span className="text-data ml-auto shrink-0 max-[699px]:hidden">{saveNote}</span>
         <span className="flex shrink-0 items-center max-[699px]:ml-auto">
-          <HistoryButtons history={history} />
+          {history !== null && <HistoryButtons history={history} />}
         </span>
         <span className="flex shrink-0 items-center gap-2 max-[699px]:hidden">{actions}</span>
       </TopBarFill>
@@ -54,7 +55,7 @@ export function DesignHeader({
         </div>
         <p className="text-data text-ink3 min-w-0 truncate">{facts}</p>
         <div className="ml-auto flex shrink-0 items-center gap-2">
-          <HistoryButtons history={history} />
+          {history !== null && <HistoryButtons history={history} />}
           {actions}
         </div>
       </header>
