@@ -1,10 +1,10 @@
 import type { DesignPrediction } from '#shared/analysis/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { boreEnds, diameterAt } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { ColumnFigures, type FigureRow } from '../../bench/ColumnFigures.tsx';
-import { labelledHoles } from '../../bench/hole-labels.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { movedCents, noteMoves, printWidth } from './measured-words.ts';

@@ -3,6 +3,7 @@ import { useSearchParams } from 'react-router';
 import type { DesignPrediction } from '#shared/analysis/prediction.ts';
 import type { DesignDocument, Station } from '#shared/document/design-document.ts';
 import { documentFaults } from '#shared/document/document-faults.ts';
+import { wordsFromFoot } from '#shared/document/fault-words.ts';
 import { fitStations, type FittedBore } from '#shared/measured-bore/fit-stations.ts';
 import { readMeasuredBore, type MeasuredBore } from '#shared/measured-bore/read-measured-bore.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
@@ -47,7 +48,7 @@ interface Used {
 
 /** A measured bore on the bench: read, held against the drawn one, used as one step, and taken back. */
 export function useMeasuredBore(
-  props: Pick<PanelProps, 'document' | 'readOnly' | 'onEdit'>,
+  props: Pick<PanelProps, 'document' | 'unit' | 'readOnly' | 'onEdit'>,
   designId: number,
   options: PredictionOptions,
 ): MeasuredBoreDesk {
@@ -56,7 +57,12 @@ export function useMeasuredBore(
   const [isOpen, setOpen] = useShown();
   const [used, setUsed] = useState<Used | null>(null);
   const { measured, fitted } = useReading(document, desk, isOpen);
-  const { proposed, faults, ...predicted } = useProposal(document, { fitted, isOpen, options });
+  const { proposed, faults, ...predicted } = useProposal(document, {
+    fitted,
+    isOpen,
+    options,
+    unit: props.unit,
+  });
   const close = (isBeside: boolean) => {
     desk.keepBeside(isBeside);
     setOpen(false);
@@ -103,14 +109,16 @@ interface ProposalSource {
   fitted: FittedBore | null;
   isOpen: boolean;
   options: PredictionOptions;
+  unit: PanelProps['unit'];
 }
 
 /** The design with the measured bore, what is wrong with it, and its figures. */
-function useProposal(document: DesignDocument, { fitted, isOpen, options }: ProposalSource) {
+function useProposal(document: DesignDocument, { fitted, isOpen, options, unit }: ProposalSource) {
   const proposed = useMemo(() => proposedDocument(document, fitted), [document, fitted]);
   const faults = useMemo(
-    () => (proposed === null ? [] : documentFaults(proposed).map(({ message }) => message)),
-    [proposed],
+    () =>
+      proposed === null ? [] : documentFaults(proposed, wordsFromFoot(unit)).map(({ message }) => message),
+    [proposed, unit],
   );
   const ask = useMemo(
     () => (proposed === null || faults.length > 0 || !isOpen ? null : { document: proposed, options }),
