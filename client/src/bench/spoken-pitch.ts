@@ -1,4 +1,5 @@
 import { spokenNote } from '#shared/music/note-name.ts';
+import { notesPreference } from '../lib/preferences.ts';
 import type { HungNote } from './hung-notes.ts';
 
 /** "6.1 cents flat", "in tune", "not worked out". */
@@ -11,6 +12,6 @@ export function spokenCents(cents: number | null): string {
 
 /** "G 5 6.1 cents flat"; without a prediction the note alone. */
 export function spokenHungNote({ fingering, predicted }: HungNote): string {
-  const note = spokenNote(fingering.note);
+  const note = spokenNote(fingering.note, notesPreference.read());
   return predicted === null ? note : `${note} ${spokenCents(predicted.centsFromScale)}`;
 }

@@ -39,6 +39,12 @@ export function devicePreference<Value extends string>(
 /** Lengths in the workshop's unit, or in this person's own. */
 export const unitPreference = devicePreference('unit', ['workshop', 'mm', 'inch'], 'workshop');
 
+/** Notes by letter, or in the syllables of fixed do. */
+export const notesPreference = devicePreference('notes', ['letters', 'syllables'], 'letters');
+
+/** How far this person's fingers reach from hole to hole. */
+export const handPreference = devicePreference('hand', ['small', 'middle', 'large'], 'middle');
+
 /** Single keys such as `/` and `?`; speech control and some keyboards want them off. */
 export const singleKeysPreference = devicePreference('single-keys', ['on', 'off'], 'on');
 

@@ -57,10 +57,28 @@ export function fifthsFromC({ letter, accidental }: Pick<NoteName, 'letter' | 'a
   return FIFTHS[letter] + 7 * ALTERATION[accidental];
 }
 
-/** How a note is spoken: `F sharp 5`. */
-export function spokenNote(text: string): string {
+/** Letters, or the syllables of fixed do. */
+export type NoteWriting = 'letters' | 'syllables';
+
+const SYLLABLES: Record<Letter, string> = {
+  C: 'Do',
+  D: 'Re',
+  E: 'Mi',
+  F: 'Fa',
+  G: 'Sol',
+  A: 'La',
+  B: 'Si',
+};
+
+/** What a note's letter is called: `G`, or `Sol` where notes are written in syllables. */
+export function letterName({ letter }: Pick<NoteName, 'letter'>, writing: NoteWriting): string {
+  return writing === 'syllables' ? SYLLABLES[letter] : letter;
+}
+
+/** How a note is spoken: `F sharp 5`, `Fa sharp 5`. */
+export function spokenNote(text: string, writing: NoteWriting = 'letters'): string {
   const note = readNoteName(text);
   if (note === null) return text;
   const accidental = { '': '', '#': ' sharp', b: ' flat' }[note.accidental];
-  return `${note.letter}${accidental} ${note.octave}`;
+  return `${letterName(note, writing)}${accidental} ${note.octave}`;
 }

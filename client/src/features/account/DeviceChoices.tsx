@@ -1,6 +1,9 @@
 import type { ReactNode } from 'react';
+import { HAND_REACH_MM } from '#shared/document/hand-reach.ts';
 import {
+  handPreference,
   motionPreference,
+  notesPreference,
   singleKeysPreference,
   themePreference,
   unitPreference,
@@ -31,6 +34,27 @@ export function DeviceChoices({ workshopUnit }: DeviceChoicesProps) {
         ]}
       >
         Typed lengths may always carry a unit of their own: 3/16", 4.8 mm, #7.
+      </Choice>
+      <Choice
+        label="Notes"
+        preference={notesPreference}
+        options={[
+          { value: 'letters', label: 'C D E' },
+          { value: 'syllables', label: 'Do re mi' },
+        ]}
+      >
+        Fixed do: Do is C whatever the key. Typed notes keep their letters.
+      </Choice>
+      <Choice
+        label="Hand"
+        preference={handPreference}
+        options={[
+          { value: 'small', label: `Small, ${HAND_REACH_MM.small} mm` },
+          { value: 'middle', label: `Middle, ${HAND_REACH_MM.middle} mm` },
+          { value: 'large', label: `Large, ${HAND_REACH_MM.large} mm` },
+        ]}
+      >
+        From one finger’s hole to the next. A longer reach within a hand is marked at the workbench.
       </Choice>
       <Choice
         label="Single keys"

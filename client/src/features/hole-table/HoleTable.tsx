@@ -1,10 +1,12 @@
 import { titleInSentence } from '#shared/document/title-in-sentence.ts';
 import { memo, useMemo, useState } from 'react';
+import { isBeyondReach } from '#shared/document/hand-reach.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import { labelledHoles, type LabelledHole } from '#shared/document/hole-labels.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { useStable } from '../../bench/use-stable.ts';
+import { handPreference } from '../../lib/preferences.ts';
 import { Button } from '../../ui/Button.tsx';
 import { classNames } from '../../ui/class-names.ts';
 import { tablePlaces, type CellPlace } from './cell-offsets.ts';
@@ -166,13 +168,14 @@ const FIELD_PX = 74;
 
 function TableCell({ row, place, shift, labelled, next, top, ...props }: TableCellProps) {
   if (row.between !== undefined) {
-    const reach = labelled !== undefined && next !== undefined ? row.between(labelled, next) : null;
+    if (labelled === undefined || next === undefined) return <td />;
     return (
       <BetweenCell
         place={place}
         shift={shift}
         top={top}
-        text={reach === null ? null : printLength(reach, props.unit)}
+        text={printLength(row.between(labelled, next), props.unit)}
+        isFar={isBeyondReach(labelled.hole, next.hole, handPreference.read())}
       />
     );
   }
@@ -213,11 +216,13 @@ interface BetweenCellProps {
   place: CellPlace;
   shift: number;
   top: number;
-  text: string | null;
+  text: string;
+  /** Longer than the fingers of this hand reach. */
+  isFar: boolean;
 }
 
-function BetweenCell({ place, shift, top, text }: BetweenCellProps) {
-  if (text === null || place.between === null) return <td />;
+function BetweenCell({ place, shift, top, text, isFar }: BetweenCellProps) {
+  if (place.between === null) return <td />;
   const line = Math.min(24, ((place.gap ?? 0) - 40) / 2 - 6);
   const rule = line >= LEAST_LINE_PX ? <span className="bg-ink3 h-px" style={{ width: line }} /> : null;
   const at = shift + place.between - place.middle;
@@ -228,7 +233,14 @@ function BetweenCell({ place, shift, top, text }: BetweenCellProps) {
         style={{ top, transform: `translateX(calc(${at}px - 50%))` }}
       >
         {rule}
-        {text}
+        {isFar ? (
+          <b className="bg-wait text-wait-ink rounded-chip px-1">
+            {text}
+            <span className="sr-only"> longer than your hand reaches</span>
+          </b>
+        ) : (
+          text
+        )}
         {rule}
       </span>
     </td>

@@ -1,6 +1,7 @@
 import { memo } from 'react';
 import { formatCents } from '#shared/music/cents.ts';
 import { spokenNote } from '#shared/music/note-name.ts';
+import { notesPreference } from '../../lib/preferences.ts';
 import type { LabelledHole } from '#shared/document/hole-labels.ts';
 import type { HungNote } from '../../bench/hung-notes.ts';
 
@@ -29,7 +30,7 @@ export const PlumbTable = memo(function PlumbTable({ notes, holes }: PlumbTableP
         <tbody>
           {notes.map(({ fingering, predicted, column }) => (
             <tr key={fingering.id}>
-              <th scope="row">{spokenNote(fingering.note)}</th>
+              <th scope="row">{spokenNote(fingering.note, notesPreference.read())}</th>
               <td>{fingering.register}</td>
               <td>{under(column)}</td>
               <td>{figure(predicted?.centsFromScale, formatCents)}</td>
