@@ -92,8 +92,8 @@ const NoticeMark = memo(function NoticeMark({ id, about, x, y, isOpen, onToggle 
       aria-expanded={isOpen}
       aria-haspopup="dialog"
       onClick={(event) => onToggle(id, event.currentTarget)}
-      className="absolute top-0 left-0 flex size-6 items-center justify-center"
-      style={{ transform: `translate(${x - 12}px, ${y - 12}px)` }}
+      className="absolute top-0 left-0 flex size-6 items-center justify-center pointer-coarse:size-11"
+      style={{ transform: `translate(calc(${x}px - 50%), calc(${y}px - 50%))` }}
     >
       <svg width="13" height="12" viewBox="0 0 13 12" aria-hidden="true">
         <path d="M6.5 1L12.2 11H.8Z" className="bench-notice" />

@@ -70,8 +70,6 @@ function endsOf(document: DesignDocument, { unit }: Pick<PanelProps, 'unit'>): E
 
 const stopperOf = ({ mouthEnd }: DesignDocument) => (mouthEnd.kind === 'embouchure' ? mouthEnd.stopperMm : 0);
 
-/** A fingertip's worth, px. */
-const GRIP_PX = 44;
 /** One press of Alt and an arrow, mm; with Shift five times as much. */
 const STEP_MM = 0.1;
 
@@ -109,11 +107,9 @@ function EndGrip({ end, ...props }: EndGripsProps & { end: End }) {
       onClick={choose}
       onKeyDown={onKeyDown}
       {...handlers}
-      className="absolute top-0 left-0 flex touch-none items-center justify-center select-none"
+      className="absolute top-0 left-0 flex h-11 w-5.5 touch-none items-center justify-center select-none pointer-coarse:w-11"
       style={{
-        width: GRIP_PX / 2,
-        height: GRIP_PX,
-        transform: `translate(${x(end.positionMm) - GRIP_PX / 4}px, ${y - GRIP_PX / 2}px)`,
+        transform: `translate(calc(${x(end.positionMm)}px - 50%), calc(${y}px - 50%))`,
         cursor: canEdit ? 'ew-resize' : 'pointer',
       }}
     >

@@ -6,7 +6,7 @@ interface ZoomButtonsProps {
 }
 
 const BUTTON =
-  'border-line bg-sheet text-ink2 hover:text-ink disabled:text-line flex size-7 items-center justify-center border text-[17px] leading-none';
+  'border-line bg-sheet text-ink2 hover:text-ink disabled:text-line flex size-7 items-center justify-center pointer-coarse:size-11 border text-[17px] leading-none';
 
 /** Nearer, further, the finger holes, the whole: in the margin right of the foot. */
 export function ZoomButtons({ isWhole, onZoom, onWhole, onHoles }: ZoomButtonsProps) {
