@@ -56,4 +56,14 @@ describe('placing holes', () => {
     const bare = { ...starter('whistle', 'D5'), fingerings: [] };
     expect(placeHoles(bare)).toMatchObject({ furthestCents: null, document: { holes: bare.holes } });
   });
+
+  it('finds the length of a pipe that is stopped at the foot', () => {
+    const open = starter('end-blown', 'A4');
+    const lowest = open.fingerings.slice(0, 1).map((fingering) => ({ ...fingering, note: 'A3' }));
+    const stopped = { ...open, foot: { kind: 'stopped' as const }, fingerings: lowest };
+    const { furthestCents, rounds } = placeHoles(stopped);
+    // 0.1 mm of a column of about 380 mm is half a cent.
+    expect(Math.abs(furthestCents ?? Infinity)).toBeLessThan(0.6);
+    expect(rounds).toBeLessThan(8);
+  });
 });

@@ -81,9 +81,10 @@ function corrected(document: DesignDocument, notes: Map<string | null, Fingering
 /** A note that is sharp by some cents wants an air column longer by the same share. */
 function shiftMm(document: DesignDocument, note: FingeringPrediction | undefined): number {
   if (note?.centsFromScale === undefined || note.centsFromScale === null) return 0;
-  const closed = document.mouthEnd.kind === 'reed' || document.mouthEnd.kind === 'ideal-closed';
+  const isClosedAtMouth = document.mouthEnd.kind === 'reed' || document.mouthEnd.kind === 'ideal-closed';
+  const isClosedBelow = note.ventHole === null && document.foot.kind === 'stopped';
   const speedMmPerS = 345_000;
-  const columnMm = speedMmPerS / (closed ? 4 : 2) / note.targetHz;
+  const columnMm = speedMmPerS / (isClosedAtMouth === isClosedBelow ? 2 : 4) / note.targetHz;
   return columnMm * (2 ** (note.centsFromScale / 1200) - 1);
 }
 
