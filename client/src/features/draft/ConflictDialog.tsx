@@ -8,7 +8,7 @@ import { Button } from '../../ui/Button.tsx';
 import { Dialog, DialogActions } from '../../ui/Dialog.tsx';
 import { conflictRows, firstChoices, mergedDocument, type ConflictRow, type Side } from './conflict-rows.ts';
 import { timeWords } from './time-words.ts';
-import { valueWords } from './value-words.ts';
+import { valueWords } from '../../bench/value-words.ts';
 
 interface ConflictDialogProps {
   mine: DesignDocument;

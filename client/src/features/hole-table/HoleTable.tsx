@@ -9,7 +9,7 @@ import { useStable } from '../../bench/use-stable.ts';
 import { handPreference } from '../../lib/preferences.ts';
 import { Button } from '../../ui/Button.tsx';
 import { classNames } from '../../ui/class-names.ts';
-import { tablePlaces, type CellPlace } from './cell-offsets.ts';
+import { tablePlaces, type CellPlace } from '../../bench/table-places.ts';
 import { FigureCell } from './FigureCell.tsx';
 import { tableRows, type TableRow } from './table-rows.ts';
 

@@ -1,10 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { whistleDocument } from '../../../../tests/support/whistle-document.ts';
-import { benchFrame, benchGeometry } from '../../bench/bench-geometry.ts';
-import { WHOLE } from '../../bench/bench-view.ts';
-import { drawnBody } from '../../bench/drawn-body.ts';
-import { tablePlaces } from './cell-offsets.ts';
+import { whistleDocument } from '../../../tests/support/whistle-document.ts';
+import { benchFrame, benchGeometry } from './bench-geometry.ts';
+import { WHOLE } from './bench-view.ts';
+import { drawnBody } from './drawn-body.ts';
+import { tablePlaces } from './table-places.ts';
 
 const document = whistleDocument();
 const [template] = document.holes;

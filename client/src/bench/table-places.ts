@@ -1,4 +1,4 @@
-import type { BenchGeometry } from '../../bench/bench-geometry.ts';
+import type { BenchGeometry } from './bench-geometry.ts';
 
 export interface CellPlace {
   key: string;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { whistleDocument } from '../../../../tests/support/whistle-document.ts';
+import { whistleDocument } from '../../../tests/support/whistle-document.ts';
 import { valueWords } from './value-words.ts';
 
 const document = whistleDocument();
