@@ -68,26 +68,26 @@ function freeId(id: string, taken: Set<string>): string {
 const alongBore = (holes: readonly ToneHole[]) =>
   holes.toSorted((one, other) => one.positionMm - other.positionMm);
 
-/** null where ids say nothing: fewer than half are shared, or they run in another order along the bore. */
+/** null where ids say nothing: two kinds of instrument, fewer than half shared, or another order along the bore. */
 function holesById(a: DesignDocument, b: DesignDocument): Pair<ToneHole>[] | null {
   const [ofA, ofB] = [alongBore(a.holes), alongBore(b.holes)];
   const idsOfB = new Set(ofB.map(({ id }) => id));
   const shared = ofA.filter(({ id }) => idsOfB.has(id)).map(({ id }) => id);
   const inB = ofB.map(({ id }) => id).filter((id) => shared.includes(id));
   const isSameOrder = shared.every((id, index) => inB[index] === id);
-  if (!isSameOrder || shared.length * 2 < Math.min(ofA.length, ofB.length)) return null;
-  return inPlace(
-    ofB.map((hole) => ({ a: ofA.find(({ id }) => id === hole.id) ?? null, b: hole })),
-    ofA.filter(({ id }) => !idsOfB.has(id)),
-  );
+  const isSameKind = a.mouthEnd.kind === b.mouthEnd.kind;
+  if (!isSameKind || !isSameOrder || shared.length * 2 < Math.min(ofA.length, ofB.length)) return null;
+  const pairs = ofB.map((hole) => ({ a: ofA.find(({ id }) => id === hole.id) ?? null, b: hole }));
+  const alone = ofA.filter(({ id }) => !idsOfB.has(id)).map((hole) => ({ a: hole, b: null }));
+  return inPlace([...pairs, ...alone], a, b);
 }
 
-/** Holes that only the first has, put among the pairs where they lie. */
-function inPlace(pairs: Pair<ToneHole>[], alone: readonly ToneHole[]): Pair<ToneHole>[] {
-  const placeOf = ({ a, b }: Pair<ToneHole>) => (a ?? b)?.positionMm ?? 0;
-  return [...pairs, ...alone.map((hole) => ({ a: hole, b: null }))].sort(
-    (one, other) => placeOf(one) - placeOf(other),
-  );
+/** From the mouth end to the foot, each pair where it lies in the second, or else in the first. */
+function inPlace(pairs: Pair<ToneHole>[], a: DesignDocument, b: DesignDocument): Pair<ToneHole>[] {
+  const [footA, footB] = [boreEnds(a).footMm, boreEnds(b).footMm];
+  const shareOf = (pair: Pair<ToneHole>) =>
+    pair.b === null ? (pair.a?.positionMm ?? 0) / footA : pair.b.positionMm / footB;
+  return pairs.sort((one, other) => shareOf(one) - shareOf(other));
 }
 
 /** What one hole too many costs against holes that lie apart by this share of the length. */
@@ -109,9 +109,7 @@ function holesByPlace(a: DesignDocument, b: DesignDocument): Pair<ToneHole>[] {
       distance,
     ),
   );
-  const shareOf = (pair: Pair<ToneHole>) =>
-    pair.b === null ? (pair.a?.positionMm ?? 0) / footA : pair.b.positionMm / footB;
-  return pairs.sort((one, other) => shareOf(one) - shareOf(other));
+  return inPlace(pairs, a, b);
 }
 
 interface Alignment {
