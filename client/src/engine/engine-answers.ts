@@ -1,6 +1,7 @@
 import type { DesignPrediction, ImpedanceCurve } from '#shared/analysis/prediction.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import type { DocumentFault } from '#shared/document/fault-words.ts';
+import type { TransformOrder, TransformOutcome } from '#shared/transform/transform-design.ts';
 import type { WiderHere } from './wider-here.ts';
 
 export interface PredictionOptions {
@@ -32,6 +33,10 @@ export interface Studies {
   impedance: {
     ask: { document: DesignDocument; fingering: string; toHz: number };
     answer: ImpedanceCurve;
+  };
+  transform: {
+    ask: { document: DesignDocument; order: TransformOrder };
+    answer: TransformOutcome;
   };
   ribbons: {
     ask: {

@@ -7,6 +7,7 @@ import type { DesignSensitivities } from '#shared/analysis/prediction.ts';
 import { standingWave } from '#shared/analysis/standing-wave.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { readDocument } from '#shared/document/read-document.ts';
+import { transformDesign } from '#shared/transform/transform-design.ts';
 import type { EngineAnswer, PredictionOptions, Studies, StudyKind } from './engine-answers.ts';
 import { widerHere } from './wider-here.ts';
 
@@ -23,6 +24,7 @@ const studies: { [Kind in StudyKind]: (ask: Studies[Kind]['ask']) => Studies[Kin
       toHz,
       stepHz: (toHz - CURVE_FROM_HZ) / CURVE_POINTS,
     }),
+  transform: ({ document, order }) => transformDesign(document, order),
   ribbons: ({ document, fingering, resonances }) =>
     resonances.map(({ mode, frequencyHz }) => ({
       mode,
