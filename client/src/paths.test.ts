@@ -1,6 +1,6 @@
 import { matchPath } from 'react-router';
 import { describe, expect, it } from 'vitest';
-import { isWorkbenchPanel, paths, patterns } from './paths.ts';
+import { isCompareView, isWorkbenchPanel, paths, patterns } from './paths.ts';
 
 describe('paths', () => {
   it('has every address of the program', () => {
@@ -10,6 +10,8 @@ describe('paths', () => {
         signIn: () => paths.signIn(),
         design: () => paths.design(12),
         workbench: () => paths.workbench(12, 3, 'holes'),
+        compare: () => paths.compare(12, 14),
+        chooseToCompare: () => paths.chooseToCompare(12),
       }).map(([name, address]) => [name, address()]),
     );
     expect(addresses).toEqual({
@@ -21,6 +23,8 @@ describe('paths', () => {
       newDesign: '/designs/new',
       design: '/designs/12',
       workbench: '/designs/12/r/3/holes',
+      compare: '/designs/compare/12/14/holes',
+      chooseToCompare: '/designs?compare=12',
       account: '/account',
       workshopDefaults: '/workshop/defaults',
       workshopMembers: '/workshop/members',
@@ -39,6 +43,7 @@ describe('paths', () => {
 
   it.each([
     [patterns.design, paths.design(7), { id: '7' }],
+    [patterns.compare, paths.compare(7, 7, 'air'), { a: '7', b: '7', view: 'air' }],
     [patterns.workbench, paths.workbench(7, 2, 'air'), { id: '7', rev: '2', panel: 'air' }],
   ])('matches %s to the addresses it makes', (pattern, address, params) => {
     expect(matchPath(pattern, address)?.params).toEqual(params);
@@ -55,5 +60,16 @@ describe('isWorkbenchPanel', () => {
     [null, false],
   ])('%s: %s', (panel, expected) => {
     expect(isWorkbenchPanel(panel)).toBe(expected);
+  });
+});
+
+describe('isCompareView', () => {
+  it.each([
+    ['notes', true],
+    ['air', true],
+    ['fit', false],
+    [undefined, false],
+  ])('%s: %s', (view, expected) => {
+    expect(isCompareView(view)).toBe(expected);
   });
 });

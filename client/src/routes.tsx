@@ -19,7 +19,7 @@ export function createRouter(queryClient: QueryClient) {
         </PlainFrame>
       ),
       children: [
-        { path: paths.home(), loader: () => redirect(paths.today()) },
+        { path: paths.home(), element: null, loader: () => redirect(paths.today()) },
         ...openRoutes(),
         {
           loader: signedInLoader(queryClient),
@@ -80,7 +80,20 @@ function designRoutes(queryClient: QueryClient): RouteObject[] {
       },
     },
     {
+      path: patterns.compare,
+      handle: { name: 'Compare' },
+      lazy: async () => {
+        const { ComparePage, compareLoader } = await import('./pages/ComparePage.tsx');
+        return { Component: ComparePage, loader: compareLoader(queryClient) };
+      },
+      // Another view, temperature or key is another address of the same two instruments.
+      shouldRevalidate: ({ currentParams, nextParams }) =>
+        currentParams.a !== nextParams.a || currentParams.b !== nextParams.b,
+    },
+    {
       path: patterns.design,
+      // Leads on to the workbench and shows nothing itself; the router wants to be told so.
+      element: null,
       lazy: async () => ({ loader: (await import('./pages/design-gate.ts')).designGate(queryClient) }),
     },
     {
