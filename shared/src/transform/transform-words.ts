@@ -3,15 +3,16 @@ import { boreEnds } from '../document/profile.ts';
 import { printLength } from '../lengths/print-length.ts';
 import type { LengthUnit } from '../lengths/read-length.ts';
 import { formatCents } from '../music/cents.ts';
-import type { TransformOrder } from './transform-design.ts';
 
 /** A plain note further from the scale than this was not reached, cents. */
 const REACHED_WITHIN_CENTS = 2;
 /** A change of diameter at the foot that would show on a rule, mm. */
 const VISIBLE_MM = 0.05;
 
-interface ScaledOrder extends Pick<TransformOrder, 'unit' | 'holeSizes'> {
+interface ScaledOrder {
   ratio: number;
+  unit: LengthUnit;
+  holeSizes: 'exact' | 'nearest-drill';
 }
 
 const size = (mm: number, unit: LengthUnit) => `${printLength(mm, unit)} ${unit === 'mm' ? 'mm' : 'in'}`;
