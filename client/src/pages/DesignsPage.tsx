@@ -1,19 +1,24 @@
-import { useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
+import { useQuery, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
 import { useCallback } from 'react';
 import { Link, useNavigate, useSearchParams } from 'react-router';
 import type { ListDesignsQuery } from '#shared/contract/designs.ts';
 import { permissionRefusal } from '#shared/rules/permissions.ts';
+import { ChoosingBand } from '../features/designs/ChoosingBand.tsx';
 import { DesignFilters } from '../features/designs/DesignFilters.tsx';
 import { DesignRack } from '../features/designs/DesignRack.tsx';
-import { designListQuery } from '../features/designs/designs.queries.ts';
+import { designListQuery, designQuery } from '../features/designs/designs.queries.ts';
 import { EmptyRack } from '../features/designs/EmptyRack.tsx';
 import { FindBox } from '../features/designs/FindBox.tsx';
 import {
   changeList,
   isWholeList,
+  readChoosing,
   readListAddress,
+  withChoosing,
   writeListAddress,
+  type Choosing,
 } from '../features/designs/list-address.ts';
+import { useListSearch } from '../features/designs/use-list-search.ts';
 import { RackPager } from '../features/designs/RackPager.tsx';
 import { ReadInDesign } from '../features/designs/ReadInDesign.tsx';
 import { SortSelect } from '../features/designs/SortSelect.tsx';
@@ -39,12 +44,19 @@ export function DesignsPage() {
   const { data: found } = useSuspenseQuery(designListQuery(list));
   const session = useSession();
   const unit = useUnit();
-  const handleList = (next: ListDesignsQuery) => setSearch(writeListAddress(next));
+  const choosing = readChoosing(search);
+  const searchOf = useListSearch();
+  const handleList = (next: ListDesignsQuery) => setSearch(searchOf(next));
   const handleSearch = useCallback(
     (text: string) =>
-      setSearch((current) => writeListAddress(changeList(readListAddress(current), { search: text })), {
-        replace: true,
-      }),
+      setSearch(
+        (current) =>
+          withChoosing(
+            writeListAddress(changeList(readListAddress(current), { search: text })),
+            readChoosing(current),
+          ),
+        { replace: true },
+      ),
     [setSearch],
   );
 
@@ -52,6 +64,7 @@ export function DesignsPage() {
     <div className="px-margin pt-3.5 pb-10">
       <PageTitle>Designs</PageTitle>
       <DesignsHead refusal={permissionRefusal(session, 'create-design')} />
+      {choosing !== null && <BandOf choosing={choosing} leaveTo={`?${writeListAddress(list).toString()}`} />}
       <div className="mt-3 mb-2 flex flex-wrap items-center justify-between gap-x-4 gap-y-3">
         <DesignFilters list={list} counts={found.counts} />
         <FindBox search={list.search} onSearch={handleSearch} />
@@ -73,6 +86,8 @@ export function DesignsPage() {
           unit={unit}
           bandCents={session.workshop.bandCents}
           pathOf={paths.design}
+          chooseOf={choosing === null ? undefined : (id) => chosenPath(choosing, id)}
+          compareOf={paths.chooseToCompare}
           onChange={handleList}
           refusals={{
             copy: permissionRefusal(session, 'copy-design'),
@@ -85,13 +100,39 @@ export function DesignsPage() {
   );
 }
 
+/** The second one chosen opens the comparison. */
+const chosenPath = (choosing: NonNullable<Choosing>, id: number) =>
+  choosing === 'two' ? paths.chooseToCompare(id) : paths.compare(choosing, id);
+
+function BandOf({ choosing, leaveTo }: { choosing: NonNullable<Choosing>; leaveTo: string }) {
+  const isChosen = choosing !== 'two';
+  const { data: first } = useQuery({ ...designQuery(isChosen ? choosing : 0), enabled: isChosen });
+  return (
+    <ChoosingBand
+      name={isChosen ? (first?.name ?? 'it') : null}
+      selfTo={
+        isChosen
+          ? {
+              pitch: paths.compare(choosing, choosing, 'pitch'),
+              air: paths.compare(choosing, choosing, 'air'),
+            }
+          : null
+      }
+      leaveTo={leaveTo}
+    />
+  );
+}
+
 function DesignsHead({ refusal }: { refusal: string | null }) {
   const navigate = useNavigate();
   return (
     <div className="max-bar:justify-end flex flex-wrap items-start justify-between gap-3">
       <h1 className="text-page max-bar:sr-only font-semibold">Designs</h1>
       {refusal === null ? (
-        <div className="flex gap-2">
+        <div className="flex flex-wrap justify-end gap-2">
+          <Button asChild look="bare">
+            <Link to={paths.chooseToCompare()}>Compare two</Link>
+          </Button>
           <ReadInDesign onCreated={(design) => void navigate(paths.design(design.id))} />
           <Button asChild look="go">
             <Link to={paths.newDesign()}>New design</Link>
@@ -137,6 +178,7 @@ function NothingFound({ list, total, refusal }: NothingFoundProps) {
 }
 
 function NoMatch({ list }: { list: ListDesignsQuery }) {
+  const searchOf = useListSearch();
   const isNarrowed = list.kind !== undefined || list.mine || list.archived;
   const plain = readListAddress(new URLSearchParams());
   const wider = isNarrowed ? changeList(plain, { search: list.search }) : plain;
@@ -147,9 +189,7 @@ function NoMatch({ list }: { list: ListDesignsQuery }) {
         {isNarrowed ? ' in this part of the rack.' : '.'}
       </p>
       <Button asChild>
-        <Link to={{ search: writeListAddress(wider).toString() }}>
-          {isNarrowed ? 'Look in all' : 'Show all designs'}
-        </Link>
+        <Link to={{ search: searchOf(wider) }}>{isNarrowed ? 'Look in all' : 'Show all designs'}</Link>
       </Button>
     </EmptyRack>
   );

@@ -9,6 +9,7 @@ import type { DraftOnBench } from '../features/draft/use-draft.ts';
 import { Conditions, TrialConditions } from '../features/workbench/Conditions.tsx';
 import { DesignHeader, type History } from '../features/workbench/DesignHeader.tsx';
 import { PanelLinks } from '../features/workbench/PanelLinks.tsx';
+import { CompareMenu } from '../features/workbench/CompareMenu.tsx';
 import { SheetMenu } from '../features/workbench/SheetMenu.tsx';
 import { unitPreference } from '../lib/preferences.ts';
 import { useSession } from '../lib/session.ts';
@@ -92,6 +93,14 @@ function HeadActions({ design, panel, unit, save, readOnly, ...props }: Workbenc
     save.status === 'saved' ? null : 'The sheet is printed from what is saved. Wait until this draft is.';
   return (
     <>
+      <CompareMenu
+        places={[
+          { to: paths.chooseToCompare(design.id), label: 'With another design' },
+          { to: paths.compare(design.id, design.id, 'pitch'), label: 'At another pitch' },
+          { to: paths.compare(design.id, design.id, 'air'), label: 'At another temperature' },
+        ]}
+        refusal={save.status === 'saved' ? null : 'What is saved is compared. Wait until this draft is.'}
+      />
       {panel === 'holes' && (
         <Button disabled={readOnly !== null} onClick={props.onAddHole}>
           Add a hole

@@ -1,7 +1,8 @@
 import { Link } from 'react-router';
 import type { DesignList, ListDesignsQuery } from '#shared/contract/designs.ts';
 import { classNames } from '../../ui/class-names.ts';
-import { changeList, writeListAddress } from './list-address.ts';
+import { changeList } from './list-address.ts';
+import { useListSearch } from './use-list-search.ts';
 
 interface DesignFiltersProps {
   list: ListDesignsQuery;
@@ -67,10 +68,11 @@ interface FilterProps {
 }
 
 function Filter({ list, change, isOn, label, count }: FilterProps) {
+  const searchOf = useListSearch();
   return (
     <li>
       <Link
-        to={{ search: writeListAddress(changeList(list, change)).toString() }}
+        to={{ search: searchOf(changeList(list, change)) }}
         aria-current={isOn ? 'true' : undefined}
         className="target flex min-w-11 items-center text-[14.5px] no-underline"
       >

@@ -22,13 +22,17 @@ interface DesignRackProps {
   /** In tune within this many cents, by register. */
   bandCents: readonly number[];
   pathOf: (id: number) => string;
+  /** Where choosing one to be compared leads; while none is being chosen a row opens its design. */
+  chooseOf?: ((id: number) => string) | undefined;
+  /** Where comparing a design with another begins. */
+  compareOf: (id: number) => string;
   onChange: (list: ListDesignsQuery) => void;
   /** Why this person may not copy, rename or archive; null when they may. */
   refusals: RackRefusals;
 }
 
 /** Every design drawn to one scale, feet to the right, with what is known of its pitch. */
-export function DesignRack({ designs, list, unit, bandCents, pathOf, onChange, refusals }: DesignRackProps) {
+export function DesignRack({ designs, list, unit, bandCents, onChange, ...row }: DesignRackProps) {
   const [drawing, widthPx] = useElementWidth();
   const scale =
     widthPx === null
@@ -42,29 +46,22 @@ export function DesignRack({ designs, list, unit, bandCents, pathOf, onChange, r
       <RackHead list={list} onChange={onChange} scale={scale} unit={unit} drawingRef={drawing} />
       <div role="rowgroup">
         {designs.map((design) => (
-          <DesignRow
-            key={design.id}
-            design={design}
-            scale={scale}
-            bandCents={bandCents}
-            to={pathOf(design.id)}
-            refusals={refusals}
-          />
+          <DesignRow key={design.id} design={design} scale={scale} bandCents={bandCents} {...row} />
         ))}
       </div>
     </div>
   );
 }
 
-interface DesignRowProps {
+interface DesignRowProps extends Pick<
+  DesignRackProps,
+  'bandCents' | 'pathOf' | 'chooseOf' | 'compareOf' | 'refusals'
+> {
   design: DesignSummary;
   scale: RackScale | null;
-  bandCents: readonly number[];
-  to: string;
-  refusals: RackRefusals;
 }
 
-function DesignRow({ design, scale, bandCents, to, refusals }: DesignRowProps) {
+function DesignRow({ design, scale, bandCents, pathOf, chooseOf = pathOf, ...row }: DesignRowProps) {
   const [first = 0, second = 0] = bandCents;
   return (
     <div
@@ -73,7 +70,7 @@ function DesignRow({ design, scale, bandCents, to, refusals }: DesignRowProps) {
     >
       <div role="rowheader" className="min-w-0 [grid-area:name]">
         <Link
-          to={to}
+          to={chooseOf(design.id)}
           title={design.name}
           className="text-row text-ink line-clamp-2 font-semibold break-words no-underline after:absolute after:inset-0"
         >
@@ -107,7 +104,12 @@ function DesignRow({ design, scale, bandCents, to, refusals }: DesignRowProps) {
         <span className="text-data text-ink3">{printWhen(design.changedAt)}</span>
       </div>
       <div role="cell" className="relative -mt-2.5 [grid-area:menu]">
-        <DesignRowMenu design={design} to={to} refusals={refusals} />
+        <DesignRowMenu
+          design={design}
+          to={pathOf(design.id)}
+          compareTo={row.compareOf(design.id)}
+          refusals={row.refusals}
+        />
       </div>
     </div>
   );

@@ -27,11 +27,12 @@ const NAMINGS = {
 interface DesignRowMenuProps {
   design: DesignSummary;
   to: string;
+  compareTo: string;
   refusals: RackRefusals;
 }
 
 /** What can be done with a design from the rack. Putting it away is undone by taking it back, so it is not asked about. */
-export function DesignRowMenu({ design, to, refusals }: DesignRowMenuProps) {
+export function DesignRowMenu({ design, to, compareTo, refusals }: DesignRowMenuProps) {
   const [naming, setNaming] = useState<keyof typeof NAMINGS | null>(null);
   const copy = useCopyDesign();
   const rename = useRenameDesign();
@@ -57,6 +58,9 @@ export function DesignRowMenu({ design, to, refusals }: DesignRowMenuProps) {
       <Menu trigger={trigger}>
         <MenuItem asChild>
           <Link to={to}>Open</Link>
+        </MenuItem>
+        <MenuItem asChild>
+          <Link to={compareTo}>Compare…</Link>
         </MenuItem>
         <MenuItem disabled={refusals.copy !== null} onSelect={() => setNaming('copy')}>
           Copy…

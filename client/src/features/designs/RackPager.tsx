@@ -1,7 +1,7 @@
 import { Link } from 'react-router';
 import type { DesignList, ListDesignsQuery } from '#shared/contract/designs.ts';
 import { Button } from '../../ui/Button.tsx';
-import { writeListAddress } from './list-address.ts';
+import { useListSearch } from './use-list-search.ts';
 
 interface RackPagerProps {
   list: ListDesignsQuery;
@@ -37,6 +37,7 @@ interface PageLinkProps {
 }
 
 function PageLink({ list, page, isThere, children }: PageLinkProps) {
+  const searchOf = useListSearch();
   if (!isThere)
     return (
       <Button size="small" disabled>
@@ -45,7 +46,7 @@ function PageLink({ list, page, isThere, children }: PageLinkProps) {
     );
   return (
     <Button asChild size="small">
-      <Link to={{ search: writeListAddress({ ...list, page }).toString() }}>{children}</Link>
+      <Link to={{ search: searchOf({ ...list, page }) }}>{children}</Link>
     </Button>
   );
 }

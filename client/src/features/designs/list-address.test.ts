@@ -1,7 +1,15 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { DESIGN_SORTS, listDesignsQuery, type ListDesignsQuery } from '#shared/contract/designs.ts';
-import { changeList, isWholeList, readListAddress, sortList, writeListAddress } from './list-address.ts';
+import {
+  changeList,
+  isWholeList,
+  readChoosing,
+  readListAddress,
+  sortList,
+  withChoosing,
+  writeListAddress,
+} from './list-address.ts';
 
 const usual = listDesignsQuery.parse({});
 const read = (search: string) => readListAddress(new URLSearchParams(search));
@@ -72,5 +80,23 @@ describe('isWholeList', () => {
     ['archived=true', false],
   ])('%s: %s', (search, expected) => {
     expect(isWholeList(read(search))).toBe(expected);
+  });
+});
+
+describe('choosing what to compare', () => {
+  it.each([
+    ['compare=two', 'two'],
+    ['compare=12', 12],
+    ['compare=0', null],
+    ['compare=x', null],
+    ['', null],
+  ])('%s is %s', (search, choosing) => {
+    expect(readChoosing(new URLSearchParams(search))).toBe(choosing);
+  });
+
+  it('goes on through another list, and ends', () => {
+    const list = writeListAddress(read('kind=window'));
+    expect(withChoosing(list, 12).toString()).toBe('kind=window&compare=12');
+    expect(withChoosing(withChoosing(list, 12), null).toString()).toBe('kind=window');
   });
 });

@@ -47,3 +47,20 @@ export function sortList(list: ListDesignsQuery, sort: DesignSort): ListDesignsQ
 export function isWholeList(list: ListDesignsQuery): boolean {
   return list.search === '' && list.kind === undefined && !list.mine && !list.archived;
 }
+
+/** What is being chosen on the rack to be compared: both, or the fellow of one; null while nothing is. */
+export type Choosing = 'two' | number | null;
+
+export function readChoosing(search: URLSearchParams): Choosing {
+  const asked = search.get('compare');
+  if (asked === 'two') return 'two';
+  return asked !== null && /^[1-9]\d{0,9}$/.test(asked) ? Number(asked) : null;
+}
+
+/** The same address with a choice going on in it, or none. */
+export function withChoosing(search: URLSearchParams, choosing: Choosing): URLSearchParams {
+  const next = new URLSearchParams(search);
+  if (choosing === null) next.delete('compare');
+  else next.set('compare', String(choosing));
+  return next;
+}
