@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import { columnOf } from '../bench/bench-geometry.ts';
 import { drawnBody } from '../bench/drawn-body.ts';
-import { labelledHoles } from '../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../bench/panel-props.ts';
 import type { Comparison } from '../features/compare/comparison.ts';
 import { OldOutline } from '../features/compare/OldOutline.tsx';
@@ -77,7 +77,7 @@ export function CompareStrip({ bench, comparison }: CompareStripProps) {
         <StripLabels
           geometry={{ ...geometry, body: frame.body }}
           document={document}
-          chosen={chosen}
+          chosenKey={selection.hole}
           unit={unit}
         />
       </svg>

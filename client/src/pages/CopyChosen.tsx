@@ -1,11 +1,13 @@
 import { lazy, Suspense, useState } from 'react';
 import { useNavigate } from 'react-router';
 import { takeDifference } from '#shared/document/document-difference.ts';
+import { wordsFromFoot } from '#shared/document/fault-words.ts';
 import { readDocument, type DocumentReading } from '#shared/document/read-document.ts';
 import { permissionRefusal } from '#shared/rules/permissions.ts';
 import type { Change } from '../features/compare/compare-changes.ts';
 import { useCreateDesign } from '../features/designs/designs.queries.ts';
 import { useSession } from '../lib/session.ts';
+import { useUnit } from '../lib/unit.ts';
 import { paths } from '../paths.ts';
 import { Button } from '../ui/Button.tsx';
 import type { ComparedDraft } from './compared-draft.ts';
@@ -25,10 +27,14 @@ export function CopyChosen({ base, changes }: CopyChosenProps) {
   const [reading, setReading] = useState<DocumentReading | null>(null);
   const create = useCreateDesign();
   const navigate = useNavigate();
+  const unit = useUnit();
   const refusal = permissionRefusal(useSession(), 'create-design');
   const merge = () =>
     setReading(
-      readDocument(changes.flatMap(({ differences }) => differences).reduce(takeDifference, base.document)),
+      readDocument(
+        changes.flatMap(({ differences }) => differences).reduce(takeDifference, base.document),
+        wordsFromFoot(unit),
+      ),
     );
   return (
     <>

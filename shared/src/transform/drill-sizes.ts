@@ -1,5 +1,5 @@
 import type { DesignDocument, ToneHole } from '../document/design-document.ts';
-import { WIDEST_HOLE_SHARE } from '../document/document-faults.ts';
+import { WIDEST_HOLE_SHARE } from '../document/hole-faults.ts';
 import { diameterAt } from '../document/profile.ts';
 import { drillsOf, nearestDrills, type Drill } from '../lengths/drills.ts';
 import { printExactLength } from '../lengths/print-length.ts';

@@ -1,5 +1,5 @@
 import type { DesignDocument, MouthEnd, Station, ToneHole, Undercut } from '../document/design-document.ts';
-import { WIDEST_HOLE_SHARE } from '../document/document-faults.ts';
+import { WIDEST_HOLE_SHARE } from '../document/hole-faults.ts';
 import { chimneyMm, diameterAt } from '../document/profile.ts';
 
 /**

@@ -1,6 +1,6 @@
 import { EngineInputError } from '../acoustics/engine-input-error.ts';
 import type { DesignDocument } from '../document/design-document.ts';
-import type { DocumentFault } from '../document/document-faults.ts';
+import { wordsFromFoot, type DocumentFault } from '../document/fault-words.ts';
 import { readDocument, type DocumentReading } from '../document/read-document.ts';
 import type { LengthUnit } from '../lengths/read-length.ts';
 import { noteFrequencyHz } from '../music/temperament.ts';
@@ -109,7 +109,11 @@ function withAllScaled(
 ): TransformOutcome {
   const scaled = scaleLengths(document, 1 / ratio);
   const drilled = order.holeSizes === 'nearest-drill' ? toNearestDrills(scaled, order.unit) : scaled;
-  const reading = firstValid(DECIMALS.map((decimals) => () => roundLengths(drilled, decimals)));
+  const reading = firstValid(
+    DECIMALS.map(
+      (decimals) => () => readDocument(roundLengths(drilled, decimals), wordsFromFoot(order.unit)),
+    ),
+  );
   if (reading.status === 'refused') return reading;
   return {
     status: 'transformed',
@@ -126,24 +130,25 @@ function withBoreKept(
   { unit }: TransformOrder,
 ): TransformOutcome {
   // Nothing that cannot be drawn is given to the engine: holes that run into each other are told as they are.
-  const first = readDocument(firstLayout(document, original, ratio));
+  const words = wordsFromFoot(unit);
+  const first = readDocument(firstLayout(document, original, ratio), words);
   if (first.status === 'refused') return first;
   const { document: placed, furthestCents } = keepBore(document, original, ratio);
-  const reading = readDocument(placed);
+  const reading = readDocument(placed, words);
   if (reading.status === 'refused') return reading;
-  const words = keptBoreWords(original, reading.document, { furthestCents, unit });
+  const said = keptBoreWords(original, reading.document, { furthestCents, unit });
   return {
     status: 'transformed',
     document: reading.document,
     ratio,
-    done: words.done,
-    cautions: [...cautions, ...words.cautions],
+    done: said.done,
+    cautions: [...cautions, ...said.cautions],
   };
 }
 
-function firstValid(makings: readonly (() => DesignDocument)[]): DocumentReading {
-  const [making, ...finer] = makings;
-  if (making === undefined) throw new RangeError('There is nothing to choose from.');
-  const reading = readDocument(making());
+function firstValid(readings: readonly (() => DocumentReading)[]): DocumentReading {
+  const [read, ...finer] = readings;
+  if (read === undefined) throw new RangeError('There is nothing to choose from.');
+  const reading = read();
   return reading.status === 'read' || finer.length === 0 ? reading : firstValid(finer);
 }

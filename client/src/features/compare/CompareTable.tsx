@@ -1,7 +1,7 @@
 import { memo, useMemo } from 'react';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import type { BenchGeometry } from '../../bench/bench-geometry.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { tablePlaces, type CellPlace, type TablePlaces } from '../../bench/table-places.ts';
 import { classNames } from '../../ui/class-names.ts';
 import type { Comparison } from './comparison.ts';

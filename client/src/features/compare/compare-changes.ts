@@ -6,7 +6,7 @@ import type { ToneHole } from '#shared/document/design-document.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { formatCents } from '#shared/music/cents.ts';
-import { labelledHoles } from '../../bench/hole-labels.ts';
+import { labelledHoles } from '#shared/document/hole-labels.ts';
 import { hungNotes } from '../../bench/hung-notes.ts';
 import { valueWords } from '../../bench/value-words.ts';
 import { borePlaces, furthestPlace } from './bore-difference.ts';

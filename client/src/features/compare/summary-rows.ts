@@ -1,6 +1,6 @@
 import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
 import { boreEnds } from '#shared/document/profile.ts';
-import { woodBetweenMm } from '#shared/document/document-faults.ts';
+import { woodBetweenMm } from '#shared/document/hole-faults.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
 import { formatCents } from '#shared/music/cents.ts';

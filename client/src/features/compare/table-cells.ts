@@ -1,5 +1,5 @@
 import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
-import { woodBetweenMm } from '#shared/document/document-faults.ts';
+import { woodBetweenMm } from '#shared/document/hole-faults.ts';
 import type { Pair } from '#shared/document/match-documents.ts';
 import { boreEnds, chimneyMm, diameterAt, fromFootMm } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
