@@ -193,9 +193,8 @@ function isSettled({ track, step, search }: Probe, i: number): boolean {
   if (width < NARROWEST) return true;
   const turn = cell(track.phases, i) - cell(track.phases, i - 1);
   const counted = cell(track.counts, i) - cell(track.counts, i - 1);
-  if (Math.abs(counted - turn) < Math.PI && turn > -LARGEST_FALL && turn < LARGEST_RISE) {
-    return width <= TURNING_SHARE * step || !mayTouchUnseen(track, i, search.maxima);
-  }
+  if (width > TURNING_SHARE * step && mayTouchUnseen(track, i, search.maxima)) return false;
+  if (Math.abs(counted - turn) < Math.PI && turn > -LARGEST_FALL && turn < LARGEST_RISE) return true;
   const reflected = Math.min(cell(track.reflected, i), cell(track.reflected, i - 1));
   return reflected < LEAKING && width <= SETTLED_SHARE * step && Math.abs(turn) <= SETTLED_STEP;
 }
