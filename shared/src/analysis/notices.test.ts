@@ -90,20 +90,57 @@ const codes = (changes: Partial<DesignDocument>): string[] => {
   return [...notices, ...fingerings.flatMap((fingering) => fingering.notices)].map(({ code }) => code);
 };
 
-const CASES: [code: string, changes: Partial<DesignDocument>][] = [
-  ['air-carbon-dioxide', withAir({ co2Fraction: 0.05 })],
+/** What makes a notice appear, and what lies near it and does not; nothing: the plain whistle. */
+const CASES: [code: string, changes: Partial<DesignDocument>, near?: Partial<DesignDocument>][] = [
+  ['air-carbon-dioxide', withAir({ co2Fraction: 0.05 }), withAir({ co2Fraction: 0.04 })],
   ['air-fixed', withAir({ fixed: { speedOfSound: 345, density: 1.2 } })],
-  ['bore-step', withBore([-3.2, 12.7], [200, 12.7], [200, 9], [257, 9])],
-  ['bore-steep-cone', withBore([-3.2, 12.7], [200, 12.7], [220, 9], [257, 9])],
-  ['bore-extended-to-stopper', { ...withMouth({ ...embouchure, stopperMm: 10 }) }],
-  ['window-width-outside-formula', withMouth({ ...whistleWindow, widthMm: 11 })],
+  [
+    'bore-step',
+    withBore([-3.2, 12.7], [200, 12.7], [200, 9], [257, 9]),
+    withBore([-3.2, 12.7], [200, 12.7], [200, 11.5], [257, 11.5]),
+  ],
+  [
+    'bore-steep-cone',
+    withBore([-3.2, 12.7], [200, 12.7], [220, 9], [257, 9]),
+    withBore([-3.2, 12.7], [100, 12.7], [220, 9], [257, 9]),
+  ],
+  ['bore-extended-to-stopper', withMouth({ ...embouchure, stopperMm: 10 }), withMouth(embouchure)],
+  [
+    'window-width-outside-formula',
+    withMouth({ ...whistleWindow, widthMm: 11 }),
+    withMouth({ ...whistleWindow, widthMm: 10 }),
+  ],
   ['window-length-outside-formula', withMouth({ ...whistleWindow, lengthMm: 6.2 })],
-  ['window-wall-outside-formula', withMouth({ ...whistleWindow, wallMm: 0.5 })],
-  ['window-ramp-outside-formula', withMouth({ ...whistleWindow, rampDeg: 30 })],
-  ['lip-cover-outside-formula', withMouth({ ...embouchure, lipCover: 0.1 })],
-  ['lip-angle-outside-formula', withMouth({ ...embouchure, lipAngleDeg: 150 })],
-  ['embouchure-body-outside-formula', withMouth({ ...embouchure, lengthMm: 5, widthMm: 5 })],
-  ['embouchure-shape-outside-formula', withMouth({ ...embouchure, lengthMm: 6, widthMm: 8 })],
+  [
+    'window-wall-outside-formula',
+    withMouth({ ...whistleWindow, wallMm: 0.5 }),
+    withMouth({ ...whistleWindow, wallMm: 0.7 }),
+  ],
+  [
+    'window-ramp-outside-formula',
+    withMouth({ ...whistleWindow, rampDeg: 30 }),
+    withMouth({ ...whistleWindow, rampDeg: 25 }),
+  ],
+  [
+    'lip-cover-outside-formula',
+    withMouth({ ...embouchure, lipCover: 0.1 }),
+    withMouth({ ...embouchure, lipCover: 0.2 }),
+  ],
+  [
+    'lip-angle-outside-formula',
+    withMouth({ ...embouchure, lipAngleDeg: 150 }),
+    withMouth({ ...embouchure, lipAngleDeg: 120 }),
+  ],
+  [
+    'embouchure-body-outside-formula',
+    withMouth({ ...embouchure, lengthMm: 5, widthMm: 5 }),
+    withMouth(embouchure),
+  ],
+  [
+    'embouchure-shape-outside-formula',
+    withMouth({ ...embouchure, lengthMm: 6, widthMm: 8 }),
+    withMouth({ ...embouchure, lengthMm: 6.5, widthMm: 7.5 }),
+  ],
   [
     'outside-not-covered',
     {
@@ -115,16 +152,32 @@ const CASES: [code: string, changes: Partial<DesignDocument>][] = [
       },
     },
   ],
-  ['rim-cover', withMouth({ kind: 'rim', cover: 0.1, correctionScale: 1 })],
+  [
+    'rim-cover',
+    withMouth({ kind: 'rim', cover: 0.1, correctionScale: 1 }),
+    withMouth({ kind: 'rim', cover: 0.5, correctionScale: 1 }),
+  ],
   ['reed-uncalibrated', withMouth({ kind: 'reed', equivalentVolumeMm3: 900, correctionScale: 1 })],
-  ['hole-wider-than-formula', withHole({ diameterMm: 11.7 })],
-  ['hole-narrower-than-formula', withHole({ diameterMm: 2 })],
-  ['hole-chimney-outside-formula', withHole({ diameterMm: 3, chimneyMm: 9 })],
-  ['undercut-outside-formula', withHole({ undercut: { innerDiameterMm: 7.2, depthMm: 0.5 } })],
+  ['hole-wider-than-formula', withHole({ diameterMm: 11.7 }), withHole({ diameterMm: 11.4 })],
+  ['hole-narrower-than-formula', withHole({ diameterMm: 2 }), withHole({ diameterMm: 2.6 })],
+  [
+    'hole-chimney-outside-formula',
+    withHole({ diameterMm: 3, chimneyMm: 9 }),
+    withHole({ diameterMm: 3, chimneyMm: 7 }),
+  ],
+  [
+    'undercut-outside-formula',
+    withHole({ undercut: { innerDiameterMm: 7.2, depthMm: 0.5 } }),
+    withHole({ undercut: { innerDiameterMm: 8, depthMm: 2 } }),
+  ],
   ['pad-width-assumed', withHole({ cover: 'pad', padHeightMm: 3 })],
-  ['pad-height-outside-formula', withHole({ cover: 'pad', padHeightMm: 0.3 })],
-  ['half-cover-from-foot-end', halfCovered(0.5, 'end')],
-  ['half-cover-outside-formula', halfCovered(0.95, 'side')],
+  [
+    'pad-height-outside-formula',
+    withHole({ cover: 'pad', padHeightMm: 0.3 }),
+    withHole({ cover: 'pad', padHeightMm: 3 }),
+  ],
+  ['half-cover-from-foot-end', halfCovered(0.5, 'end'), halfCovered(0.5, 'side')],
+  ['half-cover-outside-formula', halfCovered(0.95, 'side'), halfCovered(0.5, 'side')],
 ];
 
 describe('notices', () => {
@@ -134,6 +187,10 @@ describe('notices', () => {
 
   it.each(CASES)('say %s where it is so', (code, changes) => {
     expect(codes(changes)).toContain(code);
+  });
+
+  it.each(CASES)('do not say %s near it', (code, _, near = {}) => {
+    expect(codes(near)).not.toContain(code);
   });
 
   it('say when no resonance answers', () => {
