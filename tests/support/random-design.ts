@@ -59,7 +59,7 @@ function holeDraws(kind: DesignKind): fc.Arbitrary<HoleDraws> {
     width: fc.oneof(real(0.15, 0.6), real(0.3, 0.94)),
     cover: fc.constantFrom(...(kind.scalable === true ? covers.slice(0, 3) : covers)),
     angleDeg: fc.constantFrom(0, 0, 0, 15, -20, 180),
-    cut: fc.oneof(fc.constant(0), fc.constant(0), real(0.05, 0.3)),
+    cut: fc.oneof(fc.constant(0), fc.constant(0), real(0.06, 0.3)),
     state: fc.constantFrom('open', 'closed', 'open', 'closed', 'side', 'end'),
     fraction: real(0.2, 0.8),
   });
@@ -118,7 +118,7 @@ function mouthOf({ mouth, boreMm, mouthShares }: Draws): MouthEnd {
         widthMm: within(a, 0.42, 0.55) * boreMm * within(b, 1, 1.18),
         chimneyMm: within(c, 2, 6),
         undercut: null,
-        lipCover: within(b, 0.2, 0.6),
+        lipCover: within(b, 0.22, 0.6),
         lipAngleDeg: within(c, 60, 120),
         stopperMm: within(a, 0.7, 1.4) * boreMm,
         correctionScale,
