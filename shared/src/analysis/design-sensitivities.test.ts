@@ -1,8 +1,11 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { randomDesigns } from '../../../tests/support/random-design.ts';
 import type { DesignDocument } from '../document/design-document.ts';
-import { designDimensions } from './design-dimensions.ts';
+import { designDimensions, type Dimension } from './design-dimensions.ts';
 import { designSensitivities } from './design-sensitivities.ts';
 import { predictDesign } from './predict-design.ts';
+import type { FingeringPrediction } from './prediction.ts';
 
 const hole = (id: string, positionMm: number, diameterMm: number): DesignDocument['holes'][number] => ({
   id,
@@ -100,4 +103,71 @@ describe('cents per unit of every dimension', () => {
       }
     }
   });
+});
+
+/** Central difference in cents per unit, at two steps and extrapolated to none. */
+function differences({ value, at }: Dimension): (number | null)[] {
+  const step = 5e-5 * Math.max(Math.abs(value), 1);
+  const along = (by: number) =>
+    predictDesign(at(value + by), { modes: 3 }).fingerings.map((note) => note.frequencyHz);
+  const [far, near, nearer, farther] = [-2, -1, 1, 2].map((share) => along(share * step));
+  return near!.map((low, i) => {
+    const [lowest, high, highest] = [far![i], nearer![i], farther![i]];
+    if (!low || !lowest || !high || !highest) return null;
+    const small = (1200 * Math.log2(high / low)) / (2 * step);
+    const large = (1200 * Math.log2(highest / lowest)) / (4 * step);
+    return (4 * small - large) / 3;
+  });
+}
+
+/** A random design with a second fingering, all covered and overblown. */
+const twoNotes = (document: DesignDocument): DesignDocument => {
+  const [fingering] = document.fingerings;
+  const covered = document.holes.filter(({ cover }) => cover !== 'vent').map(({ id }) => id);
+  return {
+    ...document,
+    fingerings: [fingering!, { ...fingering!, id: 'low', register: 2, covered, half: [] }],
+  };
+};
+
+/** Whether a note sounds, and not on a weak rung: there the phase has hardly a slope, and the root fewer digits. */
+const speaks = ({ ladder, mode }: FingeringPrediction): boolean =>
+  ladder.find((rung) => rung.mode === mode)?.weak === false;
+
+describe('cents per unit of every dimension of random designs', () => {
+  it.each(['ideal-open', 'ideal-closed', 'window', 'embouchure', 'rim', 'reed'] as const)(
+    'agree with differences to 1e-5, mouth end %s',
+    (mouth) => {
+      const seen = new Set<string>();
+      fc.assert(
+        fc.property(randomDesigns({ mouth: [mouth], fewestHoles: 1 }).map(twoNotes), (document) => {
+          const { fingerings } = designSensitivities(document);
+          const speaking = predictDesign(document).fingerings.map(speaks);
+          for (const dimension of designDimensions(document)) {
+            seen.add(dimension.key.replace(/\d+/, 'N'));
+            differences(dimension).forEach((difference, i) => {
+              const exact = fingerings[i]!.centsPerUnit[dimension.key];
+              if (!speaking[i] || difference === null || exact === undefined) return;
+              // The roots of the differences are themselves right to a millionth of a cent per millimetre.
+              const slack = 1e-5 * Math.abs(difference) + 2e-6;
+              expect(Math.abs(difference - exact), dimension.key).toBeLessThan(slack);
+            });
+          }
+        }),
+        { numRuns: 4, seed: 1912, endOnFailure: true },
+      );
+      expect([...seen]).toEqual(
+        expect.arrayContaining([
+          'holes.N.positionMm',
+          'holes.N.diameterMm',
+          'holes.N.chimneyMm',
+          'holes.N.undercut.innerDiameterMm',
+          'holes.N.undercut.depthMm',
+          'bore.stations.N.diameterMm',
+          'foot.positionMm',
+          'air.temperatureC',
+        ]),
+      );
+    },
+  );
 });
