@@ -210,6 +210,13 @@ describe.concurrent('predict command refuses', () => {
     expect(problem.errors?.map((error) => error.path)).toEqual([path]);
   });
 
+  it.each([
+    ['no-such-design.json', 'no-such-design.json is not there. Check the name of the design document.'],
+    ['seed-data', 'seed-data is a folder. Give the design document in it.'],
+  ])('%s in one plain sentence', { timeout: PATIENCE }, async (file, sentence) => {
+    expect(problemIn(await runPredict([file])).detail).toBe(sentence);
+  });
+
   it('a document with faults, each under its own field', { timeout: PATIENCE }, async () => {
     const problem = problemIn(await runPredict(['-'], twoFaults));
     expect(problem.status).toBe(422);

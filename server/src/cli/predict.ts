@@ -64,8 +64,23 @@ function readText(file: string): string {
   try {
     return readFileSync(file === '-' ? 0 : file, 'utf8');
   } catch (error) {
-    const reason = error instanceof Error ? error.message : String(error);
-    throw new CommandFault('file', `The document cannot be read: ${reason}.`);
+    throw new CommandFault('file', `${file === '-' ? 'Standard input' : file} ${unreadable(error)}`);
+  }
+}
+
+/** Why a file cannot be read, in words for who typed its name. */
+function unreadable(error: unknown): string {
+  switch (error instanceof Error && 'code' in error ? error.code : undefined) {
+    case 'ENOENT':
+    case 'ENOTDIR':
+      return 'is not there. Check the name of the design document.';
+    case 'EISDIR':
+      return 'is a folder. Give the design document in it.';
+    case 'EACCES':
+    case 'EPERM':
+      return 'may not be read by you. Check its permissions.';
+    default:
+      return `cannot be read: ${error instanceof Error ? error.message : String(error)}.`;
   }
 }
 
