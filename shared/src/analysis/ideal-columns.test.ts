@@ -1,6 +1,8 @@
 import { describe, expect, it } from 'vitest';
+import { impedanceAt } from '../../../tests/support/slow-resonances.ts';
 import type { DesignDocument } from '../document/design-document.ts';
 import { predictDesign } from './predict-design.ts';
+import { prepareDesign } from './prepare-design.ts';
 import { standingWave } from './standing-wave.ts';
 
 const LENGTH_MM = 600;
@@ -78,6 +80,33 @@ describe('an ideal column', () => {
     const correction = 1200 * Math.log2(1 + (0.6133 * 7.5) / LENGTH_MM);
     const apart = centsApart(first({ diameterMm: 15 }), stopped[0] ?? NaN);
     expect(Math.abs(apart - (1200 - correction))).toBeLessThan(0.2);
+  });
+});
+
+describe('the impedance of a lossless tube whose length is a whole number of quarter waves', () => {
+  const impedance = (frequencies: number[], foot: DesignDocument['foot'] = { kind: 'open' }) => {
+    const air = { ...stillAir, fixed: { speedOfSound: 345, density: 1.2 } };
+    const document = tube({ mouth: 'ideal-closed', diameterMm: 15, air, foot });
+    const { prepared, fingerings } = prepareDesign(document);
+    return frequencies.map((frequency) => impedanceAt(prepared, fingerings[0]!, frequency));
+  };
+
+  it('is a number there, and what it is close by', () => {
+    // 345 m/s over four times 0.6 m.
+    const quarter = 345 / 2.4;
+    for (const count of [1, 2, 3, 4, 5, 6, 7, 8]) {
+      const at = count * quarter;
+      const [low, there, high] = impedance([at * (1 - 1e-6), at, at * (1 + 1e-6)]);
+      const [re, im] = [(low!.re + high!.re) / 2, (low!.im + high!.im) / 2];
+      expect(Math.hypot(there!.re - re, there!.im - im) / Math.hypot(re, im)).toBeLessThan(1e-4);
+    }
+  });
+
+  it('is a number where a stopped foot makes it endless or nothing', () => {
+    for (const count of [1, 2, 3, 4]) {
+      const [there] = impedance([(count * 345) / 2.4], { kind: 'stopped' });
+      expect(Number.isFinite(there!.re) && Number.isFinite(there!.im)).toBe(true);
+    }
   });
 });
 

@@ -83,6 +83,32 @@ function gatherNodes(prepared: PreparedColumn, fingering: FingeringBranches): vo
     nodes += 1;
   }
   system.nodes = nodes;
+  keepFromZero(prepared);
+}
+
+/** Least entry to divide by, in its own unit: what it shifts and what rounding makes of the quotient are then alike. */
+const LEAST = 1e-8;
+
+// A stretch a quarter or half a wave long, without losses, has an entry of exactly 0 that its admittance is divided by.
+function keepFromZero({ cells, system, foot, inputImpedance }: PreparedColumn): void {
+  const { nodes, between } = system;
+  if (nodes === 0) {
+    keepReactance(cells, between + 4, LEAST / inputImpedance);
+    return;
+  }
+  keepRatio(cells, between + 6);
+  for (let i = 1; i < nodes; i += 1) {
+    keepReactance(cells, between + i * TWO_PORT_CELLS + 2, LEAST * inputImpedance);
+  }
+  if (foot.kind === 'stopped') keepRatio(cells, between + nodes * TWO_PORT_CELLS);
+}
+
+function keepRatio(cells: Cells, at: number): void {
+  if (Math.abs(cell(cells, at)) + Math.abs(cell(cells, at + 1)) < LEAST) cells[at] = LEAST;
+}
+
+function keepReactance(cells: Cells, at: number, least: number): void {
+  if (Math.abs(cell(cells, at)) + Math.abs(cell(cells, at + 1)) < least) cells[at + 1] = least;
 }
 
 function appendHalfSeries(cells: Cells, at: number, branch: HoleBranch, shifted: number): void {

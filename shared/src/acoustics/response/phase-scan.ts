@@ -38,6 +38,8 @@ const SETTLED_STEP = 0.8;
 /** Where a phase turns round so near to a level, rad, the interval must be this share of the grid's. */
 const NEAR_LEVEL = 0.6;
 const TURNING_SHARE = 1 / 64;
+/** And it is at most so many times as wide as the one before. */
+const ABRUPT = 5;
 /** Share of the power that comes back, below which losses and radiation may let a pair of resonances vanish. */
 const LEAKING = 0.7;
 /** Hz; nothing in an instrument is narrower. */
@@ -199,12 +201,20 @@ function isSettled({ track, step, search }: Probe, i: number): boolean {
   return reflected < LEAKING && width <= SETTLED_SHARE * step && Math.abs(turn) <= SETTLED_STEP;
 }
 
-// Whether the phase turns round, or lost a turn, so near to a level that it could reach it between two samples.
+// Whether the phase turns round, or lost a turn near by, so near to a level that it could reach it between two samples.
 function mayTouchUnseen(track: PhaseTrack, i: number, maxima: boolean): boolean {
-  if (!turnsRound(track, i - 1) && !turnsRound(track, i) && !turnsRound(track, i + 1)) return false;
   const level = maxima ? 0 : Math.PI;
   const distance = (phase: number) => Math.abs(nearestTurn(level, phase) - phase);
-  return Math.min(distance(cell(track.phases, i)), distance(cell(track.phases, i - 1))) < NEAR_LEVEL;
+  if (Math.min(distance(cell(track.phases, i)), distance(cell(track.phases, i - 1))) > NEAR_LEVEL)
+    return false;
+  return [i - 1, i, i + 1].some((j) => turnsRound(track, j)) || isAbruptlyWide(track, i);
+}
+
+// What made the interval before narrow may reach into this one.
+function isAbruptlyWide({ frequencies }: PhaseTrack, i: number): boolean {
+  if (i < 2) return false;
+  const before = cell(frequencies, i - 1) - cell(frequencies, i - 2);
+  return cell(frequencies, i) - cell(frequencies, i - 1) > ABRUPT * before;
 }
 
 function turnsRound({ phases, counts, count }: PhaseTrack, i: number): boolean {
