@@ -121,8 +121,20 @@ describe('two people in one draft', () => {
     await holeButton(first, 1).press('Enter');
     await first.keyboard.press('Alt+ArrowRight');
 
-    await first.getByRole('dialog', { name: new RegExp(`^${name} saved this draft`) }).waitFor();
+    const dialog = first.getByRole('dialog', { name: new RegExp(`^${name} saved this draft`) });
+    await dialog.waitFor();
     await expectAccessible(first);
+
+    const theirs = await spoken(holeButton(second, 1));
+    const use = dialog.getByRole('button', { name: 'Use what is chosen' });
+    expect(await use.isEnabled()).toBe(false);
+    await dialog.getByRole('radio', { name: new RegExp(`^Hole 1 position: that of ${name}`) }).check();
+    await use.click();
+    await dialog.waitFor({ state: 'hidden' });
+    await savedNote(first).waitFor();
+    await expect.poll(() => spoken(holeButton(first, 1))).toBe(theirs);
+    await first.reload();
+    await expect.poll(() => spoken(holeButton(first, 1))).toBe(theirs);
   });
 });
 
