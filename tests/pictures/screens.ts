@@ -51,12 +51,30 @@ const WORKBENCH: readonly Screen[] = [
   { name: 'bench-bore', ...bench('bore'), ready: figures },
   { name: 'bench-notes', ...bench('notes', '?note=G5'), ready: figures },
   { name: 'bench-air', ...bench('air', '?note=D5'), ready: figures },
+  { name: 'bench-measured-empty', ...bench('bore'), ready: openMeasured },
+  { name: 'bench-measured', ...bench('bore'), ready: pasteMeasured },
   { name: 'bench-readonly', ...bench('holes', '?hole=4'), role: 'visitor', ready: heading(WHISTLE) },
   { name: 'bench-no-line', ...bench('holes', '?hole=5'), ready: loseLine },
   { name: 'bench-sign-in-lost', ...bench('holes', '?hole=5'), ready: loseSignIn },
 ];
 
-export const SCREENS: readonly Screen[] = [...FRAME, ...WORKBENCH];
+const OTHER = 'Saltmarsh low D whistle';
+
+const compare = (view: string) => ({
+  role: 'maker' as const,
+  path: (designs: ReadonlyMap<string, number>) =>
+    `/designs/compare/${designs.get(OTHER) ?? 0}/${designs.get(WHISTLE) ?? 0}/${view}`,
+  ready: heading(/against/),
+});
+
+const COMPARED: readonly Screen[] = [
+  { name: 'compare-choose', role: 'maker', path: () => '/designs?compare=two', ready: heading('Designs') },
+  { name: 'compare-holes', ...compare('holes') },
+  { name: 'compare-notes', ...compare('notes') },
+  { name: 'compare-bore', ...compare('bore') },
+];
+
+export const SCREENS: readonly Screen[] = [...FRAME, ...WORKBENCH, ...COMPARED];
 
 async function drawnNew(page: Page): Promise<void> {
   const lay = page.getByRole('button', { name: 'Lay it on the bench' });
@@ -68,6 +86,24 @@ async function openKeys(page: Page): Promise<void> {
   await heading(/./)(page);
   await page.keyboard.press('?');
   await page.getByRole('dialog', { name: 'Keys' }).waitFor();
+}
+
+async function openMeasured(page: Page): Promise<void> {
+  await figures(page);
+  await page.getByRole('button', { name: 'Read in a measured bore' }).click();
+  await page.getByRole('heading', { name: /^Measured bore/ }).waitFor();
+}
+
+/** A bore with a choke and one reading that cannot be right. */
+async function pasteMeasured(page: Page): Promise<void> {
+  await openMeasured(page);
+  const rows = Array.from({ length: 27 }, (_, index) => {
+    const diameter = index === 9 ? 15.2 : 12.7 - 0.25 * Math.exp(-(((index - 16) / 3) ** 2));
+    return `${index * 10};${diameter.toFixed(2).replace('.', ',')}`;
+  });
+  const table = ['mm from foot;diameter', ...rows].join('\n');
+  await page.getByRole('textbox', { name: 'Table of measurements' }).fill(table);
+  await page.getByRole('button', { name: /^Use these \d+ station/ }).waitFor();
 }
 
 async function loseLine(page: Page): Promise<void> {
