@@ -91,8 +91,6 @@ describe('fitStations', () => {
     expect(short.beyond).toBe('held');
     expect(short.stations).toEqual([
       { positionMm: MOUTH_MM, diameterMm: 12.5 },
-      { positionMm: 0, diameterMm: 12.5 },
-      { positionMm: 260, diameterMm: 12.5 },
       { positionMm: FOOT_MM, diameterMm: 12.5 },
     ]);
     const long = fit(along(100, 200, () => 12.5));

@@ -77,8 +77,8 @@ export function fitStations(
   const reached = withinEnds(places, mouthMm, footMm);
   const gaps = gapsOf(reached, mouthMm, footMm);
   const beyond = choices.beyond ?? usualBeyond(gaps, reached);
-  const thinned = thinStations(reached, choices.withinMm);
-  const stations = reached.length < 2 ? [] : withEnds(thinned, drawn, beyond);
+  const stations =
+    reached.length < 2 ? [] : stationsOf(reached, { drawn, beyond, withinMm: choices.withinMm });
   return {
     limitMm,
     usualLimitMm: usual,
@@ -168,28 +168,29 @@ function usualBeyond(gaps: readonly Gap[], places: readonly Station[]): Beyond {
   return gaps.some(({ lengthMm }) => lengthMm > far) ? 'drawn' : 'held';
 }
 
+interface EndRules {
+  drawn: Pick<DesignDocument, 'bore'>;
+  beyond: Beyond;
+  withinMm: number;
+}
+
 /** Stations from end to end of the drawn bore: its length is not what was measured here. */
-function withEnds(
-  thinned: readonly Station[],
-  drawn: Pick<DesignDocument, 'bore'>,
-  beyond: Beyond,
-): Station[] {
-  const [first, last] = [thinned[0], thinned.at(-1)];
+function stationsOf(places: readonly Station[], { drawn, beyond, withinMm }: EndRules): Station[] {
+  const [first, last] = [places[0], places.at(-1)];
   if (first === undefined || last === undefined) return [];
   const { mouthMm, footMm } = boreEnds(drawn);
-  const before =
-    first.positionMm <= mouthMm
-      ? []
-      : beyond === 'held'
-        ? [{ positionMm: mouthMm, diameterMm: first.diameterMm }]
-        : drawnUpTo(drawn.bore.stations, first);
-  const after =
-    last.positionMm >= footMm
-      ? []
-      : beyond === 'held'
-        ? [{ positionMm: footMm, diameterMm: last.diameterMm }]
-        : drawnFrom(drawn.bore.stations, last);
-  return [...before, ...thinned, ...after];
+  const isShort = { mouth: first.positionMm > mouthMm, foot: last.positionMm < footMm };
+  if (beyond === 'held') {
+    // Thinned together with the places: an end that is held costs no station of its own.
+    const before = isShort.mouth ? [{ ...first, positionMm: mouthMm }] : [];
+    const after = isShort.foot ? [{ ...last, positionMm: footMm }] : [];
+    return thinStations([...before, ...places, ...after], withinMm);
+  }
+  return [
+    ...(isShort.mouth ? drawnUpTo(drawn.bore.stations, first) : []),
+    ...thinStations(places, withinMm),
+    ...(isShort.foot ? drawnFrom(drawn.bore.stations, last) : []),
+  ];
 }
 
 /** The drawn bore up to a place, and a step there where the two differ. */
