@@ -12,6 +12,9 @@ interface WidthGridProps {
   isBeside: boolean;
 }
 
+/** Room that the figures take before the drawing, px; without it they stand at its right end. */
+const FIGURES_PX = 56;
+
 /** Lines across a shelf at round widths, with their figures. */
 export function WidthGrid({ scale, unit, from, to, isBeside }: WidthGridProps) {
   const [first = 0, second = first + 1] = scale.ticks;
@@ -20,7 +23,7 @@ export function WidthGrid({ scale, unit, from, to, isBeside }: WidthGridProps) {
     <g key={mm}>
       <line x1={from} x2={to} y1={scale.y(mm)} y2={scale.y(mm)} className="bore-grid" />
       <text
-        x={isBeside ? 144 : to - 12}
+        x={isBeside ? 144 : from >= FIGURES_PX ? from - 8 : to - 12}
         y={scale.y(mm) + 4}
         textAnchor="end"
         className="bench-quiet-label bore-haloed"

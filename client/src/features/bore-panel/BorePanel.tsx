@@ -13,7 +13,7 @@ import './bore-panel.css';
 interface BorePanelProps extends PanelProps {
   /** What hangs under the holes: handed in by the page. */
   hang?: ReactNode;
-  /** What a measured bore has to say below the stations: handed in by the page. */
+  /** What a measured bore has to say above the stations: handed in by the page. */
   note?: ReactNode;
   /** A second line over the drawn bore. */
   beside?: readonly Station[] | null;
@@ -55,9 +55,9 @@ export function BorePanel({ hang, note, ...props }: BorePanelProps) {
           }}
         >
           <div className={classNames(isWide && 'w-74 shrink-0')}>
+            {note}
             <StationsForm {...props} part={part} onPart={choosePart} chosen={chosen} onChoose={setChosen} />
             <FootForm {...props} />
-            {note}
           </div>
           <MouthForm {...props} />
         </div>

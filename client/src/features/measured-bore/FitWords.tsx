@@ -88,7 +88,7 @@ function LoneList({ document, unit, readings, verb, onPress }: LoneListProps) {
         const words = readingWords(document, reading, unit);
         const apart = `${printWidth(Math.abs(reading.aloneByMm), unit)} ${reading.aloneByMm > 0 ? 'wider' : 'narrower'} than its neighbours`;
         return (
-          <li key={reading.key} className="flex flex-wrap items-center gap-x-2">
+          <li key={reading.key} className="flex items-center gap-x-3">
             <span>
               {words}, {apart}
             </span>
@@ -96,7 +96,7 @@ function LoneList({ document, unit, readings, verb, onPress }: LoneListProps) {
               type="button"
               aria-label={`${verb}: ${words}`}
               onClick={() => onPress(reading.key)}
-              className="text-link min-h-6 font-semibold max-[1100px]:min-h-12 pointer-coarse:min-h-12"
+              className="text-link min-h-6 shrink-0 font-semibold max-[1100px]:min-h-12 pointer-coarse:min-h-12"
             >
               {verb}
             </button>

@@ -9,7 +9,7 @@ import { MM_PER_INCH } from '#shared/lengths/drills.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { lengthFormat } from '../../ui/length-format.ts';
 import { NumberField } from '../../ui/NumberField.tsx';
-import { FormRow } from './FormRow.tsx';
+import { FigureRow, FormRow } from './FormRow.tsx';
 import { printWidth } from './measured-words.ts';
 import { SmallSelect } from './SmallSelect.tsx';
 import type { MeasuredBoreDesk } from './use-measured-bore.ts';
@@ -17,6 +17,7 @@ import type { MeasuredBoreDesk } from './use-measured-bore.ts';
 interface LimitsFormProps extends Pick<PanelProps, 'unit'> {
   desk: Pick<MeasuredBoreDesk, 'source' | 'fit'>;
   fitted: FittedBore;
+  isWide: boolean;
 }
 
 const COMBINATION_WORDS: Record<Combination, string> = {
@@ -34,14 +35,14 @@ const stepOf = (unit: PanelProps['unit'], mm: number) =>
   unit === 'mm' ? mm : (Math.round((mm / MM_PER_INCH) * 1e4) / 1e4) * MM_PER_INCH;
 
 /** By which limit readings are left out, how finely the rest is kept, and what counts where several were taken. */
-export function LimitsForm({ desk, fitted, unit }: LimitsFormProps) {
+export function LimitsForm({ desk, fitted, unit, isWide }: LimitsFormProps) {
   const { source, fit } = desk;
   const { outOfRound, gaps } = fitted;
   return (
     <>
-      <div className="border-hair text-data text-ink2 border-t py-1">
+      <FigureRow>
         <NumberField
-          layout="row"
+          layout={isWide ? 'row' : 'stack'}
           label="Leave out beyond"
           value={fitted.limitMm}
           format={lengthFormat(unit, stepOf(unit, STEP_MM.limit))}
@@ -49,10 +50,10 @@ export function LimitsForm({ desk, fitted, unit }: LimitsFormProps) {
           max={50}
           onChange={(limitMm) => fit({ limitMm })}
         />
-      </div>
-      <div className="border-hair text-data text-ink2 border-t py-1">
+      </FigureRow>
+      <FigureRow>
         <NumberField
-          layout="row"
+          layout={isWide ? 'row' : 'stack'}
           label="Thin to within"
           value={source.fit.withinMm}
           format={lengthFormat(unit, stepOf(unit, STEP_MM.within))}
@@ -60,7 +61,7 @@ export function LimitsForm({ desk, fitted, unit }: LimitsFormProps) {
           max={5}
           onChange={(withinMm) => fit({ withinMm })}
         />
-      </div>
+      </FigureRow>
       {outOfRound !== null && (
         <>
           <FormRow label="Out of round">

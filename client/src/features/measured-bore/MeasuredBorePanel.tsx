@@ -1,4 +1,4 @@
-import { useEffect, useRef, type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';
 import { EffectTable } from './EffectTable.tsx';
@@ -21,13 +21,11 @@ export function MeasuredBorePanel({ desk, hang, ...bench }: MeasuredBorePanelPro
   const isWide = geometry.layout === 'wide';
   const { proposed } = desk;
   const left = leftZone(geometry);
-  const zone = useFocusWhenLost();
   return (
     <section aria-label="Measured bore">
       <MeasuredShelf {...bench} desk={desk} />
       <div className={classNames('grid grid-cols-1', !isWide && 'pb-18')}>
         <div
-          ref={zone}
           className={classNames('z-10 min-w-0 pt-2 pb-6', left.isBeside && 'col-start-1 row-start-1')}
           data-zone="left"
           tabIndex={-1}
@@ -69,15 +67,6 @@ function leftZone({ layout, measures, labelRight }: PanelProps['geometry']) {
   const isBeside = (layout === 'wide' || layout === 'tablet') && room >= LEAST_FORM_PX;
   const width = { width: Math.min(WIDEST_FORM_PX, room) };
   return { isBeside, style: { marginLeft: x, ...(isBeside ? width : { marginRight: x }) } };
-}
-
-/** The button that opened the screen is gone: the focus goes to what took its place, not to the top of the page. */
-function useFocusWhenLost() {
-  const zone = useRef<HTMLDivElement>(null);
-  useEffect(() => {
-    if (window.document.activeElement === window.document.body) zone.current?.focus({ preventScroll: true });
-  }, []);
-  return zone;
 }
 
 interface FiguresProps extends Pick<PanelProps, 'document' | 'unit'> {

@@ -1,3 +1,4 @@
+import { useEffect, useRef } from 'react';
 import type { MeasuredBore } from '#shared/measured-bore/read-measured-bore.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import { classNames } from '../../ui/class-names.ts';
@@ -17,11 +18,16 @@ interface MeasuredFormProps extends Pick<PanelProps, 'document' | 'unit'> {
 
 /** How the table is understood, by which limits it becomes stations, and what is in the way. */
 export function MeasuredForm(props: MeasuredFormProps) {
-  const { source, measured } = props.desk;
+  const { source, measured, isJustOpened } = props.desk;
+  const heading = useRef<HTMLHeadingElement>(null);
+  useEffect(() => {
+    // The button that opened the screen is gone with its header.
+    if (isJustOpened) heading.current?.focus({ preventScroll: true });
+  }, [isJustOpened]);
   const readings = measured?.status === 'read' ? counted(measured.readings.length, 'reading') : null;
   return (
     <>
-      <h2 className="text-section font-semibold">
+      <h2 ref={heading} tabIndex={-1} className="text-section w-fit font-semibold">
         Measured bore{' '}
         <span className="text-data text-ink3 ml-1 font-normal">
           {[source.fileName, readings].filter((part) => part !== null).join(', ')}
@@ -51,15 +57,21 @@ function UnderstoodForm({ measured, ...props }: UnderstoodFormProps) {
       <div className="@container mt-1">
         <ColumnsForm columns={measured.columns} onChange={desk.meanColumn} />
       </div>
-      <div className={classNames(isWide && 'grid grid-cols-2 gap-x-5')}>
+      <div className={classNames(isWide && 'grid grid-cols-[0.9fr_1.1fr] gap-x-5')}>
         <div>
           {measured.status === 'read' && (
-            <PlaceForm document={document} unit={unit} place={measured.place} onMean={desk.mean} />
+            <PlaceForm
+              document={document}
+              unit={unit}
+              place={measured.place}
+              isWide={isWide}
+              onMean={desk.mean}
+            />
           )}
         </div>
         {fitted !== null && (
           <div>
-            <LimitsForm desk={desk} fitted={fitted} unit={unit} />
+            <LimitsForm desk={desk} fitted={fitted} unit={unit} isWide={isWide} />
           </div>
         )}
       </div>

@@ -37,7 +37,7 @@ export function MeasuredNote({ desk, geometry, readOnly }: MeasuredNoteProps) {
       )}
       {geometry.layout === 'phone' && used === null && (
         // The header has no room for it there.
-        <Button size="small" className="mt-3" disabled={readOnly !== null} onClick={desk.open}>
+        <Button size="small" className="mb-3" disabled={readOnly !== null} onClick={desk.open}>
           Read in a measured bore
         </Button>
       )}
@@ -53,7 +53,7 @@ interface NoteLineProps {
 
 function NoteLine({ action, onAction, children }: NoteLineProps) {
   return (
-    <p className="border-hair text-data text-ink2 mt-3 border-t pt-2">
+    <p className="border-hair text-data text-ink2 mb-2 border-b pb-2">
       {children}{' '}
       <Button look="bare" size="small" className="px-1" onClick={onAction}>
         {action}

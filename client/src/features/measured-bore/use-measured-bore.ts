@@ -13,6 +13,8 @@ import { useMeasuredSource, type SourceDesk } from './use-measured-source.ts';
 
 export interface MeasuredBoreDesk extends SourceDesk {
   isOpen: boolean;
+  /** Opened by hand, not by loading the page: then the focus follows. */
+  isJustOpened: boolean;
   open: () => void;
   /** Leaves everything as drawn; the table is kept. */
   putBack: () => void;
@@ -55,6 +57,7 @@ export function useMeasuredBore(
   const { document, readOnly, onEdit } = props;
   const desk = useMeasuredSource(designId);
   const [isOpen, setOpen] = useShown();
+  const [isJustOpened, setJustOpened] = useState(false);
   const [used, setUsed] = useState<Used | null>(null);
   const { measured, fitted } = useReading(document, desk, isOpen);
   const { proposed, faults, ...predicted } = useProposal(document, {
@@ -70,7 +73,11 @@ export function useMeasuredBore(
   return {
     ...desk,
     isOpen,
-    open: () => setOpen(true),
+    isJustOpened,
+    open: () => {
+      setJustOpened(true);
+      setOpen(true);
+    },
     putBack: () => close(false),
     closeBeside: () => close(true),
     measured,
