@@ -37,7 +37,12 @@ function bandWords({ workshop }: SheetInput): string {
 
 function accuracyWords({ prediction }: SheetInput): string {
   const worst = Math.max(0, ...prediction.fingerings.map((fingering) => fingering.accuracyCents));
-  return worst === 0
-    ? ''
-    : `Expected accuracy of the prediction before calibration: within ±${worst.toFixed(0)} cents.`;
+  if (worst === 0) return '';
+  const calibrated = Math.max(
+    ...prediction.fingerings.map(
+      ({ accuracyCents, calibratedAccuracyCents = accuracyCents }) => calibratedAccuracyCents,
+    ),
+  );
+  const after = calibrated < worst ? `, after it ±${calibrated.toFixed(0)}` : '';
+  return `Expected accuracy of the prediction before calibration: within ±${worst.toFixed(0)} cents${after}.`;
 }

@@ -226,6 +226,17 @@ describe('expected accuracy', () => {
     expect(accuracy(withHole({ undercut: { innerDiameterMm: 7.2, depthMm: 0.5 } }))).toBeGreaterThan(studied);
   });
 
+  it('is narrower after calibration where there is a mouth end to calibrate, and the same where there is none', () => {
+    const [window] = predictDesign(whistle).fingerings;
+    expect(window?.calibratedAccuracyCents).toBeLessThan((window?.accuracyCents ?? NaN) / 2);
+    const [bare] = predictDesign({
+      ...whistle,
+      ...withMouth({ kind: 'ideal-open', correctionScale: 1 }),
+      ...withBore([0, 12.7], [257, 12.7]),
+    }).fingerings;
+    expect(bare?.calibratedAccuracyCents).toBe(bare?.accuracyCents);
+  });
+
   it('is no narrower for a correction scale that was only typed, and narrower without a mouth end', () => {
     const typed = accuracy(withMouth({ ...whistleWindow, correctionScale: 1.02 }));
     expect(typed).toBe(accuracy({}));

@@ -2,7 +2,7 @@ import { findResonances, type Resonance } from '../acoustics/response/resonances
 import type { DesignDocument, Fingering } from '../document/design-document.ts';
 import { beatsBetween, centsBetween, frequencyAbove } from '../music/cents.ts';
 import { noteFrequencyHz } from '../music/temperament.ts';
-import { accuracyParts, expectedAccuracyCents } from './expected-accuracy.ts';
+import { accuracyParts, calibratedAccuracyCents, expectedAccuracyCents } from './expected-accuracy.ts';
 import { fingeringNotices } from './fingering-notices.ts';
 import { designNotices } from './notices.ts';
 import { ENGINE } from './engine-version.ts';
@@ -109,6 +109,7 @@ function predictFingering(
     ventHole: vent?.id ?? null,
     cutoffHz: openHoleCutoffHz(design.column, states),
     accuracyCents: expectedAccuracyCents(accuracy),
+    calibratedAccuracyCents: calibratedAccuracyCents(accuracy),
     accuracy,
     notices: fingeringNotices({ document, design, fingering, states, resonances, playing, maxima }),
   };

@@ -28,6 +28,8 @@ export interface LadderRung {
 export interface AccuracyPart {
   part: 'bore-and-holes' | 'losses' | 'undercut' | 'half-covered' | 'pad' | 'mouth-end';
   cents: number;
+  /** The same once the mouth end is calibrated on a measured set of notes; only where that narrows it. */
+  calibratedCents?: number | undefined;
 }
 
 export interface FingeringPrediction {
@@ -50,6 +52,8 @@ export interface FingeringPrediction {
   cutoffHz: number | null;
   /** Expected accuracy of this figure before calibration, ± cents. */
   accuracyCents: number;
+  /** And after it. */
+  calibratedAccuracyCents?: number | undefined;
   /** What that is made of. */
   accuracy?: AccuracyPart[] | undefined;
   notices: Notice[];

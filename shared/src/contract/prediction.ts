@@ -29,11 +29,13 @@ const fingeringPredictionSchema = z.object({
   ventHole: z.string().nullable(),
   cutoffHz: z.number().nullable(),
   accuracyCents: z.number(),
+  calibratedAccuracyCents: z.number().optional(),
   accuracy: z
     .array(
       z.object({
         part: z.enum(['bore-and-holes', 'losses', 'undercut', 'half-covered', 'pad', 'mouth-end']),
         cents: z.number(),
+        calibratedCents: z.number().optional(),
       }),
     )
     .optional(),

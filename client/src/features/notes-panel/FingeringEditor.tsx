@@ -9,6 +9,7 @@ import type { ChartRow } from './chart-rows.ts';
 import { changeFingering, duplicateFingering, removeFingering } from './fingering-edits.ts';
 import { HalfCoverFields } from './HalfCoverFields.tsx';
 import { NoteField } from './NoteField.tsx';
+import { accuracyWords } from '../../bench/accuracy-words.ts';
 
 const REGISTER = plainFormat({ suffix: '', step: 1, digits: 0, example: '2' });
 const OFFSET = plainFormat({ suffix: 'cents', step: 1, digits: 1, example: '−5' });
@@ -125,14 +126,14 @@ export function FingeringEditor({ row, holes, readOnly, onSelect, onEdit }: Fing
 function Sounding({ row }: { row: ChartRow }) {
   const { predicted, targetHz } = row;
   if (predicted === null) return null;
-  const { frequencyHz, beatsHz, accuracyCents, notices } = predicted;
+  const { frequencyHz, beatsHz, notices } = predicted;
   return (
     <div className="text-data text-ink2">
       {frequencyHz !== null && (
         <p>
           Sounds at <b className="text-ink">{frequencyHz.toFixed(1)} Hz</b>, wanted {targetHz.toFixed(1)} Hz
-          {beatsHz !== null && <>, {Math.abs(beatsHz).toFixed(1)} beats a second against it</>}. Expect it
-          within {accuracyWords(accuracyCents)} before calibration.
+          {beatsHz !== null && <>, {Math.abs(beatsHz).toFixed(1)} beats a second against it</>}.{' '}
+          {accuracyWords(predicted)}
         </p>
       )}
       {notices.map((notice) => (
@@ -140,9 +141,4 @@ function Sounding({ row }: { row: ChartRow }) {
       ))}
     </div>
   );
-}
-
-function accuracyWords(cents: number): string {
-  const whole = Math.max(1, Math.round(cents));
-  return whole === 1 ? '1 cent' : `${whole} cents`;
 }

@@ -3,6 +3,7 @@ import { memo, useRef, useState } from 'react';
 import type { FingeringPrediction } from '#shared/analysis/prediction.ts';
 import type { BenchMeasures } from '../../bench/bench-layout.ts';
 import type { HungNote } from '../../bench/hung-notes.ts';
+import { accuracyWords } from '../../bench/accuracy-words.ts';
 import { spokenHungNote } from '../../bench/spoken-pitch.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import { bobPlace } from './plumb-scale.ts';
@@ -67,10 +68,7 @@ function Sentences({ predicted }: { predicted: FingeringPrediction | null }) {
       {predicted.notices.map(({ message }) => (
         <p key={message}>{message}</p>
       ))}
-      <p className="text-ink3">
-        Expect this figure to be right within {predicted.accuracyCents.toFixed(0)} cents until this mouth end
-        has been calibrated.
-      </p>
+      <p className="text-ink3">{accuracyWords(predicted)}</p>
     </>
   );
 }
