@@ -56,6 +56,7 @@ export function endLengthRatio(fit: ReflectionFit, ka: number): number {
  * @param phase - wavenumber times end length
  * @param out - where the result goes: real part at `at`, imaginary part at `at + 1`
  * @param at - index into `out`
+ * @source Z/Z0 = (1 + r)/(1 − r) of a reflection r; any textbook of acoustics
  */
 export function writeEndImpedance(loss: number, phase: number, out: Float64Array, at: number): void {
   const magnitude = 1 - loss;
