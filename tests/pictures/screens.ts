@@ -20,6 +20,13 @@ const figures = (page: Page) =>
     .first()
     .waitFor();
 
+/** The bobs hang where they belong. */
+const hung = (page: Page) =>
+  page
+    .getByRole('button', { name: /^[A-G]( sharp| flat)? \d .*cents (flat|sharp)$/ })
+    .first()
+    .waitFor();
+
 const bench = (panel: string, query = '', design = WHISTLE) => ({
   role: 'maker' as const,
   path: (designs: ReadonlyMap<string, number>) => `/designs/${designs.get(design) ?? 0}/r/1/${panel}${query}`,
@@ -50,7 +57,7 @@ const WORKBENCH: readonly Screen[] = [
   { name: 'bench-holes-idle', ...bench('holes'), ready: figures },
   { name: 'bench-bore', ...bench('bore'), ready: figures },
   { name: 'bench-notes', ...bench('notes', '?note=G5'), ready: figures },
-  { name: 'bench-air', ...bench('air', '?note=D5'), ready: figures },
+  { name: 'bench-air', ...bench('air', '?note=D5'), ready: drawnAir },
   { name: 'bench-measured-empty', ...bench('bore'), ready: openMeasured },
   { name: 'bench-measured', ...bench('bore'), ready: pasteMeasured },
   { name: 'bench-readonly', ...bench('holes', '?hole=4'), role: 'visitor', ready: heading(WHISTLE) },
@@ -69,7 +76,7 @@ const compare = (view: string) => ({
 
 const COMPARED: readonly Screen[] = [
   { name: 'compare-choose', role: 'maker', path: () => '/designs?compare=two', ready: heading('Designs') },
-  { name: 'compare-holes', ...compare('holes') },
+  { name: 'compare-holes', ...compare('holes'), ready: hung },
   { name: 'compare-notes', ...compare('notes') },
   { name: 'compare-bore', ...compare('bore') },
 ];
@@ -104,6 +111,13 @@ async function pasteMeasured(page: Page): Promise<void> {
   const table = ['mm from foot;diameter', ...rows].join('\n');
   await page.getByRole('textbox', { name: 'Table of measurements' }).fill(table);
   await page.getByRole('button', { name: /^Use these \d+ station/ }).waitFor();
+  await hung(page);
+}
+
+async function drawnAir(page: Page): Promise<void> {
+  await figures(page);
+  await page.locator('.air-ribbon').first().waitFor();
+  await page.locator('.air-curve').first().waitFor();
 }
 
 async function loseLine(page: Page): Promise<void> {
