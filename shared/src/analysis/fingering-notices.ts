@@ -38,10 +38,13 @@ export function fingeringNotices(facts: FingeringFacts): Notice[] {
 function speechNotices(facts: FingeringFacts): Notice[] {
   const { playing, fingering } = facts;
   if (playing === null) {
+    const lost = facts.states.some(({ kind }) => kind !== 'closed')
+      ? 'above the cutoff the open holes let it through'
+      : 'walls and ends take all of it';
     return [
       {
         code: 'no-resonance',
-        message: `No resonance answers for register ${fingering.register} of this fingering: above the cutoff the open holes let it through. It would not speak.`,
+        message: `No resonance answers for register ${fingering.register} of this fingering: ${lost}. It would not speak.`,
       },
     ];
   }

@@ -168,6 +168,19 @@ describe('notices of what a fingering would do', () => {
     expect(codes(second!)).not.toContain('other-rung-plays');
   });
 
+  it('blame no open hole for silence where none is open', () => {
+    const hose = pipe({
+      mouthEnd: { kind: 'ideal-open', correctionScale: 1 },
+      bore: [
+        [0, 2],
+        [5000, 2],
+      ],
+    });
+    const [silent] = played(hose, {});
+    expect(silent!.notices.map(({ code }) => code)).toEqual(['no-resonance']);
+    expect(silent!.notices[0]!.message).not.toContain('hole');
+  });
+
   it('say where the bore is wide against the wavelength, and not below', () => {
     const wide = pipe({
       mouthEnd: { kind: 'ideal-closed', correctionScale: 1 },
