@@ -1,8 +1,9 @@
-import { useMemo, useState, type ReactNode } from 'react';
+import { useEffect, useMemo, useState, type ReactNode } from 'react';
 import type { DesignPrediction, FingeringPrediction } from '#shared/analysis/prediction.ts';
 import type { BenchGeometry } from '../../bench/bench-geometry.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
 import type { PredictionOptions } from '../../engine/engine-answers.ts';
+import { useStable } from '../../bench/use-stable.ts';
 import { useStudy } from '../../engine/use-study.ts';
 import { classNames } from '../../ui/class-names.ts';
 import { AirForm } from './AirForm.tsx';
@@ -46,6 +47,11 @@ export function AirPanel({ sound, predictionOptions, onChoosePredictionOptions, 
     ),
   );
   const zone = zoneOf(geometry);
+  const countAll = useStable(() => {
+    if (!predictionOptions.coupling) onChoosePredictionOptions({ coupling: true });
+  });
+  // Figures without coupling are for comparison here; no other panel may show them.
+  useEffect(() => countAll, [countAll]);
   return (
     <section aria-label="Air column">
       <RibbonShelf {...props} ribbons={ribbons} resonances={resonances} mode={mode} onMode={setChosenMode} />

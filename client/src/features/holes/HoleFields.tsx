@@ -3,13 +3,13 @@ import type { ToneHole } from '#shared/document/design-document.ts';
 import { chimneyMm, fromFootMm } from '#shared/document/profile.ts';
 import { formatCents } from '#shared/music/cents.ts';
 import { removeHole, widestHoleMm } from '../../bench/hole-edits.ts';
-
 import { centsPerStep, SENSITIVITY_STEP } from '../../bench/hole-sensitivity.ts';
 import { useStable } from '../../bench/use-stable.ts';
 import { Button } from '../../ui/Button.tsx';
 import { CoverFields } from './CoverFields.tsx';
 import { DrillRow } from './DrillRow.tsx';
 import type { HoleFieldsProps } from './hole-fields-props.ts';
+import { EveryNote } from './EveryNote.tsx';
 import { HoleSuggestion } from './HoleSuggestion.tsx';
 import { footRange, SIZE_WORDS, withSize, type HoleSize } from './inspector-fields.ts';
 import { SizeField } from './SizeField.tsx';
@@ -81,6 +81,14 @@ export function HoleFields({ chosen, leading, suggestion, ...props }: HoleFields
         title={title}
       />
       <HoleSuggestion {...props} chosen={chosen} leading={leading} suggestion={suggestion} />
+      <EveryNote
+        index={chosen.index}
+        hasUndercut={hole.undercut !== null}
+        fingerings={document.fingerings}
+        sensitivities={props.sensitivities}
+        unit={unit}
+        leading={leading}
+      />
       {!disabled && (
         <Button
           look="bare"
