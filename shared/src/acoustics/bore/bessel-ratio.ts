@@ -30,7 +30,7 @@ export function wallFunction(x: number, out: Float64Array, at: number): void {
   let im = 0;
   if (x >= FAR) {
     const t = 1 / x;
-    for (let n = 2 * FAR_TERMS - 2; n >= 0; n -= 2) {
+    for (let n = 2 * farTerms(x) - 2; n >= 0; n -= 2) {
       re = re * t + cell(far, n);
       im = im * t + cell(far, n + 1);
     }
@@ -47,6 +47,13 @@ export function wallFunction(x: number, out: Float64Array, at: number): void {
   }
   out[at] = re;
   out[at + 1] = im;
+}
+
+// Terms of the far series that matter: the next would add less than 1e-11 of F.
+function farTerms(x: number): number {
+  if (x < 40) return FAR_TERMS;
+  if (x < 70) return 8;
+  return x < 120 ? 7 : 6;
 }
 
 // Coefficients of F in powers of 1/x, from x⁻¹ on: −2·t·S₁(t)/S₀(t) with t = j/z = e^{3jπ/4}/x.

@@ -97,6 +97,36 @@ export function appendShunt(cells: Cells, at: number, re: number, im: number): v
 }
 
 /**
+ * Puts a series reactance before a two-port (on its mouth side).
+ *
+ * @param cells - where the two-ports lie
+ * @param at - address of the two-port, replaced
+ * @param reactance - imaginary part of the impedance, Pa·s/m³
+ * @returns nothing; the result is in the cells
+ */
+export function prependReactance(cells: Cells, at: number, reactance: number): void {
+  for (let i = at; i < at + 4; i += 2) {
+    cells[i] = cell(cells, i) - reactance * cell(cells, i + 5);
+    cells[i + 1] = cell(cells, i + 1) + reactance * cell(cells, i + 4);
+  }
+}
+
+/**
+ * Puts a shunt susceptance before a two-port (on its mouth side).
+ *
+ * @param cells - where the two-ports lie
+ * @param at - address of the two-port, replaced
+ * @param susceptance - imaginary part of the admittance, m³/(Pa·s)
+ * @returns nothing; the result is in the cells
+ */
+export function prependSusceptance(cells: Cells, at: number, susceptance: number): void {
+  for (let i = at; i < at + 4; i += 2) {
+    cells[i + 4] = cell(cells, i + 4) - susceptance * cell(cells, i + 1);
+    cells[i + 5] = cell(cells, i + 5) + susceptance * cell(cells, i);
+  }
+}
+
+/**
  * Turns a two-port round, so that its foot side faces the mouth: A and D change places.
  *
  * @param cells - where the two-ports lie

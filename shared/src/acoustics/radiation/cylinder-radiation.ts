@@ -1,3 +1,4 @@
+import { cell } from '../complex/cells.ts';
 import { cubicSpline } from '../numerics/cubic-spline.ts';
 
 /** Beyond this product of wavenumber and body radius the self-radiation is held. */
@@ -22,11 +23,21 @@ const SELF_RADIATION = [
   [1.5, 0.605168, -2.374262],
 ] as const;
 
-const REAL = cubicSpline(SELF_RADIATION.map(([kR, re]) => [kR, re] as const));
-const IMAGINARY = cubicSpline(SELF_RADIATION.map(([kR, , im]) => [kR, im] as const));
+/** Cells of one interval: where it begins, where it ends, and the coefficients of real and imaginary part. */
+const PIECE_CELLS = 10;
 
-/** Both parts interval by interval, so that one search serves both. */
-const PIECES = REAL.map((re, i) => ({ to: re.to, from: re.from, re, im: IMAGINARY[i] ?? re }));
+const pieces = splinePieces();
+
+function splinePieces(): Float64Array {
+  const real = cubicSpline(SELF_RADIATION.map(([kR, re]) => [kR, re] as const));
+  const imaginary = cubicSpline(SELF_RADIATION.map(([kR, , im]) => [kR, im] as const));
+  return Float64Array.from(
+    real.flatMap((re, i) => {
+      const im = imaginary[i] ?? re;
+      return [re.from, re.to, re.c0, re.c1, re.c2, re.c3, im.c0, im.c1, im.c2, im.c3];
+    }),
+  );
+}
 
 /**
  * Frequency-dependent part g of the radiation of a small opening in a long round body.
@@ -41,11 +52,11 @@ const PIECES = REAL.map((re, i) => ({ to: re.to, from: re.from, re, im: IMAGINAR
  */
 export function selfRadiation(kR: number, out: Float64Array, at: number): void {
   const x = Math.min(kR, LARGEST_BODY_WAVENUMBER);
-  for (const { from, to, re, im } of PIECES) {
-    if (x > to) continue;
-    const u = x - from;
-    out[at] = re.c0 + u * (re.c1 + u * (re.c2 + u * re.c3));
-    out[at + 1] = im.c0 + u * (im.c1 + u * (im.c2 + u * im.c3));
-    return;
-  }
+  let i = 0;
+  while (x > cell(pieces, i + 1)) i += PIECE_CELLS;
+  const u = x - cell(pieces, i);
+  out[at] =
+    cell(pieces, i + 2) + u * (cell(pieces, i + 3) + u * (cell(pieces, i + 4) + u * cell(pieces, i + 5)));
+  out[at + 1] =
+    cell(pieces, i + 6) + u * (cell(pieces, i + 7) + u * (cell(pieces, i + 8) + u * cell(pieces, i + 9)));
 }

@@ -81,21 +81,61 @@ let selfAt = NaN;
  *   coupling_angle.json
  */
 export function mutualRadiation(wavenumber: number, pair: OpeningPair, out: Float64Array, at: number): void {
+  const v = wavenumber * pair.radius * pair.distance;
+  travel.phase = v;
+  travel.cosine = Math.cos(v);
+  travel.sine = Math.sin(v);
+  travel.bodySine = Math.sin(BODY_SHARE * v);
+  mutualRadiationAfter(wavenumber, pair, travel, { out, at });
+}
+
+/** How a wave that goes from one opening to the other along the axis turns, with the sines of that. */
+export interface Travel {
+  /** Wavenumber times distance. */
+  phase: number;
+  cosine: number;
+  sine: number;
+  /** Sine of `BODY_SHARE` of the phase. */
+  bodySine: number;
+}
+
+/** The body's own resonance part turns by this share of what the wave along it does. */
+export const BODY_SHARE = 0.65;
+
+const travel: Travel = { phase: 0, cosine: 1, sine: 0, bodySine: 0 };
+
+/**
+ * The same where the sines are known: those of all openings of a body cost less than those of all their pairs.
+ *
+ * @param wavenumber - 1/m, ≥ 0
+ * @param pair - made by `openingPair`
+ * @param along - from one opening to the other
+ * @param to - where G goes, 1/m: real part at `at`, imaginary part at `at + 1`
+ * @param to.out - the cells
+ * @param to.at - index into them
+ * @returns nothing; the result is in the cells
+ * @source as `mutualRadiation`
+ */
+export function mutualRadiationAfter(
+  wavenumber: number,
+  pair: OpeningPair,
+  along: Travel,
+  { out, at }: { out: Float64Array; at: number },
+): void {
   const { radius, distance, turn } = pair;
-  const v = wavenumber * radius * distance;
+  const { phase: v, cosine, sine, bodySine } = along;
   // Held where the self-radiation is: a coupling stronger than the opening's own resistance would give out power.
   const q = Math.min(wavenumber * radius, LARGEST_BODY_WAVENUMBER);
   if (q !== selfAt) selfRadiation(q, self, 0);
   selfAt = q;
   const ownRe = self[0] ?? NaN;
   const ownIm = (self[1] ?? NaN) + q;
-  const half = Math.sin(v / 2);
-  let re = pair.low + ownRe * pair.reach - (distance > 0 ? (2 * half * half) / distance : 0);
-  let im = ownIm * sinc(0.65 * v) - q * sinc(v);
+  let re = pair.low + ownRe * pair.reach - (distance > 0 ? (1 - cosine) / distance : 0);
+  let im = v < 1e-4 ? ownIm - q : (ownIm * bodySine) / (BODY_SHARE * v) - (q * sine) / v;
   if (turn > 0) {
     const round = 8 * turn * roundStrength(q);
     re -= round * aroundReal(q * pair.path);
-    im += round * aroundImaginary(v);
+    im += round * (v < 0.01 ? 1 / 3 - (v * v) / 30 : (sine / v - cosine) / (v * v));
   }
   out[at] = re / radius;
   out[at + 1] = im / radius;
@@ -141,19 +181,10 @@ function roundStrength(q: number): number {
   return 0.216 + beyond * (1.08 - 0.32 * beyond);
 }
 
-function sinc(x: number): number {
-  return Math.abs(x) < 1e-4 ? 1 - (x * x) / 6 : Math.sin(x) / x;
-}
-
 // (cos x − 1)/x³ + sin x/x², which is 1/(2x) − x/8 while x is small.
 function aroundReal(x: number): number {
   if (x === 0) return 0;
   if (x < 1e-3) return 0.5 / x - x / 8;
   const half = Math.sin(x / 2);
   return (Math.sin(x) - (2 * half * half) / x) / (x * x);
-}
-
-// (sin v/v − cos v)/v², which is 1/3 − v²/30 while v is small.
-function aroundImaginary(v: number): number {
-  return v < 0.01 ? 1 / 3 - (v * v) / 30 : (Math.sin(v) / v - Math.cos(v)) / (v * v);
 }

@@ -1,11 +1,13 @@
 import { cell, type Cells } from '../complex/cells.ts';
 import { innerCoupling } from '../radiation/inner-coupling.ts';
 import {
+  BODY_SHARE,
   footDistance,
   footMutualRadiation,
-  mutualRadiation,
+  mutualRadiationAfter,
   openingPair,
   type OpeningPair,
+  type Travel,
 } from '../radiation/mutual-radiation.ts';
 import type { BorePlan } from './bore-plan.ts';
 import type { Column } from './column.ts';
@@ -42,6 +44,10 @@ export interface Coupling {
   /** Holes first, mouth side to foot, then the foot, then the mouth. */
   openings: number;
   pairs: CoupledPair[];
+  /** Where each opening lies along the axis, m. */
+  positions: Float64Array;
+  /** For each opening the cosine and sine of wavenumber times position, then of `BODY_SHARE` of that. */
+  waves: Float64Array;
   /** Address of the square of mutual impedances through the air outside. */
   outer: number;
   /** Address of the square of mutual reactances inside the bore, one number each. */
@@ -73,7 +79,14 @@ export function planCoupling(
       pairs.push({ first, second, ...couple(one, other) });
     }
   });
-  return { openings: count, pairs, outer: plan.take(2 * count * count), inner: plan.take(count * count) };
+  return {
+    openings: count,
+    pairs,
+    positions: Float64Array.from(openings, (opening) => opening?.position ?? NaN),
+    waves: new Float64Array(4 * count),
+    outer: plan.take(2 * count * count),
+    inner: plan.take(count * count),
+  };
 }
 
 function openingsOf(column: Column, mouth: MouthOpening | null): (Opening | null)[] {
@@ -126,8 +139,10 @@ function innerMass(first: Opening, second: Opening, distance: number): number {
  * @returns nothing; the result is in the cells
  */
 export function tuneCoupling(cells: Cells, coupling: Coupling, outside: number, wanted: Uint8Array): void {
+  const k = cell(cells, outside);
+  for (let i = 0; i < coupling.openings; i += 1) if (wanted[i] === 1) writeWave(coupling, i, k);
   for (const pair of coupling.pairs) {
-    if (wanted[pair.first] === 1 && wanted[pair.second] === 1) tunePair(cells, coupling, outside, pair);
+    if (wanted[pair.first] === 1 && wanted[pair.second] === 1) writePair(cells, coupling, outside, pair);
   }
 }
 
@@ -142,12 +157,53 @@ export function tuneCoupling(cells: Cells, coupling: Coupling, outside: number, 
  */
 export function tunePair(cells: Cells, coupling: Coupling, outside: number, pair: CoupledPair): void {
   const k = cell(cells, outside);
+  writeWave(coupling, pair.first, k);
+  writeWave(coupling, pair.second, k);
+  writePair(cells, coupling, outside, pair);
+}
+
+function writeWave({ positions, waves }: Coupling, opening: number, wavenumber: number): void {
+  const phase = wavenumber * cell(positions, opening);
+  waves[4 * opening] = Math.cos(phase);
+  waves[4 * opening + 1] = Math.sin(phase);
+  waves[4 * opening + 2] = Math.cos(BODY_SHARE * phase);
+  waves[4 * opening + 3] = Math.sin(BODY_SHARE * phase);
+}
+
+const travel: Travel = { phase: 0, cosine: 1, sine: 0, bodySine: 0 };
+
+// From one opening to the other, by the sines of a difference.
+function writeTravel(
+  { positions, waves }: Coupling,
+  first: number,
+  second: number,
+  wavenumber: number,
+): void {
+  const forward = cell(positions, first) < cell(positions, second);
+  const a = 4 * (forward ? first : second);
+  const b = 4 * (forward ? second : first);
+  travel.phase = wavenumber * Math.abs(cell(positions, second) - cell(positions, first));
+  travel.cosine = cell(waves, b) * cell(waves, a) + cell(waves, b + 1) * cell(waves, a + 1);
+  travel.sine = cell(waves, b + 1) * cell(waves, a) - cell(waves, b) * cell(waves, a + 1);
+  travel.bodySine = cell(waves, b + 3) * cell(waves, a + 2) - cell(waves, b + 2) * cell(waves, a + 3);
+}
+
+const radiated: { out: Cells; at: number } = { out: new Float64Array(0), at: 0 };
+
+function writePair(cells: Cells, coupling: Coupling, outside: number, pair: CoupledPair): void {
+  const k = cell(cells, outside);
   const reactance = k * cell(cells, outside + 1);
   const { openings, outer, inner } = coupling;
   const at = outer + 2 * (pair.first * openings + pair.second);
   const mirror = outer + 2 * (pair.second * openings + pair.first);
-  if (pair.sides === null) footMutualRadiation(k, pair.distance, cells, at);
-  else mutualRadiation(k, pair.sides, cells, at);
+  if (pair.sides === null) {
+    footMutualRadiation(k, pair.distance, cells, at);
+  } else {
+    writeTravel(coupling, pair.first, pair.second, k);
+    radiated.out = cells;
+    radiated.at = at;
+    mutualRadiationAfter(k, pair.sides, travel, radiated);
+  }
   const scale = reactance / (4 * Math.PI);
   const re = -scale * cell(cells, at + 1);
   cells[at + 1] = scale * cell(cells, at);

@@ -4,8 +4,9 @@ import { writeCylinder } from '../bore/cylinder.ts';
 import {
   TWO_PORT_CELLS,
   appendSeries,
-  appendShunt,
   appendTwoPort,
+  prependReactance,
+  prependSusceptance,
   writeIdentity,
 } from '../complex/two-port.ts';
 import { selfRadiation } from '../radiation/cylinder-radiation.ts';
@@ -112,15 +113,15 @@ export function tuneHoleBranch(cells: Cells, branch: HoleBranch, outside: number
   const series = reactance * shape.halfSeries;
   cells[branch.series] = series;
   if (branch.shift !== 0) tuneShift(cells, branch, series);
-  writeIdentity(cells, inside);
-  if (!branch.closed) tuneNode(cells, branch, medium);
-  appendSeries(cells, inside, 0, reactance * shape.inner);
-  appendSlices(cells, inside, branch.chimney);
+  writeSlices(cells, inside, branch.chimney);
+  prependReactance(cells, inside, reactance * shape.inner);
   if (branch.closed) {
     writeRatio(cells, inside + 4, inside, shunt);
     return;
   }
   const { radiation } = branch;
+  const volume = NODE_COMPLIANCE_RATIO * Math.PI * shape.innerRadius ** 3;
+  prependSusceptance(cells, inside, (cell(cells, medium) * volume) / cell(cells, medium + 1));
   const k = cell(cells, outside);
   const outer = k * cell(cells, outside + 1);
   selfRadiation(k * shape.outerRadius, cells, radiation);
@@ -134,15 +135,20 @@ export function tuneHoleBranch(cells: Cells, branch: HoleBranch, outside: number
 }
 
 /**
- * Puts slices behind a two-port.
+ * Two-port of slices one after another.
  *
  * @param cells - the column's
- * @param at - address of the two-port
- * @param slices - in order
+ * @param at - address to write to
+ * @param slices - in order; none change nothing
  * @returns nothing; the result is in the cells
  */
-export function appendSlices(cells: Cells, at: number, slices: readonly Slice[]): void {
-  for (const slice of slices) {
+export function writeSlices(cells: Cells, at: number, slices: readonly Slice[]): void {
+  const first = slices[0];
+  if (first === undefined) writeIdentity(cells, at);
+  else writeSlice(cells, at, first);
+  for (let i = 1; i < slices.length; i += 1) {
+    const slice = slices[i];
+    if (slice === undefined) continue;
     writeSlice(cells, SCRATCH, slice);
     appendTwoPort(cells, at, SCRATCH);
   }
@@ -162,12 +168,6 @@ export const SCRATCH = 0;
 export function writeSlice(cells: Cells, at: number, slice: Slice): void {
   if (slice.conical) writeCone(cells, at, slice.duct, slice.at);
   else writeCylinder(cells, at, slice.duct, cell(cells, slice.at + 2));
-}
-
-function tuneNode(cells: Cells, branch: HoleBranch, medium: number): void {
-  const { innerRadius } = branch.shape;
-  const volume = NODE_COMPLIANCE_RATIO * Math.PI * innerRadius ** 3;
-  appendShunt(cells, branch.inside, 0, (cell(cells, medium) * volume) / cell(cells, medium + 1));
 }
 
 function tuneShift(cells: Cells, branch: HoleBranch, series: number): void {

@@ -9,7 +9,7 @@ import {
 } from '../complex/two-port.ts';
 import { solveComplex } from '../numerics/linear-solve.ts';
 import type { HoleBranch } from './hole-branch.ts';
-import { outflowAt } from './opening-system.ts';
+import { outflowAt, type OpeningSystem } from './opening-system.ts';
 import type { FingeringBranches, PreparedColumn } from './prepared-column.ts';
 
 const quotient = new Float64Array(2);
@@ -154,24 +154,37 @@ function reciprocal(cells: Cells, at: number): void {
 
 // Pressure and flow at the bore's side of every opening for unit flow out of every other, and into the mouth.
 function writeOpenings(prepared: PreparedColumn): void {
-  const { cells, branches, coupling, system } = prepared;
-  const { nodes, opening, pressure, flow } = system;
+  const { cells, branches, system } = prepared;
+  const { nodes, pressure, flow } = system;
   for (let i = 0; i < nodes; i += 1) {
     const branch = branches[system.branch[i] ?? -1];
     const inside = branch?.inside ?? prepared.footTwoPort;
-    const heard = coupling.outer + 2 * (opening[i] ?? 0) * coupling.openings;
     const row = 2 * i * (nodes + 1);
-    for (let j = 0; j < nodes; j += 1) {
-      const from = heard + 2 * (opening[j] ?? 0);
-      passThrough(cells, inside, from, pressure + row + 2 * j);
-      passThrough(cells, inside + 4, from, flow + row + 2 * j);
-    }
-    const mouth = heard + 2 * (coupling.openings - 1);
-    passThrough(cells, inside, mouth, pressure + row + 2 * nodes);
-    passThrough(cells, inside + 4, mouth, flow + row + 2 * nodes);
+    hearOthers(prepared, i, inside, pressure + row);
+    hearOthers(prepared, i, inside + 4, flow + row);
     const radiation = branch?.radiation ?? prepared.footRadiation;
     addOwnRadiation(cells, inside, radiation, pressure + row + 2 * i);
     addOwnRadiation(cells, inside + 4, radiation, flow + row + 2 * i);
+  }
+}
+
+// A row of the pressures or flows: one number of the opening's two-port times its mutual impedances with all others.
+function hearOthers(
+  { cells, coupling, system }: PreparedColumn,
+  node: number,
+  first: number,
+  to: number,
+): void {
+  const { nodes, opening } = system;
+  const heard = coupling.outer + 2 * (opening[node] ?? 0) * coupling.openings;
+  const ar = cell(cells, first);
+  const ai = cell(cells, first + 1);
+  for (let j = 0; j <= nodes; j += 1) {
+    const from = heard + 2 * (j === nodes ? coupling.openings - 1 : (opening[j] ?? 0));
+    const zr = cell(cells, from);
+    const zi = cell(cells, from + 1);
+    cells[to + 2 * j] = ar * zr - ai * zi;
+    cells[to + 2 * j + 1] = ar * zi + ai * zr;
   }
 }
 
@@ -212,31 +225,36 @@ function writeInnerCoupling({ cells, coupling, system }: PreparedColumn): void {
 }
 
 // Equations: flow out of the bore at every node, by the bore's admittances and by the opening, is nothing.
-function writeEquations(prepared: PreparedColumn): void {
-  const { cells, system } = prepared;
-  const { nodes, flow, matrix, pressure, diagonal, beside } = system;
-  const stride = 2 * (nodes + 1);
-  for (let i = 0; i < nodes; i += 1) {
-    const row = i * stride;
-    for (let j = 0; j < stride; j += 1) cells[matrix + row + j] = cell(cells, flow + row + j);
-    addScaledRow(prepared, diagonal + 2 * i, pressure + row, matrix + row);
-    if (i > 0) addScaledRow(prepared, beside + 2 * i, pressure + row - stride, matrix + row);
-    if (i < nodes - 1) addScaledRow(prepared, beside + 2 * i + 2, pressure + row + stride, matrix + row);
-  }
+function writeEquations({ cells, system }: PreparedColumn): void {
+  const { nodes, matrix } = system;
+  for (let i = 0; i < nodes; i += 1) writeEquation(cells, system, i);
   reciprocal(cells, system.between + 6);
   addQuotient(cells, matrix + 2 * nodes);
 }
 
-// to ← to + factor · from, over a whole row.
-function addScaledRow({ cells, system }: PreparedColumn, factor: number, from: number, to: number): void {
-  const fr = cell(cells, factor);
-  const fi = cell(cells, factor + 1);
-  const stride = 2 * (system.nodes + 1);
-  for (let j = 0; j < stride; j += 2) {
-    const xr = cell(cells, from + j);
-    const xi = cell(cells, from + j + 1);
-    cells[to + j] = cell(cells, to + j) + fr * xr - fi * xi;
-    cells[to + j + 1] = cell(cells, to + j + 1) + fr * xi + fi * xr;
+// One equation: the flow into the opening, and the bore's admittances times the pressures at the node and beside it.
+function writeEquation(cells: Cells, system: OpeningSystem, node: number): void {
+  const { nodes, flow, matrix, pressure, diagonal, beside } = system;
+  const stride = 2 * (nodes + 1);
+  const above = node > 0 ? stride : 0;
+  const below = node < nodes - 1 ? stride : 0;
+  const dr = cell(cells, diagonal + 2 * node);
+  const di = cell(cells, diagonal + 2 * node + 1);
+  const ar = above === 0 ? 0 : cell(cells, beside + 2 * node);
+  const ai = above === 0 ? 0 : cell(cells, beside + 2 * node + 1);
+  const br = below === 0 ? 0 : cell(cells, beside + 2 * node + 2);
+  const bi = below === 0 ? 0 : cell(cells, beside + 2 * node + 3);
+  for (let j = node * stride; j < (node + 1) * stride; j += 2) {
+    const at = pressure + j;
+    const pr = cell(cells, at);
+    const pi = cell(cells, at + 1);
+    const qr = cell(cells, at - above);
+    const qi = cell(cells, at - above + 1);
+    const sr = cell(cells, at + below);
+    const si = cell(cells, at + below + 1);
+    cells[matrix + j] = cell(cells, flow + j) + dr * pr - di * pi + ar * qr - ai * qi + br * sr - bi * si;
+    cells[matrix + j + 1] =
+      cell(cells, flow + j + 1) + dr * pi + di * pr + ar * qi + ai * qr + br * si + bi * sr;
   }
 }
 

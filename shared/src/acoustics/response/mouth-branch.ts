@@ -4,6 +4,7 @@ import {
   appendSeries,
   appendShunt,
   appendTwoPort,
+  prependReactance,
   reverseTwoPort,
   writeIdentity,
 } from '../complex/two-port.ts';
@@ -14,7 +15,7 @@ import { windowEnd, windowImpedance, type WindowEnd } from '../mouth-end/window.
 import { selfRadiation } from '../radiation/cylinder-radiation.ts';
 import { NODE_COMPLIANCE_RATIO } from '../tone-hole/node-compliance.ts';
 import type { BorePlan, Slice } from './bore-plan.ts';
-import { appendSlices, planChimney } from './hole-branch.ts';
+import { planChimney, writeSlices } from './hole-branch.ts';
 import { boreBetween, type Column, type ColumnMouth } from './column.ts';
 import { holeShape, type HoleShape } from './hole-shape.ts';
 
@@ -178,8 +179,7 @@ function tuneEmbouchure(cells: Cells, branch: MouthBranch, parts: Embouchure, ou
   cells[parts.series] = reactance * shape.halfSeries;
   cells[parts.inner] = reactance * shape.inner;
   tuneSide(cells, branch, parts);
-  writeIdentity(cells, chimneyTwoPort);
-  appendSlices(cells, chimneyTwoPort, parts.chimney);
+  writeSlices(cells, chimneyTwoPort, parts.chimney);
   reverseTwoPort(cells, chimneyTwoPort);
   const k = cell(cells, outside);
   const outer = k * cell(cells, outside + 1);
@@ -197,9 +197,8 @@ function tuneEmbouchure(cells: Cells, branch: MouthBranch, parts: Embouchure, ou
 // Admittance beside the bore: the stopper's cavity, shut at its far end, and the node's compliance.
 function tuneSide(cells: Cells, { medium }: MouthBranch, parts: Embouchure): void {
   const { chimneyTwoPort: cavity, shape, side } = parts;
-  writeIdentity(cells, cavity);
-  appendSeries(cells, cavity, 0, cell(cells, parts.series));
-  appendSlices(cells, cavity, parts.cavity);
+  writeSlices(cells, cavity, parts.cavity);
+  prependReactance(cells, cavity, cell(cells, parts.series));
   const ar = cell(cells, cavity);
   const ai = cell(cells, cavity + 1);
   const cr = cell(cells, cavity + 4);
