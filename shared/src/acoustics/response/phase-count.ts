@@ -2,6 +2,7 @@ import { cell, type Cells } from '../complex/cells.ts';
 import type { Segment } from './bore-plan.ts';
 import { CHAIN_CELLS, passReactance, passShunt, passTwoPort, startAtFoot } from './chain.ts';
 import type { HoleBranch } from './hole-branch.ts';
+import { roughAngle } from '../numerics/rough-angle.ts';
 import { nearestTurn } from './phase-track.ts';
 import type { Embouchure } from './mouth-branch.ts';
 import type { FingeringBranches, PreparedColumn } from './prepared-column.ts';
@@ -80,13 +81,16 @@ function scaleTo(prepared: PreparedColumn, radius: number): void {
   state[RADIUS] = radius;
 }
 
+// The series halves are slight beside the branch: the whole hole turns both waves by less than half a circle each.
 function passHole(prepared: PreparedColumn, branch: HoleBranch): void {
   const { cells } = prepared;
   if (branch.shift !== 0) passShift(prepared, -branch.shift, branch.after);
-  else passSeries(prepared, cell(cells, branch.series));
-  passSide(prepared, cells, branch.shunt);
+  keepWave();
+  if (branch.shift === 0) passReactance(state, cell(cells, branch.series));
+  passShunt(cells, branch.shunt, state);
+  if (branch.shift === 0) passReactance(state, cell(cells, branch.series));
+  turnBy(unitImpedance(prepared, cell(state, RADIUS)));
   if (branch.shift !== 0) passShift(prepared, branch.shift, branch.before);
-  else passSeries(prepared, cell(cells, branch.series));
 }
 
 function passShift(prepared: PreparedColumn, length: number, at: number): void {
@@ -121,17 +125,6 @@ function lineTurn(unit: number): number {
   const toRe = cell(state, 0) + unit * cell(state, 2);
   const toIm = cell(state, 1) + unit * cell(state, 3);
   return roughAngle(toIm * fromRe - toRe * fromIm, toRe * fromRe + toIm * fromIm);
-}
-
-// Angle of a vector within 0.005 rad, principal: whole turns are counted, and Math.atan2 costs ten times as much.
-function roughAngle(y: number, x: number): number {
-  const ax = Math.abs(x);
-  const ay = Math.abs(y);
-  const small = ax > ay ? ay / ax : ax / ay;
-  const octant = small * (Math.PI / 4 + 0.273 * (1 - small));
-  const quadrant = ax > ay ? octant : Math.PI / 2 - octant;
-  const half = x < 0 ? Math.PI - quadrant : quadrant;
-  return y < 0 ? -half : half;
 }
 
 function passMouth(prepared: PreparedColumn): number {

@@ -3,7 +3,9 @@ import { EngineInputError } from '../engine-input-error.ts';
 import { chainImpedance } from './chain.ts';
 import { coupledImpedance } from './input-impedance.ts';
 import { countedPhase } from './phase-count.ts';
-import { nearestTurn, PhaseTrack } from './phase-track.ts';
+import { touchingInterval } from './phase-hump.ts';
+import { PhaseTrack, phaseSample } from './phase-track.ts';
+import { referenceImpedance, writeRoundTrip } from './round-trip.ts';
 import { tuneColumn, tuneFingering, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
 
 export interface ResonanceSearch {
@@ -27,28 +29,25 @@ export interface Probe {
   next: number;
 }
 
-/** Samples in which the phase of a plain tube makes one full turn. */
+/** Samples of the common grid in which the phase of a plain tube makes one full turn. */
 const SAMPLES_PER_TURN = 4;
-/** A step from sample to sample beyond these is looked into, rad. */
-const LARGEST_FALL = 2.4;
-const LARGEST_RISE = 0.4;
-/** An interval looked into is settled once it is this share of the grid's and its step this small, rad. */
-const SETTLED_SHARE = 1 / 8;
-const SETTLED_STEP = 0.8;
-/** Where a phase turns round so near to a level, rad, the interval must be this share of the grid's. */
-const NEAR_LEVEL = 0.6;
-const TURNING_SHARE = 1 / 64;
-/** And it is at most so many times as wide as the one before. */
-const ABRUPT = 5;
-/** Share of the power that comes back, below which losses and radiation may let a pair of resonances vanish. */
-const LEAKING = 0.7;
+/** Where the round trip falls evenly a step is as long as the phase takes for so much, rad. */
+const USUAL_FALL = 3.4;
+/** There turns are sure while phase and count agree to this, rad: openings that hear each other move a resonance by less. */
+const SURE = 0.4;
+/** The largest fall of such a step, rad. */
+const LARGEST_FALL = 5;
+/** Elsewhere no step is longer than one of the grid; rounding aside. */
+const ONE_STEP = 1.01;
+/** Clearances that settle a step: where phase and count agree, where they do not quite, beside a lost turn, and where it is lost. */
+const CLEAR = 2;
+const CLEARER = 5;
+const CLEAR_BESIDE = 8;
+const QUITE_CLEAR = 16;
 /** Hz; nothing in an instrument is narrower. */
 const NARROWEST = 1e-3;
 /** No instrument needs so many; a search that does has lost its way. */
 const MOST_SAMPLES = 20_000;
-/** A fall below the first lets the next grid sample be left out, below the second the next three, rad. */
-const SLOW_FALL = 0.7;
-const VERY_SLOW_FALL = 0.3;
 /** A scan ends, though it passed fewer, where so many more resonances would lie if none had leaked away. */
 const LEAKED = 2;
 /** But no sooner than so many turns after the last it passed: above lost ones a part of the column may sound on. */
@@ -60,10 +59,15 @@ const CROSS_MODE = 1.84;
  * Phase φ of the reflection (Z − Z₀)/(Z + Z₀) at the mouth end over frequency, for every fingering.
  *
  * It falls with frequency; minima of |Z| lie where it passes odd multiples of π, maxima where it passes even ones. Samples are
- * shared by all fingerings. `countedPhase` tells at each sample how many turns lie below: wherever that and the step of the
- * phase disagree, the interval is halved until it is settled. Without that count a narrow resonance between two samples
- * would go unseen. Above the cutoff, where the open holes leak, a minimum and a maximum may both vanish; then the count
- * keeps the turn and the phase, whose steps are small by then, is right to have lost it.
+ * shared by all fingerings, two to a turn where the round trip from mouth to foot and back turns evenly, and closer where it
+ * does not. Between two samples φ may have turned once more than it seems, and so an interval counts as settled only if
+ * - the round trip turned as far as the interval before lets expect, or the reflection, drawn in its plane, passed the
+ *   origin further off than the curve can be bent there; and
+ * - `countedPhase`, which tells from one frequency alone how many turns lie below, agrees; or the curve is so straight that not
+ *   even the narrowest resonance that the walls' losses allow can hide in it. Above the cutoff a minimum and a maximum may
+ *   both vanish; then the count keeps the turn and the phase is right to have lost it; and
+ * - φ does not turn round just short of a level beside it.
+ * Whatever is not settled is halved.
  *
  * @param prepared - the column
  * @param fingerings - branches of each fingering
@@ -84,7 +88,7 @@ export function scanPhases(
     fingering,
     search,
     step,
-    track: new PhaseTrack(),
+    track: new PhaseTrack((-2 * Math.PI) / (SAMPLES_PER_TURN * step)),
     next: 0,
   }));
   let open = probes;
@@ -96,7 +100,9 @@ export function scanPhases(
     for (const probe of due) sample(probe, probe.track.count, frequency);
     for (const probe of due) {
       settle(probe);
-      probe.next = j + stride(probe);
+      const next = stride(probe, j);
+      // On multiples of the stride, so that fingerings meet and share a frequency.
+      probe.next = j + next - (j % next);
     }
     if (due.some(isThrough)) open = open.filter((probe) => !isThrough(probe));
   }
@@ -123,30 +129,16 @@ export function reflectionPhase(
   return Math.atan2(2 * im * unit, re * re + im * im - unit * unit);
 }
 
-// A narrow input to a wide cone would turn its whole circle within a hair of each resonance; a middle radius spreads it.
-function referenceImpedance({ inputImpedance, inputRadius, phaseRadius }: PreparedColumn): number {
-  return inputImpedance * (inputRadius / phaseRadius) ** 2;
-}
-
-// Share of the power that comes back.
-function reflectedPower(prepared: PreparedColumn): number {
-  const unit = referenceImpedance(prepared);
-  const re = cell(prepared.cells, prepared.system.impedance);
-  const im = cell(prepared.cells, prepared.system.impedance + 1);
-  return ((re - unit) ** 2 + im * im) / ((re + unit) ** 2 + im * im);
-}
-
 // Phase at which the resonance of an order lies if none before it was lost.
 function levelOf(order: number, track: PhaseTrack, maxima: boolean): number {
   if (!maxima) return Math.PI - 2 * Math.PI * order;
   // A column that is shut all along begins at a maximum, that of no frequency at all, which does not count.
-  return cell(track.phases, 0) > 0 ? 2 * Math.PI * (1 - order) : -2 * Math.PI * order;
+  return track.phase(0) > 0 ? 2 * Math.PI * (1 - order) : -2 * Math.PI * order;
 }
 
 // Puts a sample at the frequency that the column is set to into the track.
 function sample({ prepared, fingering, search, track }: Probe, place: number, frequency: number): void {
   const phase = reflectionPhase(prepared, fingering, search.coupling);
-  const reflected = reflectedPower(prepared);
   if (!Number.isFinite(phase) || track.count >= MOST_SAMPLES) {
     throw new EngineInputError(
       'bore.stations',
@@ -154,19 +146,25 @@ function sample({ prepared, fingering, search, track }: Probe, place: number, fr
       'No resonances can be told apart in so narrow or so uneven a bore. Check the diameters of bore and holes.',
     );
   }
-  track.insert(place, { frequency, phase, reflected, counted: countedPhase(prepared, fingering) });
+  fresh.frequency = frequency;
+  fresh.phase = phase;
+  fresh.counted = countedPhase(prepared, fingering);
+  writeRoundTrip(prepared, search.maxima, fresh.roundTrip);
+  track.insert(place, fresh);
 }
+
+const fresh = phaseSample();
 
 // Whether all resonances wanted lie below the last sample, or would if none had leaked away and the column fell silent.
 function isThrough({ track, search }: Probe): boolean {
   const last = track.count - 1;
-  if (cell(track.phases, last) <= levelOf(search.count, track, search.maxima)) return true;
-  const counted = cell(track.counts, last);
+  if (track.phase(last) <= levelOf(search.count, track, search.maxima)) return true;
+  const counted = track.counted(last);
   if (counted > levelOf(search.count + LEAKED, track, search.maxima)) return false;
-  const found = levelAbove(cell(track.phases, last), search.maxima);
+  const found = levelAbove(track.phase(last), search.maxima);
   let silent = last;
-  while (silent > 0 && cell(track.phases, silent) <= found) silent -= 1;
-  return cell(track.counts, silent) - counted >= 2 * Math.PI * SILENT;
+  while (silent > 0 && track.phase(silent) <= found) silent -= 1;
+  return track.counted(silent) - counted >= 2 * Math.PI * SILENT;
 }
 
 // The last level that a falling phase has passed: whole turns for maxima, odd halves of one for minima.
@@ -175,59 +173,53 @@ function levelAbove(phase: number, maxima: boolean): number {
   return level + 2 * Math.PI * Math.ceil((phase - level) / (2 * Math.PI));
 }
 
-// Halves the last interval, and its halves, until every step is sure; the one before it too where the phase begins to rise.
+// Halves the last interval, and its halves, until every step is sure and no level is touched unseen.
 function settle(probe: Probe): void {
   const { track, prepared, search } = probe;
   for (let i = Math.max(track.count - 2, 1); i < track.count;) {
-    if (isSettled(probe, i)) {
+    const open = isSettled(probe, i) ? touched(probe, i - 1) : i;
+    if (open === 0) {
       i += 1;
       continue;
     }
-    const middle = (cell(track.frequencies, i - 1) + cell(track.frequencies, i)) / 2;
+    const middle = (track.frequency(open - 1) + track.frequency(open)) / 2;
     tuneFingering(prepared, probe.fingering, middle, search.coupling);
-    sample(probe, i, middle);
-    i = Math.max(i - 1, 1);
+    sample(probe, open, middle);
+    // What is new may cast doubt on the interval before.
+    i = Math.max(open - 1, 1);
   }
 }
 
-function isSettled({ track, step, search }: Probe, i: number): boolean {
-  const width = cell(track.frequencies, i) - cell(track.frequencies, i - 1);
+function touched({ track, search }: Probe, place: number): number {
+  const end = touchingInterval(track, place, search.maxima ? 0 : Math.PI);
+  return end > 0 && track.frequency(end) - track.frequency(end - 1) > NARROWEST ? end : 0;
+}
+
+function isSettled({ track, step, prepared }: Probe, i: number): boolean {
+  const width = track.frequency(i) - track.frequency(i - 1);
   if (width < NARROWEST) return true;
-  const turn = cell(track.phases, i) - cell(track.phases, i - 1);
-  const counted = cell(track.counts, i) - cell(track.counts, i - 1);
-  if (width > TURNING_SHARE * step && mayTouchUnseen(track, i, search.maxima)) return false;
-  if (Math.abs(counted - turn) < Math.PI && turn > -LARGEST_FALL && turn < LARGEST_RISE) return true;
-  const reflected = Math.min(cell(track.reflected, i), cell(track.reflected, i - 1));
-  return reflected < LEAKING && width <= SETTLED_SHARE * step && Math.abs(turn) <= SETTLED_STEP;
+  const miscount = track.miscount(i);
+  const beside = Math.max(track.miscount(i - 1), track.miscount(i + 1)) > Math.PI;
+  if (!beside && track.isEven(i) && miscount < SURE && track.turn(i) > -LARGEST_FALL) return true;
+  if (width > ONE_STEP * step) return false;
+  const clearance = track.clearance(i);
+  if (miscount > Math.PI) {
+    return clearance > QUITE_CLEAR * Math.max(1, width / narrowestResonance(prepared, track.frequency(i)));
+  }
+  if (beside) return clearance > CLEAR_BESIDE;
+  return clearance > (miscount < SURE ? CLEAR : CLEARER);
 }
 
-// Whether the phase turns round, or lost a turn near by, so near to a level that it could reach it between two samples.
-function mayTouchUnseen(track: PhaseTrack, i: number, maxima: boolean): boolean {
-  const level = maxima ? 0 : Math.PI;
-  const distance = (phase: number) => Math.abs(nearestTurn(level, phase) - phase);
-  if (Math.min(distance(cell(track.phases, i)), distance(cell(track.phases, i - 1))) > NEAR_LEVEL)
-    return false;
-  return [i - 1, i, i + 1].some((j) => turnsRound(track, j)) || isAbruptlyWide(track, i);
-}
-
-// What made the interval before narrow may reach into this one.
-function isAbruptlyWide({ frequencies }: PhaseTrack, i: number): boolean {
-  if (i < 2) return false;
-  const before = cell(frequencies, i - 1) - cell(frequencies, i - 2);
-  return cell(frequencies, i) - cell(frequencies, i - 1) > ABRUPT * before;
-}
-
-function turnsRound({ phases, counts, count }: PhaseTrack, i: number): boolean {
-  if (i < 1 || i >= count) return false;
-  const turn = cell(phases, i) - cell(phases, i - 1);
-  return turn > 0 || Math.abs(cell(counts, i) - cell(counts, i - 1) - turn) >= Math.PI;
+// Hz; by the losses at the wall of the widest bore alone, as wide as half its power: 2·Re Γ/Im Γ of the frequency.
+function narrowestResonance({ widestDuct, cells }: PreparedColumn, frequency: number): number {
+  return (2 * frequency * cell(cells, widestDuct)) / cell(cells, widestDuct + 1);
 }
 
 // How many grid steps on the next sample lies: more where the phase falls slowly.
-function stride({ track: { frequencies, phases, count }, step }: Probe): number {
-  if (count < 3) return 1;
-  const gap = (cell(frequencies, count - 1) - cell(frequencies, count - 2)) / step;
-  const fall = (cell(phases, count - 2) - cell(phases, count - 1)) / gap;
-  if (fall > SLOW_FALL) return 1;
-  return fall > VERY_SLOW_FALL ? 2 : 4;
+function stride({ track }: Probe, j: number): number {
+  const last = track.count - 1;
+  if (last < 2 || !track.isEven(last)) return 1;
+  const fall = (track.phase(0) - track.phase(last)) / j;
+  if (2 * fall > USUAL_FALL) return 1;
+  return 4 * fall > USUAL_FALL ? 2 : 4;
 }

@@ -44,6 +44,8 @@ export interface PreparedColumn {
   length: number;
   /** Of the bore, m. */
   widestRadius: number;
+  /** Address of the duct of that radius. */
+  widestDuct: number;
   /** Outside, m/s. */
   speedOfSound: number;
   /** Resonances that play are maxima of the impedance (reeds), or minima. */
@@ -57,7 +59,7 @@ export interface PreparedColumn {
  *
  * @param column - the column
  * @param fingerings - for each fingering the state of every hole, in the order of the column's holes
- * @returns the column laid out, and for each fingering its branches
+ * @returns the column laid out, and for each fingering its branches; equal ones share theirs
  * @throws EngineInputError where a formula refuses
  */
 export function prepareColumn(
@@ -74,6 +76,7 @@ export function prepareColumn(
   const footTwoPort = plan.take(TWO_PORT_CELLS);
   const inputRadius = boreRadiusAt(column.bore, column.input);
   const widestRadius = Math.max(...column.bore.map((point) => point.radius));
+  const widestDuct = plan.duct(widestRadius, plan.outside);
   const footRadius = column.bore.at(-1)?.radius ?? NaN;
   const prepared: PreparedColumn = {
     cells: plan.cells(),
@@ -93,6 +96,7 @@ export function prepareColumn(
     inputRadius,
     length: (column.bore.at(-1)?.position ?? NaN) - column.input,
     widestRadius,
+    widestDuct,
     phaseRadius: Math.sqrt(inputRadius * widestRadius),
     speedOfSound: column.outside.speedOfSound,
     playsMaxima: column.mouth.kind === 'reed' || column.mouth.kind === 'ideal-closed',
@@ -123,21 +127,22 @@ function planBranches(
   fingerings: readonly (readonly HoleState[])[],
 ): { branches: HoleBranch[]; choices: FingeringBranches[] } {
   const branches: HoleBranch[] = [];
-  const known = new Map<string, number>();
-  const choices = fingerings.map((states, f) =>
-    Int32Array.from(column.holes, (hole, index) => {
+  const choices: FingeringBranches[] = [];
+  fingerings.forEach((states, f) => {
+    const choice = Int32Array.from(column.holes, (hole, index) => {
       const state = states[index];
       if (state === undefined) throw new EngineInputError('fingerings', f, 'A fingering leaves a hole out.');
-      const key = JSON.stringify([index, state]);
-      const place = known.get(key) ?? branches.length;
-      if (place === branches.length) {
-        branches.push(planHoleBranch(plan, hole, index, state));
-        known.set(key, place);
-      }
-      return place;
-    }),
-  );
+      const known = branches.findIndex((branch) => branch.hole === index && isSameState(branch.state, state));
+      return known < 0 ? branches.push(planHoleBranch(plan, hole, index, state)) - 1 : known;
+    });
+    choices.push(choices.find((other) => other.every((place, i) => place === choice[i])) ?? choice);
+  });
   return { branches, choices };
+}
+
+function isSameState(one: HoleState, other: HoleState): boolean {
+  if (one.kind !== 'half' || other.kind !== 'half') return one.kind === other.kind;
+  return one.fraction === other.fraction && one.from === other.from;
 }
 
 function coupledOpenings(branches: readonly HoleBranch[], coupling: Coupling): Uint8Array {

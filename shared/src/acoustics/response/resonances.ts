@@ -1,7 +1,8 @@
 import { cell } from '../complex/cells.ts';
 import { phaseCrossing } from './phase-crossing.ts';
 import { reflectionPhase, scanPhases, type Probe, type ResonanceSearch } from './phase-scan.ts';
-import { nearestTurn } from './phase-track.ts';
+import { phaseSample } from './phase-track.ts';
+import { writeRoundTrip } from './round-trip.ts';
 import { tuneFingering, type FingeringBranches, type PreparedColumn } from './prepared-column.ts';
 
 /** One resonance at the mouth end. */
@@ -19,7 +20,7 @@ export interface Resonance {
 /**
  * Resonances of every fingering, none missed and none twice; see `scanPhases`.
  *
- * Frequencies are right to 1e-6 Hz. Fewer come back than asked for where the rest have leaked away above the cutoff.
+ * Frequencies are right to some 1e-8 of themselves. Fewer come back than asked for where the rest have leaked away above the cutoff.
  *
  * @param prepared - the column
  * @param fingerings - branches of each fingering
@@ -31,29 +32,37 @@ export function findResonances(
   fingerings: readonly FingeringBranches[],
   search: ResonanceSearch,
 ): Resonance[][] {
-  return scanPhases(prepared, fingerings, search).map(crossings);
+  // Two notes of different registers often share a fingering.
+  const probes = scanPhases(prepared, [...new Set(fingerings)], search);
+  const found = new Map(probes.map((probe) => [probe.fingering, crossings(probe)]));
+  return fingerings.map((fingering) => found.get(fingering) ?? []);
 }
+
+const fresh = phaseSample();
 
 // One resonance for every time that the phase falls through a level. Where the holes leak it may rise again and fall through
 // the same level once more, which is another resonance.
 function crossings(probe: Probe): Resonance[] {
   const { track, search, prepared, fingering } = probe;
   const found: Resonance[] = [];
-  const sampleAt = (frequency: number, expected: number) => {
+  const sampleAt = (frequency: number) => {
     tuneFingering(prepared, fingering, frequency, search.coupling);
-    return nearestTurn(reflectionPhase(prepared, fingering, search.coupling), expected);
+    fresh.phase = reflectionPhase(prepared, fingering, search.coupling);
+    writeRoundTrip(prepared, search.maxima, fresh.roundTrip);
+    return fresh;
   };
-  for (let i = 1; i < track.count && found.length < search.count; i += 1) {
-    const level = levelBelow(cell(track.phases, i - 1), search.maxima);
-    if (cell(track.phases, i) > level) continue;
-    const frequency = phaseCrossing(track, i, level, sampleAt);
-    const magnitude = realImpedance(prepared, search.maxima);
-    found.push({
-      order: found.length + 1,
-      frequency,
-      magnitude,
-      weak: magnitude > 1 / 3 && magnitude < 3,
-    });
+  for (let i = 1; i < track.count; i += 1) {
+    let level = levelBelow(track.phase(i - 1), search.maxima);
+    for (; track.phase(i) <= level && found.length < search.count; level -= 2 * Math.PI) {
+      const frequency = phaseCrossing(track, i, level, sampleAt);
+      const magnitude = realImpedance(prepared, search.maxima);
+      found.push({
+        order: found.length + 1,
+        frequency,
+        magnitude,
+        weak: magnitude > 1 / 3 && magnitude < 3,
+      });
+    }
   }
   return found;
 }
