@@ -18,14 +18,15 @@ const far = farSeries();
 /**
  * Writes F(x·e^{−jπ/4}); relative error below 1e-11.
  *
- * @param x - duct radius over the boundary layer's length, √(ωρ/η)·a or that times √Pr; no unit, > 0
- * @param out - where to write
- * @param at - index of the real part; the imaginary part follows
+ * @param out - where x stands, the duct's radius over the boundary layer's length, √(ωρ/η)·a or that times √Pr; no unit, > 0.
+ *   It is read from there because a number handed over would be put on the heap
+ * @param at - index of x, and of the real part then; the imaginary part follows
  * @returns nothing; the result is in `out`
  * @source C. Zwikker and C. W. Kosten, Sound Absorbing Materials (1949); Bessel functions by continued fraction and
  * by Hankel's asymptotic expansion
  */
-export function wallFunction(x: number, out: Float64Array, at: number): void {
+export function wallFunction(out: Float64Array, at: number): void {
+  const x = cell(out, at);
   let re = 0;
   let im = 0;
   if (x >= FAR) {

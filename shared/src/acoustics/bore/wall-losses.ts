@@ -58,8 +58,10 @@ export function writeDuct(cells: Cells, at: number, medium: number, radius: numb
     cells[at + 3] = 0;
     return;
   }
-  wallFunction(shear * radius, wall, 0);
-  wallFunction(cell(cells, medium + 3) * radius, wall, 2);
+  wall[0] = shear * radius;
+  wallFunction(wall, 0);
+  wall[2] = cell(cells, medium + 3) * radius;
+  wallFunction(wall, 2);
   // Zv = j·k·z0·P and Yt = j·k·Q/z0 with P = 1/(1 − F(friction)) and Q = 1 + (γ − 1)·F(heat).
   const fr = 1 - cell(wall, 0);
   const fi = -cell(wall, 1);

@@ -79,15 +79,34 @@ export function appendSeries(cells: Cells, at: number, re: number, im: number): 
 }
 
 /**
- * Puts a shunt admittance behind a two-port: flow that leaves through the wall.
+ * Puts a series reactance behind a two-port; it is read from the cells, for a number handed over would be put on the heap.
  *
- * @param cells - where the two-ports lie
+ * @param cells - where two-port and reactance lie
  * @param at - address of the two-port, replaced
- * @param re - real part of the admittance, m³/(Pa·s)
- * @param im - imaginary part
+ * @param from - address of the imaginary part of the impedance, Pa·s/m³
  * @returns nothing; the result is in the cells
  */
-export function appendShunt(cells: Cells, at: number, re: number, im: number): void {
+export function appendReactance(cells: Cells, at: number, from: number): void {
+  const im = cell(cells, from);
+  for (let row = at; row < at + TWO_PORT_CELLS; row += 4) {
+    const ar = cell(cells, row);
+    const ai = cell(cells, row + 1);
+    cells[row + 2] = cell(cells, row + 2) - ai * im;
+    cells[row + 3] = cell(cells, row + 3) + ar * im;
+  }
+}
+
+/**
+ * Puts a shunt admittance behind a two-port: flow that leaves through the wall.
+ *
+ * @param cells - where two-port and admittance lie
+ * @param at - address of the two-port, replaced
+ * @param from - address of the admittance, m³/(Pa·s)
+ * @returns nothing; the result is in the cells
+ */
+export function appendShunt(cells: Cells, at: number, from: number): void {
+  const re = cell(cells, from);
+  const im = cell(cells, from + 1);
   for (let row = at; row < at + TWO_PORT_CELLS; row += 4) {
     const br = cell(cells, row + 2);
     const bi = cell(cells, row + 3);

@@ -3,7 +3,7 @@ import { writeCone } from '../bore/cone.ts';
 import { writeCylinder } from '../bore/cylinder.ts';
 import {
   TWO_PORT_CELLS,
-  appendSeries,
+  appendReactance,
   appendTwoPort,
   prependReactance,
   prependSusceptance,
@@ -112,7 +112,7 @@ export function tuneHoleBranch(cells: Cells, branch: HoleBranch, outside: number
   const reactance = cell(cells, medium) * cell(cells, medium + 1);
   const series = reactance * shape.halfSeries;
   cells[branch.series] = series;
-  if (branch.shift !== 0) tuneShift(cells, branch, series);
+  if (branch.shift !== 0) tuneShift(cells, branch);
   writeSlices(cells, inside, branch.chimney);
   prependReactance(cells, inside, reactance * shape.inner);
   if (branch.closed) {
@@ -170,11 +170,11 @@ export function writeSlice(cells: Cells, at: number, slice: Slice): void {
   else writeCylinder(cells, at, slice.duct, cell(cells, slice.at + 2));
 }
 
-function tuneShift(cells: Cells, branch: HoleBranch, series: number): void {
+function tuneShift(cells: Cells, branch: HoleBranch): void {
   writeCylinder(cells, branch.before, branch.shiftDuct, branch.shift);
-  appendSeries(cells, branch.before, 0, series);
+  appendReactance(cells, branch.before, branch.series);
   writeIdentity(cells, branch.after);
-  appendSeries(cells, branch.after, 0, series);
+  appendReactance(cells, branch.after, branch.series);
   writeCylinder(cells, SCRATCH, branch.shiftDuct, -branch.shift);
   appendTwoPort(cells, branch.after, SCRATCH);
 }

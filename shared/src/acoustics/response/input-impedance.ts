@@ -1,7 +1,7 @@
 import { cell, type Cells } from '../complex/cells.ts';
 import {
   TWO_PORT_CELLS,
-  appendSeries,
+  appendReactance,
   appendShunt,
   appendTwoPort,
   copyTwoPort,
@@ -66,7 +66,7 @@ function gatherNodes(prepared: PreparedColumn, fingering: FingeringBranches): vo
     if (branch === undefined) continue;
     appendHalfSeries(cells, at, branch, branch.before);
     if (branch.closed) {
-      appendShunt(cells, at, cell(cells, branch.shunt), cell(cells, branch.shunt + 1));
+      appendShunt(cells, at, branch.shunt);
     } else {
       system.branch[nodes] = place;
       system.opening[nodes] = h;
@@ -112,7 +112,7 @@ function keepReactance(cells: Cells, at: number, least: number): void {
 }
 
 function appendHalfSeries(cells: Cells, at: number, branch: HoleBranch, shifted: number): void {
-  if (branch.shift === 0) appendSeries(cells, at, 0, cell(cells, branch.series));
+  if (branch.shift === 0) appendReactance(cells, at, branch.series);
   else appendTwoPort(cells, at, shifted);
 }
 

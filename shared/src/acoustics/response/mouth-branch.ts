@@ -1,6 +1,7 @@
 import { cell, type Cells } from '../complex/cells.ts';
 import {
   TWO_PORT_CELLS,
+  appendReactance,
   appendSeries,
   appendShunt,
   appendTwoPort,
@@ -15,7 +16,7 @@ import { windowEnd, windowImpedance, type WindowEnd } from '../mouth-end/window.
 import { selfRadiation } from '../radiation/cylinder-radiation.ts';
 import { NODE_COMPLIANCE_RATIO } from '../tone-hole/node-compliance.ts';
 import type { BorePlan, Slice } from './bore-plan.ts';
-import { planChimney, writeSlices } from './hole-branch.ts';
+import { SCRATCH, planChimney, writeSlices } from './hole-branch.ts';
 import { boreBetween, type Column, type ColumnMouth } from './column.ts';
 import { holeShape, type HoleShape } from './hole-shape.ts';
 
@@ -163,7 +164,9 @@ export function tuneMouthBranch(cells: Cells, branch: MouthBranch, outside: numb
     tuneEmbouchure(cells, branch, embouchure, outside);
   } else if (branch.end.kind === 'reed') {
     const { volume, scale } = branch.end;
-    appendShunt(cells, twoPort, 0, (reedSusceptance(k, volume * scale, 1) * Math.PI) / rhoC);
+    cells[SCRATCH] = 0;
+    cells[SCRATCH + 1] = (reedSusceptance(k, volume * scale, 1) * Math.PI) / rhoC;
+    appendShunt(cells, twoPort, SCRATCH);
   }
 }
 
@@ -189,9 +192,9 @@ function tuneEmbouchure(cells: Cells, branch: MouthBranch, parts: Embouchure, ou
   cells[outlet + 1] = outer * parts.lip + body * cell(end, 0);
   appendSeries(cells, twoPort, cell(cells, outlet), cell(cells, outlet + 1));
   appendTwoPort(cells, twoPort, chimneyTwoPort);
-  appendSeries(cells, twoPort, 0, cell(cells, parts.inner));
-  appendShunt(cells, twoPort, cell(cells, parts.side), cell(cells, parts.side + 1));
-  appendSeries(cells, twoPort, 0, cell(cells, parts.series));
+  appendReactance(cells, twoPort, parts.inner);
+  appendShunt(cells, twoPort, parts.side);
+  appendReactance(cells, twoPort, parts.series);
 }
 
 // Admittance beside the bore: the stopper's cavity, shut at its far end, and the node's compliance.
