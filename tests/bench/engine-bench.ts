@@ -1,13 +1,17 @@
 import { execFileSync } from 'node:child_process';
 import { complex, cosh, divide, multiply, add, sinh, type Complex } from 'mathjs';
 import { designSensitivities } from '#shared/analysis/design-sensitivities.ts';
+import { coupledImpedance } from '#shared/acoustics/response/input-impedance.ts';
+import { tuneColumn } from '#shared/acoustics/response/prepared-column.ts';
 import { predictDesign } from '#shared/analysis/predict-design.ts';
+import { prepareDesign } from '#shared/analysis/prepare-design.ts';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { whistleDocument } from '../support/whistle-document.ts';
 import { figureOf, type Figure } from './figure.ts';
 
 const CHART_RUNS = 300;
 const HEAP_CHARTS = 2000;
+const EVALUATIONS = 10_000;
 
 /** Figures of the engine: chart warm and cold, derivatives, scaling, heap, and a plain computation to compare with. */
 export async function measureEngine(): Promise<Record<string, unknown>> {
@@ -20,6 +24,7 @@ export async function measureEngine(): Promise<Record<string, unknown>> {
     sensitivities: sensitivities(document),
     scaling: scaling(),
     heapBytesPer10000Charts: heapGrowth(document),
+    heapBytesPer10000Frequencies: heapOfEvaluations(document),
     plainComputation: await plainComputation(warm),
   };
 }
@@ -81,8 +86,11 @@ function withHoles(count: number): DesignDocument {
     diameterMm: 4,
     positionMm: 100 + (150 * i) / count,
   }));
-  const covered = holes.map(({ id }) => id).slice(0, count >> 1);
-  return { ...base, holes, fingerings: base.fingerings.map((fingering) => ({ ...fingering, covered })) };
+  // From all covered to none: equal fingerings would be worked out but once.
+  const covered = (i: number) =>
+    holes.map(({ id }) => id).slice(0, Math.round(count * (1 - i / (base.fingerings.length - 1))));
+  const fingerings = base.fingerings.map((fingering, i) => ({ ...fingering, covered: covered(i) }));
+  return { ...base, holes, fingerings };
 }
 
 function withStations(count: number): DesignDocument {
@@ -95,14 +103,37 @@ function withStations(count: number): DesignDocument {
   return { ...base, bore: { stations } };
 }
 
+/** Every way to cover six holes, then the same with one of the open ones half-covered: no two are equal. */
 function withFingerings(count: number): DesignDocument {
   const base = whistleDocument();
+  const [pattern] = base.fingerings;
+  if (pattern === undefined) throw new Error('The whistle has fingerings.');
   const fingerings = Array.from({ length: count }, (_, i) => {
-    const pattern = base.fingerings[i % base.fingerings.length];
-    if (pattern === undefined) throw new Error('The whistle has fingerings.');
-    return { ...pattern, id: `f${i}` };
+    const open = base.holes.filter((_hole, h) => ((i % 64) >> h) % 2 === 0).map(({ id }) => id);
+    const covered = base.holes.map(({ id }) => id).filter((id) => !open.includes(id));
+    const half =
+      i < 64 ? [] : open.slice(0, 1).map((hole) => ({ hole, fraction: 0.5, from: 'side' as const }));
+    return { ...pattern, id: `f${i}`, covered, half };
   });
   return { ...base, fingerings };
+}
+
+/** Bytes taken from the heap, none given back, while a column is set to ten thousand frequencies and solved at each. */
+function heapOfEvaluations(document: DesignDocument): number | null {
+  const { gc } = globalThis as { gc?: () => void };
+  if (gc === undefined) return null;
+  const { prepared, fingerings } = prepareDesign(document);
+  const evaluate = () => {
+    for (let i = 0; i < EVALUATIONS; i += 1) {
+      tuneColumn(prepared, 200 + (i % 1000), true);
+      for (const fingering of fingerings) coupledImpedance(prepared, fingering);
+    }
+  };
+  evaluate();
+  gc();
+  const before = process.memoryUsage().heapUsed;
+  evaluate();
+  return process.memoryUsage().heapUsed - before;
 }
 
 /** Bytes of heap that stay after many charts, scaled to ten thousand. */
