@@ -31,7 +31,7 @@ export interface Studies {
     answer: WiderHere[];
   };
   impedance: {
-    ask: { document: DesignDocument; fingering: string; toHz: number };
+    ask: { document: DesignDocument; fingering: string; toHz: number; coupling: boolean };
     answer: ImpedanceCurve;
   };
   transform: {
@@ -43,6 +43,7 @@ export interface Studies {
       document: DesignDocument;
       fingering: string;
       resonances: readonly { mode: number; frequencyHz: number }[];
+      coupling: boolean;
     };
     answer: Ribbon[];
   };

@@ -18,18 +18,19 @@ const CURVE_POINTS = 900;
 const studies: { [Kind in StudyKind]: (ask: Studies[Kind]['ask']) => Studies[Kind]['answer'] } = {
   prediction: ({ document, options = {} }) => predictDesign(document, options),
   'wider-here': ({ document, fingerings }) => widerHere(document, fingerings),
-  impedance: ({ document, fingering, toHz }) =>
-    impedanceCurve(document, fingering, {
-      fromHz: CURVE_FROM_HZ,
-      toHz,
-      stepHz: (toHz - CURVE_FROM_HZ) / CURVE_POINTS,
-    }),
+  impedance: ({ document, fingering, toHz, coupling }) =>
+    impedanceCurve(
+      document,
+      fingering,
+      { fromHz: CURVE_FROM_HZ, toHz, stepHz: (toHz - CURVE_FROM_HZ) / CURVE_POINTS },
+      coupling,
+    ),
   transform: ({ document, order }) => transformDesign(document, order),
-  ribbons: ({ document, fingering, resonances }) =>
+  ribbons: ({ document, fingering, resonances, coupling }) =>
     resonances.map(({ mode, frequencyHz }) => ({
       mode,
       frequencyHz,
-      points: standingWave(document, fingering, frequencyHz, RIBBON_POINTS),
+      points: standingWave(document, fingering, { frequencyHz, points: RIBBON_POINTS, coupling }),
     })),
 };
 

@@ -138,7 +138,7 @@ describe('standingWave', () => {
   function wave(mouth: 'ideal-open' | 'ideal-closed', mode: number): number[] {
     const document = tube({ mouth });
     const frequency = ladder({ mouth })[mode - 1] ?? NaN;
-    const points = standingWave(document, 'all', frequency, 241);
+    const points = standingWave(document, 'all', { frequencyHz: frequency, points: 241 });
     expect(points[0]?.positionMm).toBeCloseTo(0, 6);
     expect(points.at(-1)?.positionMm).toBeCloseTo(LENGTH_MM, 6);
     return points.map(({ pressure }) => pressure);

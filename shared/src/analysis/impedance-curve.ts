@@ -21,21 +21,31 @@ export function impedanceCurve(
   document: DesignDocument,
   fingeringId: string,
   range: FrequencyRange,
+  coupling = true,
 ): ImpedanceCurve {
   requireFingering(document, fingeringId);
   const only = document.fingerings.filter((fingering) => fingering.id === fingeringId);
-  const [curve] = impedanceCurves({ ...document, fingerings: only }, range);
+  const [curve] = impedanceCurves({ ...document, fingerings: only }, range, coupling);
   return curve ?? { fingering: fingeringId, points: [] };
 }
 
-/** Input impedance of every fingering; the column is set to each frequency once for all of them. */
-export function impedanceCurves(document: DesignDocument, range: FrequencyRange): ImpedanceCurve[] {
+/**
+ * Input impedance of every fingering; the column is set to each frequency once for all of them.
+ *
+ * @param coupling - false: openings do not hear each other; for comparison only
+ */
+export function impedanceCurves(
+  document: DesignDocument,
+  range: FrequencyRange,
+  coupling = true,
+): ImpedanceCurve[] {
   const frequencies = frequenciesOf(range);
   const { prepared, fingerings } = prepareDesign(document);
   const curves = document.fingerings.map(({ id }): ImpedanceCurve => ({ fingering: id, points: [] }));
   const unit = prepared.inputImpedance;
   for (const frequencyHz of frequencies) {
-    tuneColumn(prepared, frequencyHz, true);
+    // A fresh column's mutual impedances are 0 until they are worked out.
+    tuneColumn(prepared, frequencyHz, coupling);
     fingerings.forEach((fingering, i) => {
       const at = coupledImpedance(prepared, fingering);
       const re = cell(prepared.cells, at) / unit;

@@ -11,6 +11,13 @@ export interface StandingWavePoint {
   pressure: number;
 }
 
+export interface StandingWaveQuestion {
+  frequencyHz: number;
+  points: number;
+  /** False: openings do not hear each other; for comparison only. */
+  coupling?: boolean;
+}
+
 /**
  * Pressure along the bore for a fingering at a frequency, mouth side first, at about as many points as asked for.
  *
@@ -19,14 +26,17 @@ export interface StandingWavePoint {
 export function standingWave(
   document: DesignDocument,
   fingeringId: string,
-  frequencyHz: number,
-  points: number,
+  { frequencyHz, points, coupling = true }: StandingWaveQuestion,
 ): StandingWavePoint[] {
   const index = requireFingering(document, fingeringId);
   const { column, states } = toColumn(document);
   const { prepared, fingerings } = prepareColumn(withPoints(column, points), [states[index] ?? []]);
   const foot = column.bore.at(-1)?.position ?? 0;
-  const wave = pressureAlongBore(prepared, fingerings[0] ?? new Int32Array(0), frequencyHz, foot);
+  const wave = pressureAlongBore(prepared, fingerings[0] ?? new Int32Array(0), {
+    frequency: frequencyHz,
+    foot,
+    coupling,
+  });
   const largest = Math.max(...wave.map((point) => point.pressure));
   return wave
     .map(({ position, pressure }) => ({ positionMm: position * 1000, pressure: pressure / largest }))

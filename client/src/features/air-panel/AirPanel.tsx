@@ -39,11 +39,12 @@ export function AirPanel({ sound, predictionOptions, onChoosePredictionOptions, 
     () => (predicted === null ? [] : predicted.ladder.slice(0, RIBBONS)),
     [predicted],
   );
+  const { coupling } = predictionOptions;
   const ribbons = useStudy(
     'ribbons',
     useMemo(
-      () => (predicted === null ? null : { document, fingering: predicted.id, resonances }),
-      [document, predicted, resonances],
+      () => (predicted === null ? null : { document, fingering: predicted.id, resonances, coupling }),
+      [document, predicted, resonances, coupling],
     ),
   );
   const zone = zoneOf(geometry);
@@ -75,6 +76,7 @@ export function AirPanel({ sound, predictionOptions, onChoosePredictionOptions, 
           {predicted !== null && (
             <ResonanceDrawing
               document={document}
+              coupling={coupling}
               predicted={predicted}
               maxima={playsMaxima(document.mouthEnd.kind)}
               hasGhosts={hasGhosts}

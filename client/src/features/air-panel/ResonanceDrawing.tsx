@@ -15,6 +15,8 @@ import {
 interface ResonanceDrawingProps {
   document: DesignDocument;
   predicted: FingeringPrediction;
+  /** False where openings are drawn as if they did not hear each other. */
+  coupling: boolean;
   maxima: boolean;
   hasGhosts: boolean;
   mode: number;
@@ -35,7 +37,7 @@ const HEADROOM = 1.06;
 
 /** The input impedance lying on its side, and the ladder standing on the same frequencies. */
 export function ResonanceDrawing(props: ResonanceDrawingProps) {
-  const { document, predicted, maxima, width } = props;
+  const { document, predicted, coupling, maxima, width } = props;
   const ghosts = useMemo(() => ghostsOf(predicted, maxima), [predicted, maxima]);
   const highest = [...predicted.ladder, ...ghosts].reduce(
     (most, { frequencyHz }) => Math.max(most, frequencyHz),
@@ -45,7 +47,10 @@ export function ResonanceDrawing(props: ResonanceDrawingProps) {
   const toHz = Math.ceil((highest * HEADROOM) / 100) * 100;
   const curve = useStudy(
     'impedance',
-    useMemo(() => ({ document, fingering: predicted.id, toHz }), [document, predicted.id, toHz]),
+    useMemo(
+      () => ({ document, fingering: predicted.id, toHz, coupling }),
+      [document, predicted.id, toHz, coupling],
+    ),
   );
   const points = useMemo(() => (curve.answer === null ? [] : curveInDecibels(curve.answer)), [curve.answer]);
   const y = scaleLinear([0, toHz], [BOTTOM, TOP]);

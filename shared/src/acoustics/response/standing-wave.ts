@@ -14,22 +14,30 @@ export interface PressurePoint {
   pressure: number;
 }
 
+export interface Wave {
+  frequency: number;
+  foot: number;
+  coupling: boolean;
+}
+
 /**
  * Pressure along the bore at one frequency, from the foot to the input, at the ends of all slices.
  *
- * @param prepared - the column; put points into its bore where the pressure is wanted
+ * @param prepared - the column, freshly prepared; put points into its bore where the pressure is wanted
  * @param fingering - its branches
- * @param frequency - Hz, > 0
- * @param foot - position of the foot, m
+ * @param wave - what is asked
+ * @param wave.frequency - Hz, > 0
+ * @param wave.foot - position of the foot, m
+ * @param wave.coupling - false: openings do not hear each other
  * @returns the points, foot first
  */
 export function pressureAlongBore(
   prepared: PreparedColumn,
   fingering: FingeringBranches,
-  frequency: number,
-  foot: number,
+  { frequency, foot, coupling }: Wave,
 ): PressurePoint[] {
-  tuneColumn(prepared, frequency, true);
+  // A fresh column's mutual impedances are 0 until they are worked out.
+  tuneColumn(prepared, frequency, coupling);
   coupledImpedance(prepared, fingering);
   const { cells, segments, branches, system } = prepared;
   const points: PressurePoint[] = [];
