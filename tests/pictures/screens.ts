@@ -53,8 +53,8 @@ const FRAME: readonly Screen[] = [
 ];
 
 const WORKBENCH: readonly Screen[] = [
-  { name: 'bench-holes', ...bench('holes', '?hole=4&note=G5'), ready: figures },
-  { name: 'bench-holes-idle', ...bench('holes'), ready: figures },
+  { name: 'bench-holes', ...bench('holes', '?hole=4&note=G5'), ready: sizesAndCents },
+  { name: 'bench-holes-idle', ...bench('holes'), ready: sizesAndCents },
   { name: 'bench-bore', ...bench('bore'), ready: figures },
   { name: 'bench-notes', ...bench('notes', '?note=G5'), ready: figures },
   { name: 'bench-air', ...bench('air', '?note=D5'), ready: drawnAir },
@@ -112,6 +112,12 @@ async function pasteMeasured(page: Page): Promise<void> {
   await page.getByRole('textbox', { name: 'Table of measurements' }).fill(table);
   await page.getByRole('button', { name: /^Use these \d+ station/ }).waitFor();
   await hung(page);
+}
+
+/** Last of all come the cents of a small step. */
+async function sizesAndCents(page: Page): Promise<void> {
+  await hung(page);
+  await page.getByRole('row', { name: /^Wider .* [+−]\d/ }).waitFor();
 }
 
 async function drawnAir(page: Page): Promise<void> {
