@@ -96,6 +96,22 @@ describe('both ends of the instrument', () => {
     await expect.poll(() => spoken(holeButton(page, 4))).toBe(hole);
   });
 
+  test('the foot is pulled out past the edge of the drawing, and every figure follows', async ({ page }) => {
+    await signInThroughPage(page, 'maker');
+    await openWhistle(page);
+    const foot = page.getByRole('button', { name: /^Foot, / });
+    const lengthMm = async () => Number(/[\d.]+/.exec((await spoken(foot)) ?? '')?.[0]);
+    const before = await lengthMm();
+    const hole = await spoken(holeButton(page, 6));
+
+    await drag(page, foot, 90);
+    await expect.poll(lengthMm).toBeGreaterThan(before + 10);
+    await expect.poll(async () => centsOf(await spoken(holeButton(page, 6)))).not.toBe(centsOf(hole));
+    await page.keyboard.press('Control+Z');
+    await expect.poll(lengthMm).toBe(before);
+    await expect.poll(() => spoken(holeButton(page, 6))).toBe(hole);
+  });
+
   test('the foot is trimmed by the keys alone', async ({ page }) => {
     await signInThroughPage(page, 'maker');
     await openWhistle(page);

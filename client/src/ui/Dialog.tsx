@@ -1,5 +1,5 @@
 import { Dialog as Radix } from 'radix-ui';
-import type { ReactNode } from 'react';
+import { useRef, type ReactNode } from 'react';
 
 interface DialogProps {
   title: string;
@@ -26,6 +26,7 @@ export function Dialog({
   width = 'narrow',
   children,
 }: DialogProps) {
+  const cameFrom = useRef<HTMLElement | null>(null);
   const hold = (event: Event) => {
     if (!dismissible) event.preventDefault();
   };
@@ -34,6 +35,15 @@ export function Dialog({
       <Radix.Portal>
         <Radix.Overlay className="bg-scrim fixed inset-0 z-40" />
         <Radix.Content
+          onOpenAutoFocus={() => {
+            const { activeElement } = document;
+            cameFrom.current = activeElement instanceof HTMLElement ? activeElement : null;
+          }}
+          // Most dialogs here come by themselves: nothing was pressed that Radix could give the focus back to.
+          onCloseAutoFocus={(event) => {
+            event.preventDefault();
+            cameFrom.current?.focus();
+          }}
           onEscapeKeyDown={hold}
           onPointerDownOutside={hold}
           onInteractOutside={hold}

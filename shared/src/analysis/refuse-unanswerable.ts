@@ -1,6 +1,7 @@
 import { EngineInputError } from '../acoustics/engine-input-error.ts';
 import { holeShape } from '../acoustics/response/hole-shape.ts';
 import type { DesignDocument } from '../document/design-document.ts';
+import { holeTitle } from '../document/hole-labels.ts';
 import type { DesignColumn } from './to-column.ts';
 
 /** Names that formulas give what they refuse, and the document's keys for them. */
@@ -33,19 +34,20 @@ export function refuseUnanswerableHoles(document: DesignDocument, design: Design
       );
     }
     for (const state of [{ kind: 'open' }, { kind: 'closed' }] as const) {
-      answering(`holes.${place}`, HOLE_KEYS, () => holeShape(hole, state));
+      const named = `${holeTitle(document, source?.id ?? '')}: `;
+      answering(`holes.${place}`, HOLE_KEYS, () => holeShape(hole, state), named);
     }
   });
 }
 
-/** Runs a computation and gives what it refuses the document's name. */
-export function answering<T>(path: string, keys: Record<string, string>, compute: () => T): T {
+/** Runs a computation and gives what it refuses the document's name; `named` stands before its sentence. */
+export function answering<T>(path: string, keys: Record<string, string>, compute: () => T, named = ''): T {
   try {
     return compute();
   } catch (error) {
     if (!(error instanceof EngineInputError)) throw error;
     const key = keys[error.field] ?? error.field;
-    throw new EngineInputError(`${path}.${key}`, error.value, error.message);
+    throw new EngineInputError(`${path}.${key}`, error.value, named + error.message);
   }
 }
 

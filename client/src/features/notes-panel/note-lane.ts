@@ -59,7 +59,8 @@ export function notesLayout(geometry: BenchGeometry): NotesLayout {
     remarkX: remarkPlace(columns, widthPx),
     isStacked,
     rowHeight,
-    tapSize: Math.min(leastGap(columns), rowHeight),
+    // Before the page is laid out columns may lie on one another.
+    tapSize: Math.max(8, Math.min(leastGap(columns), rowHeight)),
   };
 }
 

@@ -1,4 +1,4 @@
-import type { KeyboardEvent } from 'react';
+import { useState, type KeyboardEvent } from 'react';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import { boreEnds, fromFootMm } from '#shared/document/profile.ts';
 import { printLength } from '#shared/lengths/print-length.ts';
@@ -26,12 +26,17 @@ interface End {
 /** Grips for mouth end, stopper and foot, on the bore's axis in the section. */
 export function EndGrips(props: EndGripsProps) {
   const { frame } = props.geometry;
+  // What is in the hand stays, wherever it has been pulled: a grip that went away would never be let go.
+  const [held, setHeld] = useState<End['key'] | null>(null);
   return endsOf(props.document, props)
-    .filter(({ positionMm }) => {
+    .filter(({ key, positionMm }) => {
+      if (key === held) return true;
       const x = frame.x(positionMm);
       return x >= frame.viewLeft - 1 && x <= frame.viewRight + 1;
     })
-    .map((end) => <EndGrip key={end.key} end={end} {...props} />);
+    .map((end) => (
+      <EndGrip key={end.key} end={end} {...props} onHold={(isHeld) => setHeld(isHeld ? end.key : null)} />
+    ));
 }
 
 function endsOf(document: DesignDocument, { unit }: Pick<PanelProps, 'unit'>): End[] {
@@ -73,7 +78,12 @@ const stopperOf = ({ mouthEnd }: DesignDocument) => (mouthEnd.kind === 'embouchu
 /** One press of Alt and an arrow, mm; with Shift five times as much. */
 const STEP_MM = 0.1;
 
-function EndGrip({ end, ...props }: EndGripsProps & { end: End }) {
+interface EndGripProps extends EndGripsProps {
+  end: End;
+  onHold: (isHeld: boolean) => void;
+}
+
+function EndGrip({ end, ...props }: EndGripProps) {
   const { geometry, selection, readOnly, onSelect, onEdit } = props;
   const { frame } = geometry;
   const { measures, x } = frame;
@@ -86,6 +96,10 @@ function EndGrip({ end, ...props }: EndGripsProps & { end: End }) {
     label,
     moved: end.moved,
     isOrigin: end.key === 'mouth',
+    onDragging: (isDragging) => {
+      props.onHold(isDragging);
+      props.onDragging(isDragging);
+    },
   });
   const figure = useRestingValue(end.figure, props.isDragging);
   const isChosen = selection.hole === end.key;

@@ -2,6 +2,7 @@ import { useRef, type PointerEvent } from 'react';
 import type { DesignDocument } from '#shared/document/design-document.ts';
 import type { BenchFrame } from '../../bench/bench-geometry.ts';
 import type { BenchView } from '../../bench/bench-view.ts';
+import { drawnBody } from '../../bench/drawn-body.ts';
 import type { DesignEdit } from '../../bench/panel-props.ts';
 
 /** Ends drop on a tenth, as holes do. */
@@ -56,7 +57,7 @@ export function useEndDrag(options: EndDragOptions) {
     }
     const byMm = Math.round(alongPx / current.frame.pxPerMm / STEP_MM) * STEP_MM;
     const after = options.moved(current.start, byMm);
-    options.desk.setView(heldView(current.frame, options.isOrigin ? byMm : 0));
+    options.desk.setView(heldView(current.frame, after, options.isOrigin ? byMm : 0));
     options.onEdit({ label: options.label, change: () => after, mergeKey: current.mergeKey });
   };
   const onPointerUp = () => {
@@ -66,14 +67,24 @@ export function useEndDrag(options: EndDragOptions) {
     }
     drag.current = null;
   };
-  return { onPointerDown, onPointerMove, onPointerUp, onPointerCancel: onPointerUp };
+  return {
+    onPointerDown,
+    onPointerMove,
+    onPointerUp,
+    onPointerCancel: onPointerUp,
+    onLostPointerCapture: onPointerUp,
+  };
 }
 
-/** What was in view when the drag began, whatever has become of the instrument's length. */
-function heldView(frame: BenchFrame, originMovedMm: number): BenchView {
+/** What was in view when the drag began, wider where an end has been pulled out of it. */
+function heldView(frame: BenchFrame, after: DesignDocument, originMovedMm: number): BenchView {
+  const fromMm = frame.mm(frame.viewLeft) - originMovedMm;
+  const toMm = frame.mm(frame.viewRight) - originMovedMm;
+  const { headMm, footMm } = drawnBody(after);
+  const pulled = { head: headMm < frame.body.headMm - originMovedMm, foot: footMm > toMm };
   return {
     kind: 'stretch',
-    fromMm: frame.mm(frame.viewLeft) - originMovedMm,
-    toMm: frame.mm(frame.viewRight) - originMovedMm,
+    fromMm: pulled.head ? Math.min(fromMm, headMm) : fromMm,
+    toMm: pulled.foot ? footMm : toMm,
   };
 }

@@ -12,7 +12,7 @@ interface CompareMenuProps {
 export function CompareMenu({ places, refusal }: CompareMenuProps) {
   if (refusal !== null) {
     return (
-      <Button look="bare" className="px-2.5" disabled title={refusal}>
+      <Button look="bare" className="px-2.5 max-[899px]:hidden" disabled title={refusal}>
         Compare
       </Button>
     );
@@ -20,7 +20,7 @@ export function CompareMenu({ places, refusal }: CompareMenuProps) {
   return (
     <Menu
       trigger={
-        <Button look="bare" className="px-2.5">
+        <Button look="bare" className="px-2.5 max-[899px]:hidden">
           Compare
         </Button>
       }

@@ -38,8 +38,8 @@ export function DesignHeader({
   return (
     <>
       <TopBarFill>
-        <div className="flex min-w-0 items-baseline gap-x-3.5 max-[699px]:flex-col">
-          <h1 className="text-title max-[699px]:text-section truncate font-semibold">{name}</h1>
+        <div className="flex min-w-0 flex-1 items-baseline gap-x-3.5 max-[899px]:flex-col">
+          <h1 className="text-title max-[899px]:text-section max-w-full truncate font-semibold">{name}</h1>
           <StateTag state={state}>{`rev ${revision}`}</StateTag>
         </div>
         <span className="text-data ml-auto shrink-0 max-[699px]:hidden">{saveNote}</span>
