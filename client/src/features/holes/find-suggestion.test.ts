@@ -36,6 +36,7 @@ const request = {
   hole,
   fingering: 'f-g5',
   unit: 'mm',
+  bandCents: [5, 8, 15],
   predict: (changed: DesignDocument) => Promise.resolve(straight(changed)),
 } as const;
 
@@ -48,6 +49,26 @@ describe('findSuggestions', () => {
     expect(drill?.effects[0]?.after).toBeCloseTo(0, 6);
     expect(move?.mm).toBe(-1);
     expect(drill?.change(document).holes[3]?.diameterMm).toBeCloseTo(7.1, 6);
+  });
+
+  it('offers nothing that takes another note out of its band, and less where that is near', async () => {
+    const beside = (changed: DesignDocument): DesignPrediction => {
+      const now = straight(changed);
+      const moved = (now.fingerings[0]?.centsFromScale ?? 0) + 6;
+      return { ...now, fingerings: [now.fingerings[0]!, note('f-a5', 'A5', 2 + moved)] };
+    };
+    const predict = (changed: DesignDocument) => Promise.resolve(beside(changed));
+    const found = await findSuggestions({ ...request, prediction: beside(document), predict });
+    // A5 stands at 2 of the 5 cents allowed and moves along: 3 of the 6 cents can be had.
+    const drill = found.find(({ kind }) => kind === 'drill');
+    expect(drill?.effects.find(({ note: name }) => name === 'A5')?.after).toBeLessThanOrEqual(5);
+    expect(drill?.mm).toBeCloseTo(6.8, 6);
+  });
+
+  it('moves by whole hundredths of an inch for whoever measures so', async () => {
+    const found = await findSuggestions({ ...request, unit: 'inch' });
+    const move = found.find(({ kind }) => kind === 'move');
+    expect((move?.mm ?? NaN) / 25.4).toBeCloseTo(-0.03, 9);
   });
 
   it('offers nothing for a note that is true', async () => {

@@ -1,6 +1,8 @@
 import type { DesignPrediction } from '#shared/analysis/prediction.ts';
 import type { DesignDocument, ToneHole } from '#shared/document/design-document.ts';
+import { MM_PER_INCH } from '#shared/lengths/drills.ts';
 import type { LengthUnit } from '#shared/lengths/read-length.ts';
+import { bandOf } from '../../bench/band-of.ts';
 import { drillsFor } from '../../bench/drill-choice.ts';
 import { changeHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
 
@@ -25,12 +27,17 @@ interface Request {
   hole: ToneHole;
   fingering: string;
   unit: LengthUnit;
+  /** Half width of the band by register, cents. */
+  bandCents: readonly number[];
   predict: Predict;
 }
 
 /** Sizes tried on either side of the present one. */
 const TRIED = 7;
-const MOVES_MM = [-3, -2, -1, -0.5, 0.5, 1, 2, 3];
+const MOVES_MM: Record<LengthUnit, number[]> = {
+  mm: [-3, -2, -1, -0.5, 0.5, 1, 2, 3],
+  inch: [-0.1, -0.05, -0.03, -0.01, 0.01, 0.03, 0.05, 0.1].map((inches) => inches * MM_PER_INCH),
+};
 /** A change that helps less than this is not worth a drill, cents. */
 const LEAST_GAIN_CENTS = 0.5;
 /** Notes that move less than this are summed up in one figure, cents. */
@@ -55,7 +62,7 @@ export async function findSuggestions(request: Request): Promise<Suggestion[]> {
     mm: diameterMm,
     change: (before) => changeHole(before, hole.id, { diameterMm }),
   }));
-  const byMove = await best(request, MOVES_MM, (mm) => ({
+  const byMove = await best(request, MOVES_MM[unit], (mm) => ({
     kind: 'move',
     mm,
     change: (before) =>
@@ -75,19 +82,34 @@ async function best(
   values: readonly number[],
   trialOf: (value: number) => Trial,
 ): Promise<Suggestion | null> {
-  const { document, prediction, hole, fingering, predict } = request;
+  const { document, prediction, hole, fingering, bandCents, predict } = request;
   let found: { cost: number; suggestion: Suggestion } | null = null;
   const present = costOf(prediction, fingering);
   for (const value of values) {
     const trial = trialOf(value);
     const answer = await predict(trial.change(document));
-    if (answer === null) continue;
+    if (answer === null || spoilsAnother(prediction, answer, { fingering, bandCents })) continue;
     const cost = costOf(answer, fingering);
     if (cost < (found?.cost ?? present - LEAST_GAIN_CENTS)) {
       found = { cost, suggestion: { ...trial, hole: hole.id, ...effectsOf(prediction, answer, fingering) } };
     }
   }
   return found?.suggestion ?? null;
+}
+
+/** True where a note that hung within its band would leave it: mending one is not worth that. */
+function spoilsAnother(
+  before: DesignPrediction,
+  after: DesignPrediction,
+  { fingering, bandCents }: Pick<Request, 'fingering' | 'bandCents'>,
+): boolean {
+  return before.fingerings.some(({ id, register, centsFromScale }) => {
+    const band = bandOf(bandCents, register);
+    const isWithin = centsFromScale !== null && Math.abs(centsFromScale) <= band;
+    if (id === fingering || !isWithin) return false;
+    const now = after.fingerings.find((other) => other.id === id)?.centsFromScale ?? null;
+    return now === null || Math.abs(now) > band;
+  });
 }
 
 /** The chosen note counts in full, each other by half, so that mending one does not spoil its neighbours. */

@@ -24,7 +24,7 @@ interface Tried {
 
 /** Looks for suggestions, tries them as ordinary edits, and puts the last one back as long as nothing else changed. */
 export function useSuggestionDesk(props: PanelProps, isDragging: boolean): SuggestionDesk {
-  const { document, prediction, selection, unit, readOnly, onEdit } = props;
+  const { document, prediction, selection, unit, bandCents, readOnly, onEdit } = props;
   const [tried, setTried] = useState<Tried | null>(null);
   const fingering = useMemo(() => {
     const notes = hungNotes(document, prediction);
@@ -38,6 +38,7 @@ export function useSuggestionDesk(props: PanelProps, isDragging: boolean): Sugge
     hole: selection.hole,
     fingering,
     unit,
+    bandCents,
     isResting: isDragging || readOnly !== null,
   });
   const titleOf = (id: string) => labelledHoles(document).find(({ hole }) => hole.id === id)?.title ?? 'hole';

@@ -11,6 +11,7 @@ interface SuggestionRequest {
   hole: string | null;
   fingering: string | null;
   unit: LengthUnit;
+  bandCents: readonly number[];
   /** Nothing is looked for while a hole is in hand, or where nothing may be changed. */
   isResting: boolean;
 }
@@ -27,7 +28,7 @@ const LOOK_AFTER_MS = 200;
 
 /** Suggestions for the chosen note and hole, best first; null while they are looked for. */
 export function useSuggestions(request: SuggestionRequest): Suggestion[] | null {
-  const { document, prediction, hole: holeId, fingering, unit, isResting } = request;
+  const { document, prediction, hole: holeId, fingering, unit, bandCents, isResting } = request;
   const engine = useRef<RunningEngine | null>(null);
   const [answer, setAnswer] = useState<Answer | null>(null);
 
@@ -51,7 +52,8 @@ export function useSuggestions(request: SuggestionRequest): Suggestion[] | null 
         const result = await remote.predict(changed, { coupling: true });
         return result.status === 'predicted' ? result.prediction : null;
       };
-      void findSuggestions({ document, prediction, hole, fingering, unit, predict }).then((suggestions) => {
+      const asked = { document, prediction, hole, fingering, unit, bandCents, predict };
+      void findSuggestions(asked).then((suggestions) => {
         if (isWanted) setAnswer({ document, fingering, hole: hole.id, suggestions });
       }, reportError);
     }, LOOK_AFTER_MS);
@@ -59,7 +61,7 @@ export function useSuggestions(request: SuggestionRequest): Suggestion[] | null 
       isWanted = false;
       clearTimeout(timer);
     };
-  }, [document, prediction, holeId, fingering, unit, isResting]);
+  }, [document, prediction, holeId, fingering, unit, bandCents, isResting]);
 
   const isCurrent =
     answer !== null &&
