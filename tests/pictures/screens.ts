@@ -60,7 +60,12 @@ const WORKBENCH: readonly Screen[] = [
   { name: 'bench-air', ...bench('air', '?note=D5'), ready: drawnAir },
   { name: 'bench-measured-empty', ...bench('bore'), ready: openMeasured },
   { name: 'bench-measured', ...bench('bore'), ready: pasteMeasured },
-  { name: 'bench-readonly', ...bench('holes', '?hole=4'), role: 'visitor', ready: heading(WHISTLE) },
+  {
+    name: 'bench-not-shared',
+    role: 'visitor',
+    path: () => '/designs/1',
+    ready: heading(/nothing on this peg/),
+  },
   { name: 'bench-no-line', ...bench('holes', '?hole=5'), ready: loseLine },
   { name: 'bench-sign-in-lost', ...bench('holes', '?hole=5'), ready: loseSignIn },
 ];

@@ -58,7 +58,7 @@ export function InstrumentStrip(props: InstrumentStripProps) {
       ref={strip}
       role="group"
       aria-label="Instrument"
-      className="relative touch-pan-y"
+      className="relative touch-pan-y overflow-x-clip"
       style={{ height: frame.measures.stripHeight }}
     >
       <svg
