@@ -19,9 +19,9 @@ function setting(name: string): string {
 }
 
 async function measureInBrowser(databaseUrl: string): Promise<Record<string, Figure>> {
-  const app = await startApp({ databaseUrl, clientFolder: setting('BENCH_CLIENT') });
+  const app = await startApp({ databaseUrl, clientFolder: setting('BUILT_CLIENT') });
   const browser = await chromium.launch({
-    executablePath: setting('BENCH_CHROMIUM'),
+    executablePath: setting('CHROMIUM'),
     args: [...CHROMIUM_FLAGS, ...NO_FRAME_LIMIT],
   });
   try {

@@ -11,8 +11,8 @@ import { SCREENS, type Screen } from './screens.ts';
 const environment = z
   .object({
     TEST_DATABASE_URL: z.string(),
-    PICTURES_CLIENT: z.string(),
-    PICTURES_CHROMIUM: z.string(),
+    BUILT_CLIENT: z.string(),
+    CHROMIUM: z.string(),
     PICTURES_FOLDER: z.string(),
   })
   .parse(process.env);
@@ -49,10 +49,10 @@ const visits: Visit[] = chosen.flatMap((screen) =>
 
 const app = await startApp({
   databaseUrl: environment.TEST_DATABASE_URL,
-  clientFolder: environment.PICTURES_CLIENT,
+  clientFolder: environment.BUILT_CLIENT,
 });
 const browser = await chromium.launch({
-  executablePath: environment.PICTURES_CHROMIUM,
+  executablePath: environment.CHROMIUM,
   args: CHROMIUM_FLAGS,
 });
 const faults: string[] = [];

@@ -5,9 +5,8 @@ import { labelledHoles } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../bench/panel-props.ts';
 import type { Comparison } from '../features/compare/comparison.ts';
 import { OldOutline } from '../features/compare/OldOutline.tsx';
-import { BodyDrawing } from '../features/strip/BodyDrawing.tsx';
+import { DrawnInstrument } from '../features/strip/DrawnInstrument.tsx';
 import { HoleButtons } from '../features/strip/HoleButtons.tsx';
-import { HoleDrawing } from '../features/strip/HoleDrawing.tsx';
 import { StripLabels } from '../features/strip/StripLabels.tsx';
 
 interface CompareStripProps {
@@ -40,30 +39,7 @@ export function CompareStrip({ bench, comparison }: CompareStripProps) {
         className="block overflow-visible"
         aria-hidden="true"
       >
-        <clipPath id="bench-view">
-          <rect x={frame.viewLeft} width={frame.viewRight - frame.viewLeft + 2} height="400" />
-        </clipPath>
-        {chosen !== undefined && (
-          <rect
-            x={chosen.holeX - frame.measures.columnReach + 3}
-            width={frame.measures.columnReach * 2 - 6}
-            height={frame.measures.stripHeight}
-            className="bench-column"
-          />
-        )}
-        <BodyDrawing frame={frame} shape={shape} unit={unit} />
-        <g clipPath="url(#bench-view)">
-          {holes.map(({ hole, label }) => (
-            <HoleDrawing
-              key={hole.id}
-              frame={frame}
-              shape={shape}
-              hole={hole}
-              label={label}
-              isChosen={hole.id === selection.hole}
-            />
-          ))}
-        </g>
+        <DrawnInstrument frame={frame} shape={shape} holes={holes} unit={unit} chosen={chosen} />
         {comparison !== null && (
           <OldOutline
             frame={frame}

@@ -6,8 +6,7 @@ import { benchFrame } from '../bench/bench-geometry.ts';
 import { WHOLE } from '../bench/bench-view.ts';
 import { drawnBody } from '../bench/drawn-body.ts';
 import { labelledHoles } from '#shared/document/hole-labels.ts';
-import { BodyDrawing } from '../features/strip/BodyDrawing.tsx';
-import { HoleDrawing } from '../features/strip/HoleDrawing.tsx';
+import { DrawnInstrument } from '../features/strip/DrawnInstrument.tsx';
 import { useElementWidth } from '../ui/use-element-width.ts';
 
 interface NewDesignStripProps {
@@ -40,17 +39,7 @@ function Strip({ document, unit, widthPx }: NewDesignStripProps & { widthPx: num
         aria-label={`${document.name}, ${document.holes.length} holes, drawn to scale`}
         className="block"
       >
-        <BodyDrawing frame={frame} shape={document} unit={unit} />
-        {labelledHoles(document).map(({ hole, label }) => (
-          <HoleDrawing
-            key={hole.id}
-            frame={frame}
-            shape={document}
-            hole={hole}
-            label={label}
-            isChosen={false}
-          />
-        ))}
+        <DrawnInstrument frame={frame} shape={document} holes={labelledHoles(document)} unit={unit} />
       </svg>
     </>
   );

@@ -42,7 +42,7 @@ describe('thinStations', () => {
     );
   });
 
-  it('keeps as few stations as any choice could', () => {
+  it('keeps no more stations than the best choice does', () => {
     fc.assert(
       fc.property(fc.array(hundredths, { minLength: 2, maxLength: 10 }), within, (diameters, withinMm) => {
         const places = stationsOf(diameters);

@@ -7,10 +7,9 @@ import { snapToDrill } from '../../bench/drill-choice.ts';
 import { addHole, snapPosition, widestHoleMm } from '../../bench/hole-edits.ts';
 import { labelledHoles } from '#shared/document/hole-labels.ts';
 import type { PanelProps } from '../../bench/panel-props.ts';
-import { BodyDrawing } from './BodyDrawing.tsx';
+import { DrawnInstrument } from './DrawnInstrument.tsx';
 import { EndGrips } from './EndGrips.tsx';
 import { HoleButtons } from './HoleButtons.tsx';
-import { HoleDrawing } from './HoleDrawing.tsx';
 import { PlaceSpot } from './PlaceSpot.tsx';
 import { StripLabels } from './StripLabels.tsx';
 import { useViewGestures } from './use-view-gestures.ts';
@@ -72,30 +71,7 @@ export function InstrumentStrip(props: InstrumentStripProps) {
           if (canEdit) placeHole(snapPosition(document, frame.mm(event.clientX - left)));
         }}
       >
-        <clipPath id="bench-view">
-          <rect x={frame.viewLeft} width={frame.viewRight - frame.viewLeft + 2} height="400" />
-        </clipPath>
-        {chosen !== undefined && (
-          <rect
-            x={chosen.holeX - frame.measures.columnReach + 3}
-            width={frame.measures.columnReach * 2 - 6}
-            height={frame.measures.stripHeight}
-            className="bench-column"
-          />
-        )}
-        <BodyDrawing frame={frame} shape={shape} unit={unit} />
-        <g clipPath="url(#bench-view)">
-          {holes.map(({ hole, label }) => (
-            <HoleDrawing
-              key={hole.id}
-              frame={frame}
-              shape={shape}
-              hole={hole}
-              label={label}
-              isChosen={hole.id === selection.hole}
-            />
-          ))}
-        </g>
+        <DrawnInstrument frame={frame} shape={shape} holes={holes} unit={unit} chosen={chosen} />
         <StripLabels geometry={geometry} document={document} chosenKey={selection.hole} unit={unit} />
         {placing.spotMm !== null && (
           <circle
