@@ -36,3 +36,22 @@ describe('holes round one place of the bore', () => {
     expect(ring(11, 2)).toEqual([]);
   });
 });
+
+describe('a bore too short for a hole', () => {
+  it('is refused with what would do, since no place would', () => {
+    const document = whistleDocument();
+    const [hole] = document.holes;
+    const short = (stations: typeof document.bore.stations) => ({
+      stations: [stations[0]!, { ...stations.at(-1)!, positionMm: 8 }],
+    });
+    const [fault] = documentFaults({
+      ...document,
+      bore: short(document.bore.stations),
+      outside: short(document.outside.stations),
+      holes: [{ ...hole!, positionMm: 4 }],
+      fingerings: [],
+    });
+    expect(fault?.path).toEqual(['holes', 0, 'positionMm']);
+    expect(fault?.message).toContain('The bore is too short for it. Make it smaller, or the bore longer.');
+  });
+});
